@@ -118,6 +118,7 @@ export interface Comparison {
   readonly groups: readonly (Group & GroupNumbers & { readonly count: Count | null })[];
   /** Unit of the measured column, or null. */
   readonly unit: string | null;
+  /** Name of the measured column; '' where the layout names none (one column a group, typed numbers). */
   readonly measured: string;
   readonly pairs: {
     readonly complete: number;

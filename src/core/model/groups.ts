@@ -1,6 +1,6 @@
 import type { Numbers } from './cells';
 
-/** n, mean and SD (divisor n − 1) of a group in the units of the measured column. */
+/** n, mean and SD (divisor n − 1, NaN where n is 1) of a group in the units of the measured column. */
 export interface Summary {
   readonly label: string;
   readonly n: number;

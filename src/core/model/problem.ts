@@ -40,6 +40,7 @@ export type ProblemCode =
   | 'label-single-value'
   | 'groups-too-few'
   | 'groups-too-many'
+  | 'columns-too-many'
   | 'row-unknown'
   | 'leave-out-unknown'
   | 'success-needed'
@@ -59,6 +60,7 @@ export type ProblemCode =
   | 'method-not-for-this'
   | 'question-not-for-method'
   | 'answer-needed'
+  | 'reason-needed'
   // computing
   | 'values-too-few'
   | 'values-all-equal'
