@@ -38,8 +38,8 @@ export interface MethodResult {
   readonly upper: number | null;
   /** Of the printed interval or bound (0.9 for `equivalent` at confidence 0.95). */
   readonly confidence: number;
-  /** Beside one-sided questions. */
-  readonly twoSided?: { readonly p: number; readonly lower: number; readonly upper: number };
+  /** Beside every question but `differs`: the two-sided p and interval at the stated confidence. */
+  readonly twoSided?: { readonly p: number | null; readonly lower: number | null; readonly upper: number | null };
   readonly extra?: Facts;
 }
 
