@@ -1,0 +1,2 @@
+import { chunk } from 'lodash';
+export const pieces = chunk;

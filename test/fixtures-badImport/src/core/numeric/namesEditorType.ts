@@ -1,0 +1,2 @@
+import type { Uri } from 'vscode';
+export type Where = Uri;

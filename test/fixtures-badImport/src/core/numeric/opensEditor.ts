@@ -1,0 +1,2 @@
+import * as vscode from 'vscode';
+export const open = vscode.workspace.openTextDocument;

@@ -1,0 +1,2 @@
+import { paint } from '../webview/paints';
+export const show = paint;

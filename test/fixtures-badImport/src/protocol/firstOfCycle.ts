@@ -1,0 +1,2 @@
+import { second } from './secondOfCycle';
+export const first = (): string => second();

@@ -1,0 +1,2 @@
+import { first } from './firstOfCycle';
+export const second = (): string => first();

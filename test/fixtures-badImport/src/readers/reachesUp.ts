@@ -1,0 +1,2 @@
+import { read } from '../compare/readsDisk';
+export const readAll = read;

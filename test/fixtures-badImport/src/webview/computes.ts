@@ -1,0 +1,2 @@
+import { readAll } from '../readers/reachesUp';
+export const compute = readAll;
