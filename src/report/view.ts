@@ -1,0 +1,2 @@
+export type { ViewContext } from './view/context';
+export type { View } from './view/shown';
