@@ -53,21 +53,25 @@ async function sweep(written) {
   }
 }
 
-if (watch) {
-  for (const bundle of bundles) await (await context({ ...optionsOf(bundle), logLevel: 'info' })).watch();
-} else {
-  await mkdir('dist/meta', { recursive: true });
-  const written = ['dist/NOTICES.txt'];
-  const metafiles = await Promise.all(
-    bundles.map(async bundle => {
-      const { metafile } = await build(optionsOf(bundle));
-      const meta = `dist/meta/${bundle.out.replace('/', '-')}on`;
-      await writeFile(meta, JSON.stringify(metafile));
-      written.push(meta, `dist/${bundle.out}`);
-      return metafile;
-    }),
-  );
-  await writeFile('dist/NOTICES.txt', await notices(metafiles));
-  await sweep(written);
-  if (existsSync('dist/cli.js')) await chmod('dist/cli.js', 0o755);
+async function buildOne(bundle) {
+  const { metafile } = await build(optionsOf(bundle));
+  const meta = `dist/meta/${bundle.out.replace('/', '-')}on`;
+  await writeFile(meta, JSON.stringify(metafile));
+  return { metafile, files: [meta, `dist/${bundle.out}`] };
 }
+
+async function buildAll() {
+  await mkdir('dist/meta', { recursive: true });
+  const results = await Promise.allSettled(bundles.map(buildOne));
+  if (results.some(({ status }) => status === 'rejected')) process.exit(1); // esbuild has said why
+  const built = results.map(({ value }) => value);
+  if (existsSync('dist/cli.js')) await chmod('dist/cli.js', 0o755);
+  await writeFile('dist/NOTICES.txt', await notices(built.map(({ metafile }) => metafile)));
+  await sweep(['dist/NOTICES.txt', ...built.flatMap(({ files }) => files)]);
+}
+
+async function watchAll() {
+  for (const bundle of bundles) await (await context({ ...optionsOf(bundle), logLevel: 'info' })).watch();
+}
+
+await (watch ? watchAll() : buildAll());
