@@ -33,7 +33,6 @@ try {
 }
 
 async function openBrowserEditor() {
-  console.log('Starting an editor (the first time it is installed, which takes about half a minute) …');
   const server = await startServer();
   const door = await openDoor(
     workbenchAddress(server, { folder: demo, extension: root, file: path.join(demo, file) }),

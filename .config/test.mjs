@@ -13,7 +13,7 @@ const stages = {
   lint: () => checks(lint),
   types: () => checks(types),
   unit: () => vitest(['--exclude', 'test/package/**']),
-  package: async () => (await ensureBuilt(), vitest(['test/package'])),
+  package: async () => (await ensureBuilt(), vitest(['test/package', '--no-file-parallelism'])),
   host: async () => (await ensureBuilt(), (await import('../test/host/stage.mjs')).default()),
   webview: async () => (await ensureBuilt(), (await import('../test/webview/stage.mjs')).default()),
 };

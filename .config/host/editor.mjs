@@ -19,7 +19,7 @@ const limitMs = Number(process.env.WEIGHBEAM_TEST_LIMIT_S ?? 180) * 1000;
 const server = await startServer({ trusted: !values.restricted });
 const { browser, context } = await openBrowser(server.origin);
 const log = [];
-let code = 1;
+let code;
 try {
   const page = await context.newPage();
   const ended = new Promise(resolve => {

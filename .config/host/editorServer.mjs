@@ -33,6 +33,7 @@ const serverOf = folder => path.join(folder, 'node_modules', CARRIER.name, 'lib'
  */
 export async function editorServer() {
   if (!(await isInstalled())) {
+    console.log(`Installing the editor for tests and demo into ${cache} (once, about half a minute) …`);
     await mkdir(cache, { recursive: true });
     const draft = await mkdtemp(path.join(cache, 'installing-'));
     try {
