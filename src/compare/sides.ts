@@ -1,0 +1,33 @@
+import { Refusal } from '../core/model/problem';
+import type { LabelCount } from './labelCounts';
+
+export interface Sides {
+  readonly test: string;
+  readonly reference: string;
+}
+
+/**
+ * Which group is held against which. Two labels and none named: the first met is the test group. One of two named: the
+ * other is the other. Refuses a label that is not there ('label-unknown'), fewer than two labels ('groups-too-few'), and
+ * more than two of which not both are named ('groups-too-many').
+ */
+export function sidesOf(
+  present: readonly LabelCount[],
+  test: string | undefined,
+  reference: string | undefined,
+  column: string,
+): Sides {
+  const labels = present.map(({ label }) => label);
+  const facts = { column, labels, counts: present.map(({ count }) => count) };
+  for (const named of [test, reference]) {
+    if (named !== undefined && !labels.includes(named)) throw new Refusal('label-unknown', { label: named, ...facts });
+  }
+  if (test !== undefined && test === reference) throw new Refusal('groups-too-few', facts);
+  if (test !== undefined && reference !== undefined) return { test, reference };
+  const [first, second] = labels;
+  if (first === undefined || second === undefined) throw new Refusal('groups-too-few', facts);
+  if (labels.length > 2) throw new Refusal('groups-too-many', facts);
+  const other = (named: string): string => (named === first ? second : first);
+  if (test !== undefined) return { test, reference: other(test) };
+  return reference === undefined ? { test: first, reference: second } : { test: other(reference), reference };
+}

@@ -1,0 +1,33 @@
+import type { MethodDescriptor } from '../model/methods';
+import { conservativeT } from './conservativeT';
+import { knownSigmaZ } from './knownSigmaZ';
+import { largeNZ } from './largeNZ';
+import { miettinenNurminen } from './miettinenNurminen';
+import { newcombe } from './newcombe';
+import { pairedT } from './pairedT';
+import { pooledT } from './pooledT';
+import { proportionZ } from './proportionZ';
+import { separateT } from './separateT';
+
+/** Every method, in the order in which rows are printed. Pickers, flags, schema, help and JSON follow from this list. */
+export const methods = [
+  separateT,
+  pooledT,
+  conservativeT,
+  largeNZ,
+  knownSigmaZ,
+  pairedT,
+  proportionZ,
+  newcombe,
+  miettinenNurminen,
+] as const;
+
+export type MethodId = (typeof methods)[number]['id'];
+
+/** The method with this id, from the registry unless another list is given. */
+export function methodById(
+  id: string,
+  list: readonly MethodDescriptor[] = methods,
+): MethodDescriptor | undefined {
+  return list.find(method => method.id === id);
+}
