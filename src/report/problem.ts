@@ -1,0 +1,34 @@
+import type { CellRef, Problem, ProblemCode, Refusal } from '../core/model/problem';
+import type { Say } from '../core/model/say';
+import { askingProblems } from './problems/asking';
+import { computingProblems } from './problems/computing';
+import { namingProblems } from './problems/naming';
+import { readingProblems } from './problems/reading';
+import { toldBy, type SayProblem } from './problems/told';
+import { visible } from './words/label';
+
+/** One sentence and one remedy for every way of being refused: a code without words does not compile. */
+const words: Readonly<Record<ProblemCode, SayProblem>> = {
+  ...readingProblems,
+  ...namingProblems,
+  ...askingProblems,
+  ...computingProblems,
+};
+
+/** A refusal in words: what happened, where (file, line and column, each from 1), and what to do. */
+export function problemWords(refusal: Refusal, t: Say, files: readonly string[] = []): Problem {
+  const { message, fix } = words[refusal.code](toldBy(refusal.facts, t));
+  return { code: refusal.code, message, where: whereOf(refusal.where, t, files), fix };
+}
+
+/** A problem on one line, as the command line prints it. */
+export function problemLine({ code, message, where, fix }: Problem): string {
+  return `${code}: ${message}${where === null ? '' : ` (${where})`}. ${fix}`;
+}
+
+function whereOf(where: CellRef | string | null, t: Say, files: readonly string[]): string | null {
+  if (where === null || typeof where === 'string') return where === null ? null : visible(where);
+  const file = files[where.file];
+  const place = t('line {0}, column {1}', where.line, where.field + 1);
+  return file === undefined ? place : `${visible(file)} ${place}`;
+}

@@ -1,0 +1,81 @@
+import type { SayProblem } from './told';
+
+/** Why what was asked cannot be asked of these data, or was asked in a way that could mean two things. */
+export const askingProblems = {
+  'confidence-out-of-range': ({ t, number, text }) => ({
+    message:
+      text('question') === null
+        ? t('A confidence of {0} does not lie between 0 and 1', number('confidence') ?? '?')
+        : t('A confidence of {0} is too low for this question', number('confidence') ?? '?'),
+    fix: t('Give a share between 0 and 1, such as 0.95.'),
+  }),
+  'confidence-as-percent': ({ t, number }) => ({
+    message: t('A confidence of {0} looks like a percentage', number('confidence') ?? '?'),
+    fix: t('Did you mean {0}? Type it as a share between 0 and 1.', number('meant') ?? 0.95),
+  }),
+  'sigma-needed': ({ t }) => ({
+    message: t('Known standard deviations were asked for and none were given'),
+    fix: t('Give both, of single values, test group first: --sigma 0.8,1.1.'),
+  }),
+  'sigma-not-positive': ({ t, list }) => ({
+    message: t('A standard deviation has to be above 0; given: {0}', list('sigma') ?? '?'),
+    fix: t('Give both known standard deviations, test group first: --sigma 0.8,1.1.'),
+  }),
+  'margin-needed': ({ t }) => ({
+    message: t('This question needs a margin'),
+    fix: t(
+      'State it in the units of the measured column, before the result is seen: --margin 5 or --margin=-3,5.',
+    ),
+  }),
+  'margin-invalid': ({ t, number }) => ({
+    message: t(
+      'A margin runs from below 0 to above 0; given: {0} to {1}',
+      number('low') ?? '?',
+      number('high') ?? '?',
+    ),
+    fix: t('Give one number above 0, or both bounds: --margin=-3,5.'),
+  }),
+  'matters-invalid': ({ t, number }) => ({
+    message: t('The size that matters has to be a number above 0; given: {0}', number('matters') ?? '?'),
+    fix: t('Give the smallest difference that matters in practice, in the units of the measured column.'),
+  }),
+  'method-unknown': ({ t, text, list }) => ({
+    message: t('There is no method {0}', text('method') ?? ''),
+    fix: t('The methods are: {0}.', list('methods') ?? ''),
+  }),
+  'method-not-for-this': ({ t, text, list }) => ({
+    message: notForThis(t, text, list),
+    fix: t('Leave the method to its default, or see what each one is for: weighbeam methods.'),
+  }),
+  'question-not-for-method': ({ t, text, list }) => ({
+    message: t('{0} does not answer the question "{1}"', text('method') ?? '', text('question') ?? ''),
+    fix: t('It answers: {0}.', list('questions') ?? ''),
+  }),
+  'answer-needed': ({ t, list }) => ({
+    message: t('The data leave a question open, so no record is made: {0}', list('open') ?? ''),
+    fix: t('Answer it; the number itself is printed beside the question (--format text or json).'),
+  }),
+  'reason-needed': ({ t, number, text }) => ({
+    message:
+      number('line') === null
+        ? t('A reason is needed for {0}', text('key') ?? t('this change'))
+        : t('Line {0} is left out without a reason', number('line') ?? '?'),
+    fix: t('State why; the reason stands in the record.'),
+  }),
+} as const satisfies Record<string, SayProblem>;
+
+function notForThis(
+  t: Parameters<SayProblem>[0]['t'],
+  text: (name: string) => string | null,
+  list: (name: string) => string | null,
+): string {
+  const asked = [text('method'), text('variance'), text('df'), text('curve')].filter(word => word !== null);
+  const name = asked.join(', ');
+  const pair = text('pair');
+  if (pair !== null && name === '')
+    return t('Units ({0}) and pairs ({1}) cannot be used together', list('per') ?? '', pair);
+  if (text('needs') === 'pair') return t('{0} compares pairs, and no pair column is named', name);
+  if (pair !== null) return t('{0} does not compare pairs ({1})', name, pair);
+  if (text('measure') !== null) return t('{0} does not go with the measure {1}', name, text('measure') ?? '');
+  return t('These do not go together: {0}', name);
+}

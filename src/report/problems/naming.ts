@@ -1,0 +1,102 @@
+import type { SayProblem } from './told';
+
+/** Why the columns, groups or rows named do not make a comparison. */
+export const namingProblems = {
+  'column-unknown': ({ t, text, list }) => ({
+    message: t('There is no column {0}', text('name') ?? ''),
+    fix: t('The columns are: {0}.', list('columns') ?? t('none')),
+  }),
+  'column-ambiguous': ({ t, text, list }) => ({
+    message: t('More than one column is called {0}', text('name') ?? ''),
+    fix: t('Name it by its place: {0}.', list('columns') ?? ''),
+  }),
+  'column-needed': ({ t, text, list }) => ({
+    message: t('No column is named for this part: {0}', text('needed') ?? ''),
+    fix: t('Name it; the columns are: {0}.', list('columns') ?? t('none')),
+  }),
+  'label-unknown': ({ t, text, list }) => ({
+    message:
+      text('column') === null
+        ? t('There is no group {0}', text('label') ?? '')
+        : t('{0} does not occur in column {1}', text('label') ?? '', text('column') ?? ''),
+    fix: t('The labels are: {0}. They are compared exactly as written.', list('labels') ?? t('none')),
+  }),
+  'label-needed': ({ t, list }) => ({
+    message: t('It is not said which groups are compared'),
+    fix: t('Name the test group and the reference group; the labels are: {0}.', list('labels') ?? ''),
+  }),
+  'label-single-value': ({ t, text, list }) => ({
+    message: t('The label {0} occurs once: one value has no spread', text('label') ?? ''),
+    fix:
+      list('labels') === null
+        ? t('Check whether it is another group misspelt (--same "FROM -> TO"), or choose another group.')
+        : t(
+            'Check whether it is another group misspelt (--same "FROM -> TO"), or choose among: {0}.',
+            list('labels') ?? '',
+          ),
+  }),
+  'groups-too-few': ({ t, list }) => ({
+    message: t('There are not two groups to compare'),
+    fix:
+      list('labels') === null
+        ? t('Name two different groups.')
+        : t('Name two different groups; found: {0}.', list('labels') ?? ''),
+  }),
+  'groups-too-many': ({ t, list }) => ({
+    message: t('There are more than two groups: {0}', list('labels') ?? ''),
+    fix: t(
+      'Name the two to compare (--test, --reference). To choose them after seeing the values overstates what they show.',
+    ),
+  }),
+  'columns-too-many': ({ t, list }) => ({
+    message: t('More than one measured column was named: {0}', list('columns') ?? ''),
+    fix: t('Compare one measured column at a time.'),
+  }),
+  'row-unknown': ({ t, number }) => ({
+    message: t('No data row starts on lines {0} to {1}', number('from') ?? '?', number('to') ?? '?'),
+    fix: t('The data rows stand on lines {0} to {1}.', number('first') ?? '?', number('last') ?? '?'),
+  }),
+  'leave-out-unknown': ({ t, number }) => ({
+    message: t('No data row starts on line {0}, so it cannot be left out', number('line') ?? '?'),
+    fix: t('Give the line on which the row starts; the first line of the file is 1.'),
+  }),
+  'success-needed': ({ t, list }) => ({
+    message: t('It is not said which outcome is counted'),
+    fix: t('Name it (--success); the outcomes are: {0}.', list('outcomes') ?? list('labels') ?? ''),
+  }),
+  'outcomes-too-many': ({ t, list, text }) => ({
+    message: t(
+      'A share is of two outcomes; {0} holds more: {1}',
+      text('column') ?? t('the column'),
+      list('outcomes') ?? list('labels') ?? '',
+    ),
+    fix: t('Declare outcomes the same (--same "FROM -> TO"), or name the one that is counted (--success).'),
+  }),
+  'units-disagree': ({ t, text, list }) => ({
+    message: t(
+      'Unit {0} stands in more than one group{1}',
+      text('unit') ?? '',
+      list('labels') === null ? '' : `: ${list('labels') ?? ''}`,
+    ),
+    fix: t(
+      'A unit that got both treatments makes a pair (--pair). If ids start again in each group, say so: --pair none.',
+    ),
+  }),
+  'pairs-repeated': ({ t, text, number }) => ({
+    message: t(
+      'The id {0} occurs more than once in a group{1}',
+      text('id') ?? '',
+      number('count') === null ? '' : ` (${String(number('count'))})`,
+    ),
+    fix: t(
+      'Each id may have one value in each group: average the readings first, or name the unit column (--per).',
+    ),
+  }),
+  'pairs-none': ({ t, text }) => ({
+    message: t(
+      'Fewer than two ids{0} occur in both groups',
+      text('column') === null ? '' : ` (${text('column') ?? ''})`,
+    ),
+    fix: t('Check the pair column: the same id has to stand in both groups, exactly as written.'),
+  }),
+} as const satisfies Record<string, SayProblem>;

@@ -1,0 +1,85 @@
+import type { SayProblem } from './told';
+
+/** Why a file could not be read. */
+export const readingProblems = {
+  'file-empty': ({ t }) => ({
+    message: t('The file is empty'),
+    fix: t('Export the data again, or choose another file.'),
+  }),
+  'file-header-only': ({ t }) => ({
+    message: t('The file has a header and no data row under it'),
+    fix: t(
+      'Export the data again with its rows, or name the header’s line if another line holds it (--header).',
+    ),
+  }),
+  'file-binary': ({ t }) => ({
+    message: t('The file is not text: it holds bytes that no text has'),
+    fix: t('Export the sheet as CSV and choose that file.'),
+  }),
+  'file-not-found': ({ t, text }) => ({
+    message: t('There is no file {0}', text('name') ?? ''),
+    fix: t('Check the name and the folder it is looked for in.'),
+  }),
+  'file-outside-root': ({ t, text }) => ({
+    message: t('{0} lies outside the root folder', text('name') ?? t('The file')),
+    fix: t('Move the file under the root, or name a root that holds it (--root).'),
+  }),
+  'encoding-invalid': ({ t, text }) => ({
+    message:
+      text('encoding') === null
+        ? t('The bytes of the file do not fit its encoding')
+        : t('The bytes of the file do not fit the encoding {0}', text('encoding') ?? ''),
+    fix: t('Name the encoding the file was written in (--encoding), or save it as UTF-8.'),
+  }),
+  'quote-unclosed': ({ t }) => ({
+    message: t('A quotation mark is opened and never closed'),
+    fix: t('Close the quotation mark that starts in this cell.'),
+  }),
+  'decimal-undecidable': ({ t, text }) => ({
+    message: t(
+      'The values read equally well with a decimal comma and with a decimal point{0}',
+      text('example') === null ? '' : ` (${text('example') ?? ''})`,
+    ),
+    fix: t('Say which it is: --decimal , or --decimal .'),
+  }),
+  'layouts-equal': ({ t, list }) => ({
+    message: t(
+      'Two ways of cutting the lines into cells fit equally well{0}',
+      list('delimiters') === null ? '' : `: ${list('delimiters') ?? ''}`,
+    ),
+    fix: t('Name the delimiter (--delimiter), and the header’s line if needed (--header).'),
+  }),
+  'header-not-found': ({ t, text }) => ({
+    message:
+      text('header') === null
+        ? t('No line of the file looks like a header')
+        : t('Line {0} is not in the file, so it cannot be the header', text('header') ?? ''),
+    fix: t('Name the line that holds the column names (--header).'),
+  }),
+  'text-in-measured': ({ t, number, list }) => ({
+    message: t(
+      '{0} of the measured cells hold text that is not a number: {1}',
+      number('count') ?? 1,
+      list('texts') ?? '',
+    ),
+    fix: t(
+      'Correct the cells in the file, or leave those rows out with a reason (--leave-out "LINE:reason").',
+    ),
+  }),
+  'censored-unanswered': ({ t, number }) => ({
+    message: t(
+      '{0} of the measured cells say only that the value lies below or above a limit',
+      number('count') ?? 1,
+    ),
+    fix: t(
+      'Say how such values are counted: --below zero, half or limit. Each choice can change the answer.',
+    ),
+  }),
+  'number-unusable': ({ t, text }) => ({
+    message:
+      text('text') === null
+        ? t('A number cannot be used: it is not finite, or larger than can be computed with')
+        : t('{0} cannot be used as a number', text('text') ?? ''),
+    fix: t('Correct the number, or leave its row out with a reason.'),
+  }),
+} as const satisfies Record<string, SayProblem>;

@@ -1,0 +1,42 @@
+import type { Facts, Say } from '../../core/model/say';
+import { showLabel } from '../words/label';
+
+/** The facts of a refusal as text; what is absent is null, so that a sentence can do without it. */
+export interface Told {
+  readonly t: Say;
+  readonly text: (name: string) => string | null;
+  readonly number: (name: string) => number | null;
+  /** Names joined by commas, the first 20 of them. */
+  readonly list: (name: string) => string | null;
+}
+
+/** What happened, and what to do. */
+export interface ProblemWords {
+  readonly message: string;
+  readonly fix: string;
+}
+
+export type SayProblem = (told: Told) => ProblemWords;
+
+const MOST_NAMED = 20;
+
+export function toldBy(facts: Facts, t: Say): Told {
+  return {
+    t,
+    text: name => {
+      const fact = facts[name];
+      if (typeof fact === 'string') return showLabel(fact);
+      return typeof fact === 'number' ? String(fact) : null;
+    },
+    number: name => {
+      const fact = facts[name];
+      return typeof fact === 'number' ? fact : null;
+    },
+    list: name => {
+      const fact = facts[name];
+      if (!Array.isArray(fact) || fact.length === 0) return null;
+      const names = fact.slice(0, MOST_NAMED).map(one => showLabel(String(one)));
+      return fact.length > MOST_NAMED ? `${names.join(', ')}, …` : names.join(', ');
+    },
+  };
+}
