@@ -1,0 +1,11 @@
+import { createHash } from 'node:crypto';
+import type { Hasher } from '../../core/model/hasher';
+
+/** SHA-256 by the platform's own library. */
+export function createHasher(): Hasher {
+  const hash = createHash('sha256');
+  return {
+    update: bytes => void (typeof bytes === 'string' ? hash.update(bytes, 'utf8') : hash.update(bytes)),
+    hex: () => hash.digest('hex'),
+  };
+}

@@ -1,0 +1,76 @@
+import { Panel } from '../report/panel/panel';
+import type { FromPanel } from '../protocol/fromPanel';
+import type { ShownProblem } from '../protocol/places';
+import type { Busy, Notice, Show } from '../protocol/toPanel';
+
+interface PageProps {
+  readonly show: Show | null;
+  readonly busy: Busy | null;
+  readonly send: (message: FromPanel) => void;
+}
+
+/** The whole page: what is going on, what must be known, then the comparison or why there is none. */
+export function Page({ show, busy, send }: PageProps) {
+  return (
+    <>
+      <Status show={show} busy={busy} />
+      {show?.notices.map(notice => (
+        <NoticeLine notice={notice} send={send} />
+      ))}
+      {show?.problem != null && <ProblemPart problem={show.problem} words={show.words} send={send} />}
+      {show?.view != null && (
+        <Panel view={show.view} send={action => send({ type: 'act', revision: show.revision, action })} />
+      )}
+    </>
+  );
+}
+
+/** Read out by screen readers whenever it changes; seen only while something is going on. */
+function Status({ show, busy }: Pick<PageProps, 'show' | 'busy'>) {
+  const known = busy !== null && busy.total > 0;
+  return (
+    <div role="status" class={busy === null ? 'wb-status wb-status-ready' : 'wb-status'}>
+      {busy === null ? <span class="wb-unseen">{show?.words.ready}</span> : busy.says}
+      {known && <progress value={busy.done} max={busy.total} aria-label={busy.says} />}
+    </div>
+  );
+}
+
+function NoticeLine({ notice, send }: { readonly notice: Notice } & Pick<PageProps, 'send'>) {
+  const { action } = notice;
+  return (
+    <p class="wb-notice">
+      {notice.text}
+      {action !== null && (
+        <button type="button" onClick={() => send({ type: 'notice', id: action.id })}>
+          {action.label}
+        </button>
+      )}
+    </p>
+  );
+}
+
+interface ProblemProps extends Pick<PageProps, 'send'> {
+  readonly problem: ShownProblem;
+  readonly words: Show['words'];
+}
+
+/** Why there is no number: what happened, where, and what to do. */
+function ProblemPart({ problem, words, send }: ProblemProps) {
+  return (
+    <section class="wb-problem" aria-label={words.problem}>
+      <h1>{problem.message}</h1>
+      {problem.where !== null && (
+        <p>
+          {problem.where}
+          {problem.at !== null && (
+            <button type="button" onClick={() => send({ type: 'showProblem' })}>
+              {words.showCell}
+            </button>
+          )}
+        </p>
+      )}
+      <p>{problem.fix}</p>
+    </section>
+  );
+}

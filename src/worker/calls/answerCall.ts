@@ -1,0 +1,15 @@
+import { answer, type Answered } from '../../compare/answer';
+import { compare } from '../../compare/compare';
+import { settle } from '../../compare/settle';
+import type { Request } from '../../compare/request';
+import type { Answer } from '../../protocol/toWorker';
+import { jsonReport } from '../../report/json';
+import { viewOf } from '../../report/view';
+import { blockFrom } from '../../settings/block';
+import { cellsDigest } from '../../settings/digests';
+import { printBlock } from '../../settings/printBlock';
+import type { Sitting } from '../desk';
+import { filesKey } from '../filesAtHand';
+import { readingFacts } from '../readingFacts';
+import type { Reply } from '../reply';
+import { shelfKey } from '../shelf';

@@ -1,0 +1,62 @@
+import type { LabelColumn } from '../../core/model/cells';
+import type { FileInput } from '../../protocol/files';
+import type { NextStep } from '../../protocol/toWorker';
+import { readTable } from '../../readers/readTable';
+import type { ReadingWish } from '../../readers/readingWish';
+import type { Survey } from '../../readers/survey';
+import type { AskContext } from '../asking/askContext';
+import { canBeIds, canBeLabels } from '../asking/columnRoles';
+import { nextStep, onlyStep } from '../asking/nextStep';
+import type { Sitting } from '../desk';
+import { filesKey, scoutFiles, surveyFile } from '../filesAtHand';
+import type { Reply } from '../reply';
+
+/** Above this, labels are not looked at row by row before a question: asking must stay quick. */
+const MOST_ROWS = 200_000;
+
+/** Decides what is to be asked next about these files. */
+export async function nextStepCall(call: NextStep, sitting: Sitting): Promise<Reply<'asked'>> {
+  const { desk, tick } = sitting;
+  const wish = call.request.wish ?? {};
+  const [file] = call.files;
+  if (file === undefined) return { type: 'asked', step: null, request: call.request };
+  const survey = await surveyFile(desk, file, wish, tick);
+  const labels =
+    survey.rows > MOST_ROWS
+      ? new Map<string, LabelColumn>()
+      : await labelColumns(file, wish, survey, sitting);
+  const context: AskContext = {
+    t: desk.t,
+    files: call.files.map(({ name }) => name),
+    rows: survey.rows,
+    columns: survey.columns,
+    request: call.request,
+    picked: call.columns,
+    remembered: call.remembered,
+    answered: call.answered,
+    labelsOf: name => labels.get(name) ?? null,
+  };
+  if (call.only !== null) return { type: 'asked', step: onlyStep(context, call.only), request: call.request };
+  return { type: 'asked', ...nextStep(context) };
+}
+
+/** Every column that could hold labels or ids, as labels. */
+async function labelColumns(
+  file: FileInput,
+  wish: ReadingWish,
+  survey: Survey,
+  { desk, tick }: Sitting,
+): Promise<ReadonlyMap<string, LabelColumn>> {
+  const wanted = survey.columns
+    .filter(column => canBeIds(column) || canBeLabels(column))
+    .map(({ field }) => field);
+  const table = await desk.tables.get(filesKey([file], wish), async () =>
+    readTable(
+      [desk.platform.open(file)],
+      await scoutFiles(desk, [file], wish),
+      { numbers: [], labels: wanted },
+      { tick },
+    ),
+  );
+  return new Map(wanted.map(field => [survey.fields[field]?.name ?? '', table.labels(field)]));
+}

@@ -1,0 +1,34 @@
+import { Refusal } from '../../core/model/problem';
+import type { Recheck } from '../../protocol/toWorker';
+import type { ByteSource } from '../../readers/byteSource';
+import { recheckBlock } from '../../recheck/recheckBlock';
+import type { Outcome } from '../../recheck/outcome';
+import { outcomeSentence } from '../../report/outcome';
+import { findBlocks } from '../../settings/findBlocks';
+import type { OutcomeShown } from '../../protocol/fromWorker';
+import type { Desk, Sitting } from '../desk';
+import type { Reply } from '../reply';
+
+/** Rechecks every settings block of a text against the files that were found for it. */
+export async function recheckCall(call: Recheck, { desk, tick }: Sitting): Promise<Reply<'rechecked'>> {
+  const open = (path: string): Promise<ByteSource | null> => {
+    const named = call.files.find(({ name }) => name === path);
+    if (named?.outside === true)
+      return Promise.reject(new Refusal('file-outside-root', { file: path }, path));
+    return Promise.resolve(named?.input == null ? null : desk.platform.open(named.input));
+  };
+  const outcomes: OutcomeShown[] = [];
+  for (const found of findBlocks(call.text)) {
+    const outcome = await recheckBlock(found, open, { tick, createHasher: desk.platform.createHasher });
+    outcomes.push(shown(outcome, desk));
+  }
+  return { type: 'rechecked', outcomes };
+}
+
+const shown = (outcome: Outcome, { t }: Desk): OutcomeShown => ({
+  kind: outcome.kind,
+  firstLine: outcome.firstLine,
+  line: outcome.line,
+  sentence: outcomeSentence(outcome, t),
+  changes: outcome.changes.map(({ key, was, is }) => ({ key, was: String(was), is: String(is) })),
+});
