@@ -21,8 +21,13 @@ export function problemWords(refusal: Refusal, t: Say, files: readonly string[] 
   return { code: refusal.code, message, where: whereOf(refusal.where, t, files), fix };
 }
 
-/** A problem on one line, as the command line prints it. */
-export function problemLine({ code, message, where, fix }: Problem): string {
+/** A problem on one line, as the command line prints it; surfaces have problems of their own beside those of core. */
+export function problemLine({
+  code,
+  message,
+  where,
+  fix,
+}: Omit<Problem, 'code'> & { readonly code: string }): string {
   return `${code}: ${message}${where === null ? '' : ` (${where})`}. ${fix}`;
 }
 

@@ -1,3 +1,4 @@
+import type { Say } from '../../core/model/say';
 import type { SayProblem } from './told';
 
 /** Why the columns, groups or rows named do not make a comparison. */
@@ -11,8 +12,16 @@ export const namingProblems = {
     fix: t('Name it by its place: {0}.', list('columns') ?? ''),
   }),
   'column-needed': ({ t, text, list }) => ({
-    message: t('No column is named for this part: {0}', text('needed') ?? ''),
-    fix: t('Name it; the columns are: {0}.', list('columns') ?? t('none')),
+    message: columnNeeded(t, text('needed') ?? ''),
+    fix:
+      text('needed') === 'measured'
+        ? t('Name it (--of); the columns are: {0}.', list('columns') ?? t('none'))
+        : text('needed') === 'label'
+          ? t(
+              'Name it (--by), or one column a group (--columns); the columns are: {0}.',
+              list('columns') ?? t('none'),
+            )
+          : t('The columns are: {0}.', list('columns') ?? t('none')),
   }),
   'label-unknown': ({ t, text, list }) => ({
     message:
@@ -100,3 +109,9 @@ export const namingProblems = {
     fix: t('Check the pair column: the same id has to stand in both groups, exactly as written.'),
   }),
 } as const satisfies Record<string, SayProblem>;
+
+function columnNeeded(t: Say, needed: string): string {
+  if (needed === 'measured') return t('No measured column is named');
+  if (needed === 'label') return t('No label column is named');
+  return t('A file of summaries needs a column {0}', needed);
+}
