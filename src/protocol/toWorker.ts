@@ -1,12 +1,14 @@
 import * as v from 'valibot';
 import { checked } from './checked';
 import type { Request } from '../compare/request';
+import type { Session } from '../compare/session';
 import type { Provenance } from '../core/model/settings';
 import { stepIds, type StepId } from './asking';
 import { fileInputSchema, textSpanSchema, type FileInput, type TextSpan } from './files';
 import { countSchema, lineSchema } from './places';
 import { provenanceSchema } from './provenance';
-import { partialRequestSchema, requestSchema } from './request';
+import { partialRequestSchema } from './request';
+import { sessionSchema } from './session';
 
 /** First message to a new worker, once: the words of the reader's language, our version, and where giving up is marked. */
 export interface Start {
@@ -47,7 +49,8 @@ export interface NextStep extends Called {
 export interface Answer extends Called {
   readonly type: 'answer';
   readonly files: readonly FileInput[];
-  readonly request: Request;
+  readonly session: Session;
+  /** What the record says of itself; `changed` and `reasons` are filled in from the session. */
   readonly provenance: Provenance;
   /** When the record is written: ISO 8601 with the offset of the place. */
   readonly written: string;
@@ -127,7 +130,7 @@ const toWorkerSchema: v.GenericSchema<unknown, ToWorker> = v.variant('type', [
     type: v.literal('answer'),
     ...called,
     files,
-    request: requestSchema,
+    session: sessionSchema,
     provenance: provenanceSchema,
     written: v.pipe(v.string(), v.isoTimestamp()),
     record: v.boolean(),

@@ -1,0 +1,52 @@
+import { ExtensionMode, languages, window, type ExtensionContext } from 'vscode';
+import { addToNotebook } from './commands/addToNotebook';
+import { register } from './commands/command';
+import { compare } from './commands/compare';
+import { copyBlock } from './commands/copyBlock';
+import { leaveOut } from './commands/leaveOut';
+import { openDemo } from './commands/openDemo';
+import { recheckNotebook } from './commands/recheckNotebook';
+import { redo, undo } from './commands/undoRedo';
+import { ComputeClient } from './compute/computeClient';
+import type { Host } from './host';
+import { Log } from './log';
+import { viewType } from './panel/comparisonPanel';
+import { PanelManager } from './panel/panelManager';
+import type { Shown } from './panel/shown';
+import type { Services } from './services';
+
+/** What the extension's own tests see of it. */
+export interface TestApi {
+  /** What the panel in front shows, or showed last. */
+  lastShown(): Shown | null;
+  /** Ends the worker as a crash would. */
+  endWorker(): void;
+}
+
+/** Wires the parts; everything else begins when a command or a panel asks for it. */
+export function activate(context: ExtensionContext): TestApi | undefined {
+  const channel = window.createOutputChannel('Weighbeam', { log: true });
+  const log = new Log(channel);
+  const { version } = context.extension.packageJSON as { readonly version: string };
+  const client = new ComputeClient(context.extensionUri, version, log);
+  const testing = context.extensionMode === ExtensionMode.Test;
+  const services: Services = { context, client, log, testing };
+  const panels = new PanelManager(services);
+  const diagnostics = languages.createDiagnosticCollection('weighbeam');
+  const host: Host = { ...services, panels, diagnostics };
+  const commands = [compare, openDemo, copyBlock, addToNotebook, recheckNotebook, leaveOut, undo, redo];
+  context.subscriptions.push(
+    channel,
+    client,
+    panels,
+    diagnostics,
+    window.registerWebviewPanelSerializer(viewType, panels),
+    ...register(
+      log,
+      commands.map(make => make(host)),
+    ),
+  );
+  return testing
+    ? { lastShown: () => panels.current?.shown ?? null, endWorker: () => client.end() }
+    : undefined;
+}

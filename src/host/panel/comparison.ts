@@ -1,0 +1,177 @@
+import { CancellationError, CancellationTokenSource, EventEmitter, type Disposable } from 'vscode';
+import type { Request } from '../../compare/request';
+import { reduce, requestOf, type Action, type Session } from '../../compare/session';
+import type { Provenance } from '../../core/model/settings';
+import { OtherSideGone } from '../../protocol/calls';
+import type { FileInput } from '../../protocol/files';
+import type { Answered } from '../../protocol/fromWorker';
+import { RefusedError } from '../compute/computeClient';
+import { openFile } from '../files/openedFile';
+import { lastPart } from '../files/root';
+import { timestamp } from '../timestamp';
+import type { Services } from '../services';
+import { keepSeen, seenBefore } from './seenBefore';
+import type { Shown } from './shown';
+import type { Subject } from './subject';
+
+interface Opened {
+  readonly files: readonly FileInput[];
+  readonly unsaved: boolean;
+}
+
+/** One comparison: what is asked of which files, what came of it, and how it is computed anew. It knows no panel. */
+export class Comparison implements Disposable {
+  private readonly shownEmitter = new EventEmitter<Shown>();
+  private readonly busyEmitter = new EventEmitter<{ readonly done: number; readonly total: number }>();
+  readonly onDidShow = this.shownEmitter.event;
+  readonly onBusy = this.busyEmitter.event;
+  /** The last answer or problem; null: nothing was computed yet. */
+  shown: Shown | null = null;
+  private running: CancellationTokenSource | null = null;
+  private revision = 0;
+  /** The result that was seen last. */
+  private seen: { readonly request: Request; readonly cells: string } | null = null;
+
+  constructor(
+    private readonly services: Services,
+    public subject: Subject,
+    private session: Session,
+    private provenance: Provenance,
+  ) {}
+
+  get request(): Request {
+    return requestOf(this.session);
+  }
+
+  /** What stands before its questions. */
+  get title(): string {
+    return this.subject.files.map(lastPart).join(', ');
+  }
+
+  get stated(): Provenance {
+    return this.provenance;
+  }
+
+  /** Whether a result was seen: what is changed from then on is marked in the record. */
+  get wasSeen(): boolean {
+    return this.session.firstShown !== null;
+  }
+
+  /** Takes up a change of what is asked and computes anew. */
+  async act(...actions: readonly Action[]): Promise<void> {
+    this.session = actions.reduce(reduce, this.session);
+    await this.run();
+  }
+
+  /** States something for the record that changes no number. */
+  async state(stated: Partial<Provenance>): Promise<void> {
+    this.provenance = { ...this.provenance, ...stated };
+    await this.run();
+  }
+
+  /** The files lie elsewhere now; their names in the record follow. */
+  moveTo(subject: Subject, files: readonly string[], when: string): void {
+    this.subject = subject;
+    this.session = reduce(this.session, { kind: 'change', patch: { files }, when });
+  }
+
+  /** Computes what is asked now. A run that is overtaken by a later one shows nothing. */
+  async run(): Promise<void> {
+    this.running?.cancel();
+    const source = new CancellationTokenSource();
+    this.running = source;
+    const revision = ++this.revision;
+    this.busyEmitter.fire({ done: 0, total: 0 });
+    try {
+      const shown = await this.compute(revision, source);
+      if (revision !== this.revision) return;
+      this.shown = shown;
+      this.shownEmitter.fire(shown);
+    } catch (error) {
+      if (!(error instanceof CancellationError)) throw error;
+    } finally {
+      if (this.running === source) this.running = null;
+      source.dispose();
+    }
+  }
+
+  /** The files as the worker gets them now. */
+  async open(): Promise<Opened> {
+    const names = this.request.files;
+    const opened = await Promise.all(this.subject.files.map((uri, index) => openFile(uri, names[index] ?? '')));
+    return { files: opened.map(({ input }) => input), unsaved: opened.some(({ unsaved }) => unsaved) };
+  }
+
+  dispose(): void {
+    this.running?.cancel();
+    this.shownEmitter.dispose();
+    this.busyEmitter.dispose();
+  }
+
+  private async compute(revision: number, source: CancellationTokenSource): Promise<Shown> {
+    const request = this.request;
+    const nothing = { revision, request, view: null, blockText: null, problem: null, open: [], numbers: null };
+    let unsaved = false;
+    let restarted = false;
+    try {
+      const opened = await this.open();
+      unsaved = opened.unsaved;
+      const answered = await this.ask(opened, revision, source).catch((error: unknown) => {
+        if (!(error instanceof OtherSideGone)) throw error;
+        restarted = true; // once: a calculation that always kills the worker must come to an end
+        return this.ask(opened, revision, source);
+      });
+      const { view, blockText, open, numbers } = answered;
+      return { ...nothing, view, blockText, open, numbers, unsaved, restarted };
+    } catch (error) {
+      if (error instanceof RefusedError) {
+        this.services.log.refused(error.problem.code);
+        return { ...nothing, problem: error.problem, unsaved, restarted };
+      }
+      throw error;
+    }
+  }
+
+  private async ask(opened: Opened, revision: number, source: CancellationTokenSource): Promise<Answered> {
+    const { client, log, testing } = this.services;
+    const started = performance.now();
+    const askOnce = (): Promise<Answered> =>
+      client.ask(
+        {
+          type: 'answer',
+          revision,
+          files: opened.files,
+          session: this.session,
+          provenance: this.provenance,
+          written: timestamp(),
+          record: !opened.unsaved,
+          numbers: testing,
+        },
+        { token: source.token, onProgress: (done, total) => this.busyEmitter.fire({ done, total }) },
+      );
+    const answered = await askOnce();
+    log.read(answered.readings, performance.now() - started);
+    const again = this.countLook(answered.cells);
+    return again ? askOnce() : answered;
+  }
+
+  /**
+   * Counts a result that is seen for the first time, under the cells it was made from. Gives whether the record has to
+   * be written again, because these cells were seen before.
+   */
+  private countLook(cells: string): boolean {
+    const state = this.services.context.workspaceState;
+    const { request, seen } = this;
+    if (seen !== null && seen.request === request && seen.cells === cells) return false;
+    const before = seenBefore(state, cells);
+    const session = this.session.firstShown === null ? { ...this.session, firstShown: before?.firstShown ?? null } : this.session;
+    this.session = reduce(session, { kind: 'shown', when: timestamp() });
+    this.seen = { request, cells };
+    const looks = Math.max(before?.looks ?? 0, seen === null ? 0 : this.provenance.looks) + 1;
+    const outdated = looks !== this.provenance.looks || before !== null;
+    this.provenance = { ...this.provenance, looks };
+    const { firstShown } = this.session;
+    if (firstShown !== null) void keepSeen(state, cells, { looks, firstShown });
+    return outdated;
+  }
+}

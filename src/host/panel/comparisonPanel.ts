@@ -1,0 +1,175 @@
+import { EventEmitter, l10n, Uri, ViewColumn, window, type Disposable, type WebviewPanel } from 'vscode';
+import { readFromPanel, type FromPanel } from '../../protocol/fromPanel';
+import type { Busy, Notice, Show } from '../../protocol/toPanel';
+import { documentOf } from '../files/openedFile';
+import { lastPart, recordName, rootOf } from '../files/root';
+import { chooseFile } from '../selecting/chooseFile';
+import type { Services } from '../services';
+import { timestamp } from '../timestamp';
+import type { Comparison } from './comparison';
+import { watchFiles } from './fileWatch';
+import { noticesFor, type FileState } from './notices';
+import { actOn, showProblemCell } from './panelActions';
+import { panelHtml } from './panelHtml';
+
+export const viewType = 'weighbeam.comparison';
+
+/** One panel: shows a comparison, passes on what its controls ask for, and says what befalls its files. */
+export class ComparisonPanel implements Disposable {
+  private readonly disposables: Disposable[] = [];
+  private readonly closed = new EventEmitter<void>();
+  readonly onDidClose = this.closed.event;
+  private watch: Disposable | null = null;
+  private fileState: FileState = 'as computed';
+  private busy: Busy | null = null;
+  private listening = false;
+
+  constructor(
+    private readonly services: Services,
+    readonly comparison: Comparison,
+    readonly panel: WebviewPanel,
+  ) {
+    const { extensionUri } = services.context;
+    panel.webview.options = {
+      enableScripts: true,
+      enableForms: false,
+      localResourceRoots: [Uri.joinPath(extensionUri, 'dist'), Uri.joinPath(extensionUri, 'media')],
+    };
+    this.disposables.push(
+      panel.webview.onDidReceiveMessage(message => this.receive(message)),
+      panel.onDidChangeViewState(() => {
+        // What was sent to a hidden panel never arrived.
+        if (panel.visible) this.send();
+      }),
+      panel.onDidDispose(() => this.dispose()),
+      comparison.onDidShow(() => {
+        this.fileState = 'as computed';
+        this.busy = null;
+        this.send();
+      }),
+      comparison.onBusy(({ done, total }) => this.tell(done, total)),
+    );
+    this.follow();
+    panel.webview.html = panelHtml(panel.webview, extensionUri);
+  }
+
+  reveal(): void {
+    this.panel.reveal(undefined, true);
+  }
+
+  dispose(): void {
+    this.watch?.dispose();
+    for (const disposable of this.disposables.splice(0)) disposable.dispose();
+    this.comparison.dispose();
+    this.closed.fire();
+    this.closed.dispose();
+    this.panel.dispose();
+  }
+
+  private receive(message: unknown): void {
+    this.handle(readFromPanel(message)).catch((error: unknown) => {
+      this.services.log.failed('panel', error instanceof Error ? (error.stack ?? error.message) : String(error));
+    });
+  }
+
+  private async handle(message: FromPanel): Promise<void> {
+    switch (message.type) {
+      case 'ready':
+        this.listening = true;
+        this.send();
+        return;
+      case 'act':
+        // A click on numbers that have just been replaced means something else by now.
+        if (message.revision === this.comparison.shown?.revision) await actOn(this.services, this.comparison, message.action);
+        return;
+      case 'notice':
+        await this.onNotice(message.id);
+        return;
+      case 'showProblem':
+        await showProblemCell(this.services, this.comparison);
+    }
+  }
+
+  private async onNotice(id: NonNullable<Notice['action']>['id']): Promise<void> {
+    const { comparison } = this;
+    switch (id) {
+      case 'saveAndRunAgain':
+        await Promise.all(comparison.subject.files.map(uri => documentOf(uri)?.save()));
+        break;
+      case 'runAgain':
+        break;
+      case 'chooseFile': {
+        const uri = await chooseFile();
+        if (uri === null) return;
+        this.replaceFile(0, uri);
+      }
+    }
+    await comparison.run();
+  }
+
+  /** The file lies elsewhere now: the comparison, its record and what is watched go with it. */
+  private replaceFile(index: number, uri: Uri): void {
+    const { comparison } = this;
+    const files = comparison.subject.files.map((file, at) => (at === index ? uri : file));
+    const root = rootOf(files[0] ?? uri);
+    comparison.moveTo({ files, root }, files.map(file => recordName(file, root)), timestamp());
+    this.follow();
+  }
+
+  private follow(): void {
+    const { comparison, panel } = this;
+    this.watch?.dispose();
+    this.watch = watchFiles(
+      comparison.subject.files,
+      state => {
+        this.fileState = state;
+        this.send();
+      },
+      (from, to) => {
+        const index = comparison.subject.files.findIndex(file => file.toString() === from.toString());
+        if (index < 0) return;
+        this.replaceFile(index, to);
+        void comparison.run();
+      },
+    );
+    panel.title = l10n.t('Comparison: {0}', comparison.subject.files.map(lastPart).join(', '));
+  }
+
+  /** Sends the whole of what is to be shown; never waits for it to arrive. */
+  private send(): void {
+    if (!this.listening || !this.panel.visible) return;
+    const { shown, subject, request } = this.comparison;
+    if (shown !== null) {
+      const message: Show = {
+        type: 'show',
+        revision: shown.revision,
+        recipe: { files: subject.files.map(String), blockText: shown.blockText, request },
+        view: shown.view,
+        problem: shown.problem,
+        notices: noticesFor(shown, this.fileState, subject),
+        words: {
+          problem: l10n.t('Why there is no number'),
+          showCell: l10n.t('Show'),
+          ready: l10n.t('Computed'),
+        },
+      };
+      void this.panel.webview.postMessage(message);
+    }
+    if (this.busy !== null) void this.panel.webview.postMessage(this.busy);
+  }
+
+  private tell(done: number, total: number): void {
+    const revision = (this.comparison.shown?.revision ?? 0) + 1;
+    this.busy = { type: 'busy', revision, says: l10n.t('Computing…'), done, total };
+    if (this.listening && this.panel.visible) void this.panel.webview.postMessage(this.busy);
+  }
+}
+
+/** A new, empty panel beside the editor in front; the focus stays where it is. */
+export const createPanel = (): WebviewPanel =>
+  window.createWebviewPanel(
+    viewType,
+    l10n.t('Comparison'),
+    { viewColumn: ViewColumn.Beside, preserveFocus: true },
+    { enableFindWidget: true },
+  );

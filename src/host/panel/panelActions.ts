@@ -1,0 +1,167 @@
+import { commands, l10n, window } from 'vscode';
+import type { Request } from '../../compare/request';
+import type { CellRef } from '../../core/model/problem';
+import type { StepId } from '../../protocol/asking';
+import type { ChangeKey, PanelAction } from '../../report/panel/action';
+import { askConfidence, askMatters, askText } from '../asking/askText';
+import { showStep } from '../asking/showStep';
+import { showCell } from '../files/showCell';
+import type { Services } from '../services';
+import { timestamp } from '../timestamp';
+import type { Comparison } from './comparison';
+
+/** Does what a control of the panel asks for. A person who gives up a question changes nothing. */
+export async function actOn(services: Services, comparison: Comparison, action: PanelAction): Promise<void> {
+  switch (action.kind) {
+    case 'change':
+      return change(services, comparison, action.key);
+    case 'state':
+      return state(comparison, action.key);
+    case 'show':
+      return showAt(services, comparison, action.at);
+    case 'point':
+      await showAt(services, comparison, action.at);
+      return offerToLeaveOut(comparison, action.at);
+    case 'takeBack':
+      return comparison.act({ kind: 'take back', file: action.file, line: action.line, when: timestamp() });
+    case 'copyBlock':
+      await commands.executeCommand('weighbeam.copyBlock');
+  }
+}
+
+/** Goes to the cell that a problem is about. */
+export async function showProblemCell(services: Services, comparison: Comparison): Promise<void> {
+  const at = comparison.shown?.problem?.at ?? null;
+  if (at !== null) await showAt(services, comparison, at);
+}
+
+async function showAt({ client }: Services, comparison: Comparison, at: CellRef): Promise<void> {
+  const { files } = await comparison.open();
+  const [uri, input] = [comparison.subject.files[at.file], files[at.file]];
+  if (uri !== undefined && input !== undefined) {
+    await showCell(client, { uri, input, wish: comparison.request.wish, at });
+  }
+}
+
+/** Offers to leave a row out; needs a reason. */
+export async function offerToLeaveOut(comparison: Comparison, { file, line }: CellRef): Promise<void> {
+  const leaveOut = l10n.t('Leave line {0} out…', line);
+  const detail = l10n.t('The row stays in the file; the record names it with your reason');
+  const picked = await window.showQuickPick([{ label: leaveOut, detail }], { title: l10n.t('Line {0}', line) });
+  if (picked === undefined) return;
+  const reason = await askText({
+    title: leaveOut,
+    prompt: l10n.t('Why? It stands in the settings block.'),
+    placeholder: l10n.t('for example: tile cracked on the saw'),
+    required: true,
+  });
+  if (reason !== null) await comparison.act({ kind: 'leave out', file, line, reason, when: timestamp() });
+}
+
+async function state(comparison: Comparison, key: 'sampling' | 'analyst'): Promise<void> {
+  const { sampling, analyst } = comparison.stated;
+  const text =
+    key === 'sampling'
+      ? await askText({
+          title: l10n.t('How were the samples taken?'),
+          prompt: l10n.t('One line for the settings block'),
+          placeholder: l10n.t('for example: 3 tiles a firing, places by lot'),
+          value: sampling,
+        })
+      : await askText({
+          title: l10n.t('Who did the analysis?'),
+          prompt: l10n.t('A name for the settings block; it is not a signature'),
+          value: analyst,
+        });
+  if (text !== null) await comparison.state({ [key]: text });
+}
+
+const steps: Partial<Record<ChangeKey, StepId>> = {
+  question: 'question',
+  variance: 'variance',
+  measure: 'measure',
+  margin: 'margin',
+};
+
+async function change(services: Services, comparison: Comparison, key: ChangeKey): Promise<void> {
+  const patch = await askPatch(services, comparison, key);
+  if (patch === null) return;
+  const reason = comparison.wasSeen ? await askReason() : '';
+  if (reason === null) return;
+  const when = timestamp();
+  const unset = unsetBy(key, patch);
+  await comparison.act(
+    { kind: 'change', patch, unset, when },
+    ...(reason === '' ? [] : Object.keys(patch).map(changed => ({ kind: 'reason', key: changed, reason }) as const)),
+  );
+}
+
+/** What a new answer makes void: a method is chosen anew with the scale, a margin goes with its question. */
+function unsetBy(key: ChangeKey, patch: Partial<Request>): readonly (keyof Request)[] {
+  const words: readonly (keyof Request)[] = ['variance', 'df', 'curve'];
+  switch (key) {
+    case 'variance':
+      return words;
+    case 'measure':
+      return [...words, 'method'];
+    case 'question':
+      return patch.margin === undefined ? ['margin'] : [];
+    case 'matters':
+      return patch.matters === undefined ? ['matters'] : [];
+    case 'confidence':
+    case 'margin':
+      return [];
+  }
+}
+
+async function askPatch(
+  services: Services,
+  comparison: Comparison,
+  key: ChangeKey,
+): Promise<Partial<Request> | null> {
+  const { request } = comparison;
+  if (key === 'confidence') {
+    const confidence = await askConfidence(request.confidence ?? 0.95);
+    return confidence === null ? null : { confidence };
+  }
+  if (key === 'matters') {
+    const matters = await askMatters(request.matters ?? null, null);
+    if (matters === null) return null;
+    return matters === 'none' ? {} : { matters };
+  }
+  const step = steps[key];
+  return step === undefined ? null : askStep(services, comparison, request, step);
+}
+
+/** Puts one question again; a question that is asked against a margin is followed by that of the margin. */
+async function askStep(
+  services: Services,
+  comparison: Comparison,
+  request: Request,
+  only: StepId,
+): Promise<Partial<Request> | null> {
+  const { files } = await comparison.open();
+  const { step } = await services.client.ask({
+    type: 'nextStep',
+    revision: 0,
+    files,
+    request,
+    columns: null,
+    remembered: null,
+    answered: [],
+    only,
+  });
+  if (step === null) return {};
+  const answer = await showStep(step, { title: comparison.title, canGoBack: false });
+  if (answer === 'escape' || answer === 'back') return null;
+  if (only !== 'question') return answer.adds;
+  const margin = await askStep(services, comparison, { ...request, ...answer.adds }, 'margin');
+  return margin === null ? null : { ...answer.adds, ...margin };
+}
+
+const askReason = (): Promise<string | null> =>
+  askText({
+    title: l10n.t('Why is it changed?'),
+    prompt: l10n.t('A result was seen before: the change stands in the settings block, with your reason if you give one'),
+    placeholder: l10n.t('for example: protocol 12'),
+  });

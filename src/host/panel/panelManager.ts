@@ -1,0 +1,97 @@
+import { commands, Uri, type Disposable, type WebviewPanel, type WebviewPanelSerializer } from 'vscode';
+import type { Request } from '../../compare/request';
+import { start } from '../../compare/session';
+import { readPanelState, type Recipe } from '../../protocol/panelState';
+import { rootOf } from '../files/root';
+import type { Services } from '../services';
+import { timestamp } from '../timestamp';
+import { Comparison } from './comparison';
+import { ComparisonPanel, createPanel } from './comparisonPanel';
+import { freshProvenance } from './provenance';
+import { subjectKey, type Subject } from './subject';
+
+/** All panels: one for each comparison, the one in front, and those that come back after a reload. */
+export class PanelManager implements WebviewPanelSerializer, Disposable {
+  private readonly panels = new Set<ComparisonPanel>();
+  private front: ComparisonPanel | null = null;
+
+  constructor(private readonly services: Services) {}
+
+  /** The comparison of the panel in front, else of the one that was in front last; null: there is none. */
+  get current(): Comparison | null {
+    return this.front?.comparison ?? null;
+  }
+
+  /** Shows a comparison beside the editor. One that has a panel already is taken up there. */
+  async show(subject: Subject, request: Request): Promise<void> {
+    const key = subjectKey(subject, request);
+    const there = [...this.panels].find(
+      ({ comparison }) => subjectKey(comparison.subject, comparison.request) === key,
+    );
+    if (there === undefined) {
+      const comparison = new Comparison(this.services, subject, start(request, timestamp()), freshProvenance);
+      this.add(new ComparisonPanel(this.services, comparison, createPanel()));
+      await comparison.run();
+      return;
+    }
+    this.bringForward(there);
+    there.reveal();
+    const isSame = JSON.stringify(there.comparison.request) === JSON.stringify(request);
+    if (isSame) await there.comparison.run();
+    else await there.comparison.act({ kind: 'change', patch: request, when: timestamp() });
+  }
+
+  /** Brings back a panel after the window was reloaded, from the settings block or the request that it kept. */
+  async deserializeWebviewPanel(panel: WebviewPanel, kept: unknown): Promise<void> {
+    const state = readPanelState(kept);
+    if (state === null) {
+      panel.dispose(); // kept by another version: nothing to bring back
+      return;
+    }
+    const { recipe } = state;
+    const files = recipe.files.map(file => Uri.parse(file, true));
+    const root = rootOf(files[0] ?? panel.webview.asWebviewUri(this.services.context.extensionUri));
+    const { request, provenance } = await this.recipeOf(recipe);
+    const comparison = new Comparison(
+      this.services,
+      { files, root },
+      start({ ...request, files: recipe.request.files }, timestamp()),
+      provenance,
+    );
+    this.add(new ComparisonPanel(this.services, comparison, panel));
+    await comparison.run();
+  }
+
+  dispose(): void {
+    for (const panel of [...this.panels]) panel.dispose();
+  }
+
+  private async recipeOf({ blockText, request }: Recipe): Promise<{
+    request: Request;
+    provenance: typeof freshProvenance;
+  }> {
+    if (blockText === null) return { request, provenance: freshProvenance };
+    try {
+      return await this.services.client.ask({ type: 'restore', revision: 0, blockText });
+    } catch {
+      return { request, provenance: freshProvenance }; // a block of another version: what was asked is kept beside it
+    }
+  }
+
+  private add(panel: ComparisonPanel): void {
+    this.panels.add(panel);
+    this.bringForward(panel);
+    panel.panel.onDidChangeViewState(({ webviewPanel }) => {
+      if (webviewPanel.active) this.bringForward(panel);
+    });
+    panel.onDidClose(() => {
+      this.panels.delete(panel);
+      if (this.front === panel) this.bringForward([...this.panels].at(-1) ?? null);
+    });
+  }
+
+  private bringForward(panel: ComparisonPanel | null): void {
+    this.front = panel;
+    void commands.executeCommand('setContext', 'weighbeam.hasComparison', panel !== null);
+  }
+}
