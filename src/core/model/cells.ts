@@ -3,8 +3,9 @@ import type { CellRef } from './problem';
 /**
  * Decimals as written. value[i] = (shift + steps[i]) / (10^decimals · per), exactly: ties, equality, sums and
  * permutations are integer arithmetic. `per` is 1, but for unit means the least common multiple of the counts.
- * 'wide' only when a value needs more than 53 bits after the shift: offsets[i] is value[i] − shift/10^decimals rounded
- * once (in units of the value), and `order` is the dense rank of the exact decimals, so ties and ranks stay exact.
+ * 'wide' only when a value needs more than 53 bits after the shift: offsets[i] is (exact[i] − shift) / (10^decimals ·
+ * per) rounded once (in units of the value), `order` ranks the exact values (comparable across samples of one frame), so
+ * ties and ranks stay exact. `exact` is null for computed doubles such as logs: there shift is 0 and offsets the values.
  */
 export type Numbers =
   | {
@@ -17,9 +18,11 @@ export type Numbers =
   | {
       readonly form: 'wide';
       readonly decimals: number;
+      readonly per: bigint;
       readonly shift: bigint;
       readonly offsets: Float64Array;
-      readonly order: Int32Array;
+      readonly order: Int32Array | Float64Array;
+      readonly exact: readonly bigint[] | null;
     };
 
 /** What one cell of a number column holds. Below and Above are censored readings such as <0.02 (the limit is the value). */
@@ -88,6 +91,8 @@ export interface Reading {
   readonly missingWords: readonly string[];
   /** 'blank-line', 'ragged-short', 'ragged-long', 'preamble', 'units-row', 'footer-row', 'encoding-fallback', … */
   readonly met: readonly { readonly what: string; readonly at: CellRef; readonly text: string }[];
+  /** How often each was met; `met` names the first 20 of a kind. */
+  readonly metCounts: Readonly<Record<string, number>>;
   readonly bytes: number;
   readonly lines: number;
 }

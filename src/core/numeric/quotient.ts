@@ -1,0 +1,32 @@
+const SAFE = 9007199254740992n; // 2^53
+const KEPT_BITS = 66; // 53 of the result, and enough behind them that one sticky bit decides the rounding
+
+const bitLength = (n: bigint): number => n.toString(2).length;
+
+/**
+ * The double nearest to numerator / denominator (ties to even), rounded once.
+ * @param denominator above 0. Results below 2^-1022 in size may be rounded twice.
+ */
+export function quotient(numerator: bigint, denominator: bigint): number {
+  if (numerator < 0n) return -quotient(-numerator, denominator);
+  if (numerator <= SAFE && denominator <= SAFE) return Number(numerator) / Number(denominator);
+  if (numerator === 0n) return 0;
+  const shift = KEPT_BITS - bitLength(numerator) + bitLength(denominator);
+  const n = shift >= 0 ? numerator << BigInt(shift) : numerator;
+  const d = shift >= 0 ? denominator : denominator << BigInt(-shift);
+  const kept = n / d;
+  const sticky = kept * d === n ? kept : kept | 1n;
+  const half = Math.trunc(shift / 2); // 2^-shift alone may leave the range of doubles
+  return Number(sticky) * 2 ** -half * 2 ** (half - shift);
+}
+
+/** A finite double as the fraction it is: numerator / denominator, the latter a power of two. */
+export function fractionOf(x: number): { readonly numerator: bigint; readonly denominator: bigint } {
+  let whole = x;
+  let bits = 0n;
+  while (!Number.isInteger(whole)) {
+    whole *= 2;
+    bits += 1n;
+  }
+  return { numerator: BigInt(whole), denominator: 1n << bits };
+}
