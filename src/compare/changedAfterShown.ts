@@ -73,7 +73,9 @@ function spoken(request: Request, watched: readonly LeftOut[]): Readonly<Record<
     'left-out': watched.length === 0 ? undefined : stillOut(request, watched),
     ...request.options,
   };
-  return Object.fromEntries(Object.entries(parts).flatMap(([key, value]) => (value === undefined ? [] : [[key, value]])));
+  return Object.fromEntries(
+    Object.entries(parts).flatMap(([key, value]) => (value === undefined ? [] : [[key, value]])),
+  );
 }
 
 /** A step whose words contradict each other was refused and never shown: its words stand for themselves. */
@@ -83,15 +85,22 @@ function methodSpoken(request: Request, measure: Measure): ReturnType<typeof met
   } catch (error) {
     if (!(error instanceof Refusal)) throw error;
     const { method, variance, df, curve } = request;
-    return { method: [method, variance, df, curve].filter(word => word !== undefined).join(' '), curve: null };
+    return {
+      method: [method, variance, df, curve].filter(word => word !== undefined).join(' '),
+      curve: null,
+    };
   }
 }
 
 /** Which of the rows that were left out when the result was first seen are left out in this request. */
 function stillOut({ leaveOut = [] }: Request, watched: readonly LeftOut[]): string {
-  const out = watched.filter(row => leaveOut.some(({ file, line }) => file === row.file && line === row.line));
+  const out = watched.filter(row =>
+    leaveOut.some(({ file, line }) => file === row.file && line === row.line),
+  );
   return out.length === 0 ? 'none' : out.map(({ line }) => `line ${line}`).join(', ');
 }
 
 const linked = (same: Request['same']): string | undefined =>
-  same === undefined || same.length === 0 ? undefined : same.map(([from, to]) => `${from} -> ${to}`).join(', ');
+  same === undefined || same.length === 0
+    ? undefined
+    : same.map(([from, to]) => `${from} -> ${to}`).join(', ');

@@ -16,7 +16,8 @@ export function columnsNeeded(
   const roles = rolesOf({ layout, relation: relationAsked(request), where: request.where ?? [] }, fields);
   const outcomes = measuresOutcomes(measureAsked(request, fields, list), request.success);
   const { summary } = roles;
-  const numbers = summary === null ? (outcomes ? [] : roles.measured) : [summary.n, summary.mean, summary.sd, summary.x];
+  const numbers =
+    summary === null ? (outcomes ? [] : roles.measured) : [summary.n, summary.mean, summary.sd, summary.x];
   const labels = [roles.label, ...roles.ids, ...roles.where, ...(outcomes ? roles.measured : [])];
   return { numbers: distinct(numbers), labels: distinct(labels) };
 }

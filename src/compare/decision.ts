@@ -32,8 +32,10 @@ export function decide(question: Question, result: MethodResult, ask: Asked): De
 
 function isShown(question: Question, { p, lower, upper }: MethodResult, ask: Asked): boolean {
   if (p !== null) return p < alphaOf(ask.confidence);
-  const above = (bound: number | undefined): boolean => lower !== null && bound !== undefined && lower > bound;
-  const below = (bound: number | undefined): boolean => upper !== null && bound !== undefined && upper < bound;
+  const above = (bound: number | undefined): boolean =>
+    lower !== null && bound !== undefined && lower > bound;
+  const below = (bound: number | undefined): boolean =>
+    upper !== null && bound !== undefined && upper < bound;
   switch (question) {
     case 'differs':
       return above(ask.against) || below(ask.against);

@@ -9,7 +9,8 @@ import { quantileSorted } from '../core/numeric/quantile';
 export function groupNumbers(group: Group, sorting: boolean): GroupNumbers {
   const se = group.n > 1 ? group.sd / Math.sqrt(group.n) : null;
   const { sample } = group;
-  if (sample === null || sample.n === 0) return { se, median: null, q1: null, q3: null, min: null, max: null };
+  if (sample === null || sample.n === 0)
+    return { se, median: null, q1: null, q3: null, min: null, max: null };
   if (!sorting) return { se, median: null, q1: null, q3: null, ...rangeOf(sample.values()) };
   const sorted = sample.sorted();
   return {

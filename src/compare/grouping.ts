@@ -17,7 +17,11 @@ export interface Grouping {
 export function groupingOf(table: Table, settings: Grouped, roles: Roles): Grouping {
   const { layout } = settings;
   if (layout.kind === 'wide') {
-    return { labels: layout.columns, valuesPerRow: layout.columns.length, labelOf: (_, position) => position };
+    return {
+      labels: layout.columns,
+      valuesPerRow: layout.columns.length,
+      labelOf: (_, position) => position,
+    };
   }
   if (layout.kind === 'files') {
     return { labels: fileLabels(settings.files), valuesPerRow: 1, labelOf: row => table.file(row) };

@@ -5,7 +5,12 @@ import { measuresOutcomes } from './measureAsked';
 /** A measured column: numbers, or outcomes of which some words count as success. */
 export type Measured =
   | { readonly kind: 'numbers'; readonly field: number; readonly column: NumberColumn }
-  | { readonly kind: 'outcomes'; readonly field: number; readonly column: LabelColumn; readonly missing: Uint8Array };
+  | {
+      readonly kind: 'outcomes';
+      readonly field: number;
+      readonly column: LabelColumn;
+      readonly missing: Uint8Array;
+    };
 
 export function measuredValues(
   table: Table,
@@ -17,7 +22,9 @@ export function measuredValues(
   }
   const column = table.labels(field);
   const words = new Set(settings.reading.missing);
-  const missing = Uint8Array.from(column.levels, (level, code) => Number(code === 0 || words.has(level.trim())));
+  const missing = Uint8Array.from(column.levels, (level, code) =>
+    Number(code === 0 || words.has(level.trim())),
+  );
   return { kind: 'outcomes', field, column, missing };
 }
 

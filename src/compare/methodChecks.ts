@@ -17,10 +17,12 @@ interface Chosen {
 export function checkMethod(chosen: Chosen, list: readonly MethodDescriptor[]): MethodDescriptor {
   const { method, measure, question, relation } = chosen;
   const descriptor = methodById(method, list);
-  if (descriptor === undefined) throw new Refusal('method-unknown', { method, methods: list.map(({ id }) => id) });
+  if (descriptor === undefined)
+    throw new Refusal('method-unknown', { method, methods: list.map(({ id }) => id) });
   const forPairs = descriptor.design === 'pairs' || descriptor.design === 'pairedCounts';
   if (descriptor.measure !== measure) throw new Refusal('method-not-for-this', { method, measure });
-  if (forPairs && relation.kind !== 'pairs') throw new Refusal('method-not-for-this', { method, needs: 'pair' });
+  if (forPairs && relation.kind !== 'pairs')
+    throw new Refusal('method-not-for-this', { method, needs: 'pair' });
   if (relation.kind === 'pairs' && descriptor.design === 'counts') {
     throw new Refusal('method-not-for-this', { method, pair: relation.column });
   }
@@ -48,5 +50,6 @@ export function checkSigma(method: string, sigma: Request['sigma']): void {
     if (method === 'known-sigma-z') throw new Refusal('sigma-needed', { method });
     return;
   }
-  if (!sigma.every(value => value > 0 && Number.isFinite(value))) throw new Refusal('sigma-not-positive', { sigma });
+  if (!sigma.every(value => value > 0 && Number.isFinite(value)))
+    throw new Refusal('sigma-not-positive', { sigma });
 }

@@ -1,5 +1,19 @@
 /** Units whose zero is a convention: a percent of such a value has no meaning. */
-const INTERVAL_UNITS: ReadonlySet<string> = new Set(['°c', '℃', '°f', '℉', 'degc', 'deg c', 'degf', 'deg f', 'ph', 'db', 'dba', 'db(a)', 'dbm']);
+const INTERVAL_UNITS: ReadonlySet<string> = new Set([
+  '°c',
+  '℃',
+  '°f',
+  '℉',
+  'degc',
+  'deg c',
+  'degf',
+  'deg f',
+  'ph',
+  'db',
+  'dba',
+  'db(a)',
+  'dbm',
+]);
 
 /** Names of columns that hold such values without saying a unit. */
 const INTERVAL_NAME = /^ph\b/i;

@@ -3,7 +3,19 @@ import type { Request } from './request';
 
 /** The part of a request that a part of Settings stands for: how a finding's answer is taken up. */
 export function requestPatch(answer: Partial<Settings>): Partial<Request> {
-  const { relation, numberingRestarts, layout, reading, options, test, reference, margin, matters, rows, ...same } = answer;
+  const {
+    relation,
+    numberingRestarts,
+    layout,
+    reading,
+    options,
+    test,
+    reference,
+    margin,
+    matters,
+    rows,
+    ...same
+  } = answer;
   const { measure, method, question, confidence, against, where, leftOut, files } = same;
   return {
     ...defined({ measure, method, question, confidence, against, where, files, same: same.same }),
@@ -46,7 +58,14 @@ function layoutPatch(layout: Settings['layout']): Partial<Request> {
   }
 }
 
-function readingPatch({ encoding, delimiter, decimal, header, missing, below }: Settings['reading']): Request['wish'] {
+function readingPatch({
+  encoding,
+  delimiter,
+  decimal,
+  header,
+  missing,
+  below,
+}: Settings['reading']): Request['wish'] {
   return { encoding, delimiter, decimal, header, missing, below };
 }
 

@@ -28,12 +28,21 @@ function inRanges(table: Table, ranges: Settings['rows']): readonly ((row: numbe
   const empty = ranges[hits.indexOf(0)];
   if (empty !== undefined) {
     const last = table.rows === 0 ? 0 : table.line(table.rows - 1);
-    throw new Refusal('row-unknown', { from: empty[0], to: empty[1], first: table.rows === 0 ? 0 : table.line(0), last });
+    throw new Refusal('row-unknown', {
+      from: empty[0],
+      to: empty[1],
+      first: table.rows === 0 ? 0 : table.line(0),
+      last,
+    });
   }
   return [row => ranges.some(([from, to]) => table.line(row) >= from && table.line(row) <= to)];
 }
 
-function holdingLabels(table: Table, where: Settings['where'], roles: Roles): readonly ((row: number) => boolean)[] {
+function holdingLabels(
+  table: Table,
+  where: Settings['where'],
+  roles: Roles,
+): readonly ((row: number) => boolean)[] {
   const allowed = new Map<number, Set<number>>();
   where.forEach(([column, label], index) => {
     const field = roles.where[index];

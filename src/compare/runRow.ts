@@ -36,7 +36,15 @@ export function runRow(method: MethodDescriptor, designs: DesignData, asked: Row
   const unpaired = designs.pairs !== undefined && method.design === 'two';
   const reason = unpaired ? reasonOf('pairs-given') : (method.doubts(own, ask) ?? ruledOut(method.id, asked));
   const counted = method.counted && reason === null;
-  return { id: method.id, data, result, applies: true, counted, reason, decision: decide(ask.question, result, ask) };
+  return {
+    id: method.id,
+    data,
+    result,
+    applies: true,
+    counted,
+    reason,
+    decision: decide(ask.question, result, ask),
+  };
 }
 
 function whyNot(
@@ -45,7 +53,8 @@ function whyNot(
   designs: DesignData,
   { ask, chosen }: RowAsk,
 ): Reason | null {
-  if (designs.pairs !== undefined && method.design === 'two' && method.id !== chosen) return reasonOf('pairs-given');
+  if (designs.pairs !== undefined && method.design === 'two' && method.id !== chosen)
+    return reasonOf('pairs-given');
   if (!method.questions.includes(ask.question)) return reasonOf('question-not-for-method');
   if (method.id !== chosen && method.work(sizeOf(own), ask) > WORK_BUDGET) return reasonOf('too-much-work');
   return method.applies(own, ask);
@@ -54,7 +63,8 @@ function whyNot(
 const missingDesign = (method: MethodDescriptor, designs: DesignData): Reason =>
   reasonOf(method.design === 'pairs' && designs.two !== undefined ? 'no-pairs' : 'not-this-design');
 
-const ruledOut = (id: string, asked: RowAsk): Reason | null => (asked.ruledOut.has(id) ? reasonOf('ruled-out') : null);
+const ruledOut = (id: string, asked: RowAsk): Reason | null =>
+  asked.ruledOut.has(id) ? reasonOf('ruled-out') : null;
 
 const reasonOf = (code: string): Reason => ({ code, facts: {} });
 
@@ -71,5 +81,7 @@ export const notComputed = (id: string, data: string, reason: Reason | null): Ro
 /** Number of values that a method would have to go through. */
 function sizeOf(data: Designs[keyof Designs]): number {
   if ('groups' in data) return data.groups.reduce((sum, group) => sum + group.n, 0);
-  return 'test' in data ? data.test.n + data.reference.n : data.both + data.testOnly + data.referenceOnly + data.neither;
+  return 'test' in data
+    ? data.test.n + data.reference.n
+    : data.both + data.testOnly + data.referenceOnly + data.neither;
 }

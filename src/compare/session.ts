@@ -30,7 +30,13 @@ export type Action =
       readonly when: string;
     }
   | { readonly kind: 'answer'; readonly answer: Partial<Settings>; readonly when: string }
-  | { readonly kind: 'leave out'; readonly file: number; readonly line: number; readonly reason: string; readonly when: string }
+  | {
+      readonly kind: 'leave out';
+      readonly file: number;
+      readonly line: number;
+      readonly reason: string;
+      readonly when: string;
+    }
   | { readonly kind: 'take back'; readonly file: number; readonly line: number; readonly when: string }
   | { readonly kind: 'merge labels'; readonly from: string; readonly to: string; readonly when: string }
   | { readonly kind: 'reason'; readonly key: string; readonly reason: string }
@@ -63,11 +69,17 @@ export function reduce(session: Session, action: Action): Session {
     case 'leave out':
       return advance(session, leaveOut(session, action), action.when);
     case 'take back': {
-      const kept = (request.leaveOut ?? []).filter(({ file, line }) => file !== action.file || line !== action.line);
+      const kept = (request.leaveOut ?? []).filter(
+        ({ file, line }) => file !== action.file || line !== action.line,
+      );
       return advance(session, { ...request, leaveOut: kept }, action.when);
     }
     case 'merge labels':
-      return advance(session, { ...request, same: [...(request.same ?? []), [action.from, action.to]] }, action.when);
+      return advance(
+        session,
+        { ...request, same: [...(request.same ?? []), [action.from, action.to]] },
+        action.when,
+      );
     case 'reason':
       return { ...session, reasons: { ...session.reasons, [action.key]: action.reason } };
     case 'undo':
@@ -75,7 +87,9 @@ export function reduce(session: Session, action: Action): Session {
     case 'redo':
       return canRedo(session) ? { ...session, at: session.at + 1 } : session;
     case 'shown':
-      return session.firstShown === null ? { ...session, firstShown: { request, when: action.when } } : session;
+      return session.firstShown === null
+        ? { ...session, firstShown: { request, when: action.when } }
+        : session;
   }
 }
 
@@ -84,7 +98,10 @@ function leaveOut(session: Session, row: Extract<Action, { kind: 'leave out' }>)
   const request = requestOf(session);
   const others = (request.leaveOut ?? []).filter(({ file, line }) => file !== row.file || line !== row.line);
   const { file, line, reason } = row;
-  return { ...request, leaveOut: [...others, { file, line, reason, afterResult: session.firstShown !== null }] };
+  return {
+    ...request,
+    leaveOut: [...others, { file, line, reason, afterResult: session.firstShown !== null }],
+  };
 }
 
 /** A new step; what had been undone is forgotten. */

@@ -14,7 +14,14 @@ import { plainSuccess } from './successAsked';
 import { methodAsked } from './varianceAssumption';
 
 /** The conventions of reading where there is no file. */
-const TYPED_READING = { encoding: 'utf-8', delimiter: ',', decimal: '.', thousands: '', header: 1, missing: [] } as const;
+const TYPED_READING = {
+  encoding: 'utf-8',
+  delimiter: ',',
+  decimal: '.',
+  thousands: '',
+  header: 1,
+  missing: [],
+} as const;
 
 /**
  * Turns what was asked into Settings: names are looked up, defaults filled in, contradictions refused. `table` is null for
@@ -70,8 +77,12 @@ export function settle(
   return { ...settings, options: { ...settings.options, success: plainSuccess(table, settings) } };
 }
 
-function presentLabels(table: Table | null, grouped: Parameters<typeof labelCounts>[1]): readonly LabelCount[] {
-  if (grouped.layout.kind === 'typed') return grouped.layout.groups.map(({ label, n }) => ({ label, count: n }));
+function presentLabels(
+  table: Table | null,
+  grouped: Parameters<typeof labelCounts>[1],
+): readonly LabelCount[] {
+  if (grouped.layout.kind === 'typed')
+    return grouped.layout.groups.map(({ label, n }) => ({ label, count: n }));
   return table === null ? [] : labelCounts(table, grouped);
 }
 

@@ -20,7 +20,8 @@ export function sidesOf(
   const labels = present.map(({ label }) => label);
   const facts = { column, labels, counts: present.map(({ count }) => count) };
   for (const named of [test, reference]) {
-    if (named !== undefined && !labels.includes(named)) throw new Refusal('label-unknown', { label: named, ...facts });
+    if (named !== undefined && !labels.includes(named))
+      throw new Refusal('label-unknown', { label: named, ...facts });
   }
   if (test !== undefined && test === reference) throw new Refusal('groups-too-few', facts);
   if (test !== undefined && reference !== undefined) return { test, reference };

@@ -16,7 +16,8 @@ const PLAIN_OUTCOMES: readonly (readonly [string, string])[] = [
  */
 export function plainSuccess(table: Table, settings: Settings): string {
   const outcomes = outcomesUsed(table, settings);
-  if (outcomes.length > 2) throw new Refusal('outcomes-too-many', { outcomes: outcomes.slice(0, 10), count: outcomes.length });
+  if (outcomes.length > 2)
+    throw new Refusal('outcomes-too-many', { outcomes: outcomes.slice(0, 10), count: outcomes.length });
   for (const [failure, success] of PLAIN_OUTCOMES) {
     const known = outcomes.every(outcome => [failure, success].includes(outcome.toLowerCase()));
     if (!known || outcomes.length === 0) continue;

@@ -24,7 +24,10 @@ export function summaryFields(fields: readonly Field[], label: string | undefine
   if (n === null) throw missing('n', fields);
   if (!counted && mean === null) throw missing('mean', fields);
   if (!counted && sd === null) throw missing('sd', fields);
-  const named = label === undefined ? fields.findIndex((_, at) => ![n, x, mean, sd].includes(at)) : findField(fields, label);
+  const named =
+    label === undefined
+      ? fields.findIndex((_, at) => ![n, x, mean, sd].includes(at))
+      : findField(fields, label);
   if (named < 0) throw missing('label', fields);
   return { label: named, n, mean: counted ? null : mean, sd: counted ? null : sd, x: counted ? x : null };
 }

@@ -38,7 +38,8 @@ export function methodAsked(
   const { method, pair } = request;
   const spoken = request.variance !== undefined || request.df !== undefined || request.curve !== undefined;
   if (method !== undefined) {
-    if (spoken && !TABLE.some(row => row.method === method && agrees(row, request))) throw notForThis(request);
+    if (spoken && !TABLE.some(row => row.method === method && agrees(row, request)))
+      throw notForThis(request);
     return { method, curve: ruleOf(request) };
   }
   if (measure !== 'mean') {
@@ -54,7 +55,8 @@ export function methodAsked(
 }
 
 /** The one curve that is a rule about n: which method it means is settled by the data. */
-const ruleOf = (request: Request): Curve | null => (request.curve === 'normal-over-30' ? request.curve : null);
+const ruleOf = (request: Request): Curve | null =>
+  request.curve === 'normal-over-30' ? request.curve : null;
 
 const agrees = (row: VarianceWords, { variance, df, curve }: Request): boolean =>
   (variance === undefined || variance === row.variance) &&

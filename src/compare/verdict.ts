@@ -12,7 +12,11 @@ export function whatIfOf(rows: readonly Row[], chosen: Row, confidence: number):
   const counted = rows.flatMap((row, index) => (row.counted ? [index] : []));
   const heard = rows.filter(row => row.result !== null && (row.counted || row === chosen));
   const decisions = new Set(heard.map(row => row.decision));
-  return { depends: decisions.size < 2 ? 'no' : onTheLine(heard, confidence) ? 'on the line' : 'yes', counted, rows };
+  return {
+    depends: decisions.size < 2 ? 'no' : onTheLine(heard, confidence) ? 'on the line' : 'yes',
+    counted,
+    rows,
+  };
 }
 
 function onTheLine(rows: readonly Row[], confidence: number): boolean {

@@ -37,19 +37,47 @@ export function judge(pivot: Pivot, ask: Asked): MethodResult {
       return { ...common, ...extra, statistic: statisticAt(pivot, ask.against), ...twoSided };
     case 'higher': {
       const statistic = statisticAt(pivot, ask.against);
-      return { ...common, ...beside, statistic, p: upperTail(pivot, statistic), lower: pivot.lower(wide), upper: null };
+      return {
+        ...common,
+        ...beside,
+        statistic,
+        p: upperTail(pivot, statistic),
+        lower: pivot.lower(wide),
+        upper: null,
+      };
     }
     case 'lower': {
       const statistic = statisticAt(pivot, ask.against);
-      return { ...common, ...beside, statistic, p: lowerTail(pivot, statistic), lower: null, upper: pivot.upper(wide) };
+      return {
+        ...common,
+        ...beside,
+        statistic,
+        p: lowerTail(pivot, statistic),
+        lower: null,
+        upper: pivot.upper(wide),
+      };
     }
     case 'not-lower': {
       const statistic = statisticAt(pivot, marginOf(ask)[0]);
-      return { ...common, ...beside, statistic, p: upperTail(pivot, statistic), lower: pivot.lower(wide), upper: null };
+      return {
+        ...common,
+        ...beside,
+        statistic,
+        p: upperTail(pivot, statistic),
+        lower: pivot.lower(wide),
+        upper: null,
+      };
     }
     case 'not-higher': {
       const statistic = statisticAt(pivot, marginOf(ask)[1]);
-      return { ...common, ...beside, statistic, p: lowerTail(pivot, statistic), lower: null, upper: pivot.upper(wide) };
+      return {
+        ...common,
+        ...beside,
+        statistic,
+        p: lowerTail(pivot, statistic),
+        lower: null,
+        upper: pivot.upper(wide),
+      };
     }
     case 'equivalent':
       return {
@@ -63,7 +91,11 @@ export function judge(pivot: Pivot, ask: Asked): MethodResult {
   }
 }
 
-function both(pivot: Pivot, against: number, alpha: number): { p: number | null; lower: number; upper: number } {
+function both(
+  pivot: Pivot,
+  against: number,
+  alpha: number,
+): { p: number | null; lower: number; upper: number } {
   const statistic = statisticAt(pivot, against);
   const quantile = pivot.curve.upperQuantile(alpha / 2);
   return {
@@ -74,7 +106,10 @@ function both(pivot: Pivot, against: number, alpha: number): { p: number | null;
 }
 
 /** The one of the two one-sided tests with the larger p. */
-function harder(pivot: Pivot, [low, high]: readonly [number, number]): { statistic: number | null; p: number | null } {
+function harder(
+  pivot: Pivot,
+  [low, high]: readonly [number, number],
+): { statistic: number | null; p: number | null } {
   const above = statisticAt(pivot, low);
   const below = statisticAt(pivot, high);
   const pAbove = upperTail(pivot, above);
@@ -83,7 +118,8 @@ function harder(pivot: Pivot, [low, high]: readonly [number, number]): { statist
   return pAbove >= pBelow ? { statistic: above, p: pAbove } : { statistic: below, p: pBelow };
 }
 
-const statisticAt = (pivot: Pivot, value: number): number | null => (pivot.at === null ? null : pivot.at(value));
+const statisticAt = (pivot: Pivot, value: number): number | null =>
+  pivot.at === null ? null : pivot.at(value);
 
 const upperTail = (pivot: Pivot, statistic: number | null): number | null =>
   statistic === null ? null : pivot.curve.upperTail(statistic);

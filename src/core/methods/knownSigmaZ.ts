@@ -33,7 +33,10 @@ export const knownSigmaZ = method({
   run: ({ test, reference }, ask) => {
     const sigmas = sigmasOf(ask.option('sigma'));
     if (sigmas === null) throw new RangeError('known-sigma-z was run without two known standard deviations');
-    return judge(meanPivot(meanDifference(test, reference), knownPrecision(test.n, reference.n, sigmas)), ask);
+    return judge(
+      meanPivot(meanDifference(test, reference), knownPrecision(test.n, reference.n, sigmas)),
+      ask,
+    );
   },
   title: t => t('known SDs'),
   assumes: t => t('the SDs are known from long experience, not from these values'),
@@ -41,12 +44,15 @@ export const knownSigmaZ = method({
     t(
       'The difference of the two means divided by its standard error, formed from standard deviations stated beforehand, held against the normal curve.',
     ),
-  notWhen: t =>
-    t('The stated SDs were computed from these values, or these values contradict them.'),
+  notWhen: t => t('The stated SDs were computed from these values, or these values contradict them.'),
   why: (reason, t) => (reason.code === 'sigma-absent' ? t('no known SDs were stated') : commonWhy(reason, t)),
 });
 
-function knownPrecision(nTest: number, nReference: number, [test, reference]: readonly [number, number]): Precision {
+function knownPrecision(
+  nTest: number,
+  nReference: number,
+  [test, reference]: readonly [number, number],
+): Precision {
   const seTest = test / Math.sqrt(nTest);
   const seReference = reference / Math.sqrt(nReference);
   return {

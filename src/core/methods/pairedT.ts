@@ -39,7 +39,10 @@ export const pairedT = method({
     reason.code === 'one-pair'
       ? t('{0} complete pair: one difference has no spread', Number(reason.facts['n']))
       : reason.code === 'equal-differences'
-        ? t('every pair differs by exactly {0}: a p-value would be meaningless', Number(reason.facts['difference']))
+        ? t(
+            'every pair differs by exactly {0}: a p-value would be meaningless',
+            Number(reason.facts['difference']),
+          )
         : commonWhy(reason, t),
 });
 

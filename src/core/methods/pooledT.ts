@@ -43,6 +43,9 @@ export const pooledT = method({
     ),
   why: (reason, t) =>
     reason.code === 'one-constant-group'
-      ? t('{0} does not scatter at all, so the groups cannot be taken to scatter alike', String(reason.facts['label']))
+      ? t(
+          '{0} does not scatter at all, so the groups cannot be taken to scatter alike',
+          String(reason.facts['label']),
+        )
       : commonWhy(reason, t),
 });

@@ -27,7 +27,9 @@ export const proportionZ = method({
   ],
   work: () => 1,
   applies: (data, ask) =>
-    noOutcomes(data) ?? noVariation(data) ?? (ask.against === 0 ? null : { code: 'against-not-zero', facts: {} }),
+    noOutcomes(data) ??
+    noVariation(data) ??
+    (ask.against === 0 ? null : { code: 'against-not-zero', facts: {} }),
   doubts: data => fewExpected(data),
   run: (data, ask) => {
     const estimate = shareDifference(data);
@@ -52,7 +54,10 @@ export const proportionZ = method({
     t(
       'The difference of two shares divided by the standard error it would have if both groups had the pooled share, held against the normal curve. The interval beside it is Newcombe’s: p and interval come from two methods and can fall on two sides of the line.',
     ),
-  notWhen: t => t('An expected count is below 5, the same units were measured twice, or units hold several outcomes each.'),
+  notWhen: t =>
+    t(
+      'An expected count is below 5, the same units were measured twice, or units hold several outcomes each.',
+    ),
   why: sharesWhy,
 });
 

@@ -32,7 +32,10 @@ export function commonWhy({ code, facts }: Reason, t: Say): string {
       return t('{0} has {1} value: one value has no spread', text('label'), text('n'));
     case 'zero-spread':
       return facts['resolution'] === null
-        ? t('no spread in either group: the difference is {0}, and a p-value would be meaningless', text('difference'))
+        ? t(
+            'no spread in either group: the difference is {0}, and a p-value would be meaningless',
+            text('difference'),
+          )
         : t(
             'no spread in either group at the recorded resolution ({0}): the difference is {1} as recorded, and a p-value would be meaningless',
             text('resolution'),
@@ -48,6 +51,8 @@ export function commonWhy({ code, facts }: Reason, t: Say): string {
       return t('this method does not answer that question');
     case 'ruled-out':
       return t('ruled out by a stated reason');
+    case 'variant-refused':
+      return t('with these rows no number can be computed');
     case 'too-much-work':
       return t('takes long on this many values; computed when asked for');
     default:

@@ -7,7 +7,10 @@ import type { Designs } from '../model/groups';
  * its digits near double roots.) Domain: −1 ≤ delta ≤ 1, n ≥ 1.
  * Source: Miettinen & Nurminen 1985, Statistics in Medicine 4:213–226, appendix I.
  */
-export function restrictedShares({ test, reference }: Designs['counts'], delta: number): readonly [number, number] {
+export function restrictedShares(
+  { test, reference }: Designs['counts'],
+  delta: number,
+): readonly [number, number] {
   if (delta === 0) {
     const pooled = (test.x + reference.x) / (test.n + reference.n);
     return [pooled, pooled];

@@ -36,6 +36,8 @@ export const separateT = method({
       'The difference of the two means divided by its standard error, each group with its own SD, held against Student’s t. The degrees of freedom are a real number between the smaller group’s and the sum of both; they are never rounded.',
     ),
   notWhen: t =>
-    t('Fewer than 4 values in a group, or markedly skewed values in groups of very unequal size: the level is then not held.'),
+    t(
+      'Fewer than 4 values in a group, or markedly skewed values in groups of very unequal size: the level is then not held.',
+    ),
   why: commonWhy,
 });

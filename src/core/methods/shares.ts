@@ -32,7 +32,9 @@ export function fewExpected({ test, reference }: Counts): Reason | null {
   const all = test.n + reference.n;
   const successes = test.x + reference.x;
   const expected = (Math.min(test.n, reference.n) * Math.min(successes, all - successes)) / all;
-  return expected < LEAST_EXPECTED ? { code: 'few-expected', facts: { expected, least: LEAST_EXPECTED } } : null;
+  return expected < LEAST_EXPECTED
+    ? { code: 'few-expected', facts: { expected, least: LEAST_EXPECTED } }
+    : null;
 }
 
 export function sharesWhy(reason: Reason, t: Say): string {
@@ -40,7 +42,10 @@ export function sharesWhy(reason: Reason, t: Say): string {
     case 'no-outcomes':
       return t('{0} has no outcome', String(reason.facts['label']));
     case 'few-expected':
-      return t('an expected count is below {0}, so the normal approximation is not relied on', Number(reason.facts['least']));
+      return t(
+        'an expected count is below {0}, so the normal approximation is not relied on',
+        Number(reason.facts['least']),
+      );
     case 'no-variation':
       return t('every outcome is the same: the pooled share has no spread');
     case 'against-not-zero':

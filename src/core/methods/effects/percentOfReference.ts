@@ -17,7 +17,11 @@ export interface Percent {
  * null when the reference mean is not above 0 or the row carries no variances. Means in units of the measured column.
  * Source: Fieller 1954, Journal of the Royal Statistical Society B 16:175–185.
  */
-export function percentOfReference(difference: number, referenceMean: number, row: MethodResult): Percent | null {
+export function percentOfReference(
+  difference: number,
+  referenceMean: number,
+  row: MethodResult,
+): Percent | null {
   const [testVariance, referenceVariance] = variancesOf(row);
   if (!(referenceMean > 0) || testVariance === undefined || referenceVariance === undefined) return null;
   const value = (100 * difference) / referenceMean;

@@ -16,7 +16,8 @@ export function smallSampleFactor(m: number): number {
   for (; z < SERIES_FROM; z += 1) product *= z / (z + 0.5);
   const w = 1 / z;
   const square = w * w;
-  const bracket = 1 / 192 - square * (1 / 640 - square * (17 / 14336 - square * (31 / 18432 - square * (691 / 180224))));
+  const bracket =
+    1 / 192 - square * (1 / 640 - square * (17 / 14336 - square * (31 / 18432 - square * (691 / 180224))));
   const logRatio = w * (-1 / 8 + square * bracket);
   return product * Math.sqrt(z / (m / 2)) * Math.exp(logRatio);
 }

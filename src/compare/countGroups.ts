@@ -1,0 +1,60 @@
+import type { Table } from '../core/model/cells';
+import type { Count, Unit } from '../core/model/groups';
+import { Refusal } from '../core/model/problem';
+import type { Settings } from '../core/model/settings';
+import { usedRows, type Selection } from './selection';
+
+/** The outcomes of one group. */
+export interface CountedGroup {
+  readonly count: Count;
+  /** Used rows; equals n unless units were named. */
+  readonly readings: number;
+  readonly units: readonly Unit[] | null;
+}
+
+/**
+ * Successes of each group. Where units were named each unit counts once: a unit whose readings disagree is neither, and is
+ * refused ('units-disagree').
+ */
+export function countGroups(table: Table, selection: Selection, settings: Settings): readonly CountedGroup[] {
+  const success = settings.options['success'];
+  return selection.groups.map((label, group) => {
+    const measured = selection.measured[group];
+    if (measured?.kind !== 'outcomes') throw new RangeError('outcomes are counted, not numbers');
+    const wanted = typeof success === 'string' ? measured.column.levels.indexOf(success) : -1;
+    const rows = usedRows(selection, group);
+    const isSuccess = (row: number): boolean => measured.column.codes[row] === wanted;
+    if (settings.relation.kind !== 'units') {
+      return {
+        count: { label, x: rows.filter(isSuccess).length, n: rows.length },
+        readings: rows.length,
+        units: null,
+      };
+    }
+    const units = [...agreedUnits(table, selection, rows, isSuccess).values()];
+    const x = units.filter(unit => unit.success).length;
+    return { count: { label, x, n: units.length }, readings: rows.length, units };
+  });
+}
+
+function agreedUnits(
+  table: Table,
+  selection: Selection,
+  rows: Int32Array,
+  isSuccess: (row: number) => boolean,
+): ReadonlyMap<number, Unit & { readonly success: boolean }> {
+  const [ids] = selection.ids;
+  const units = new Map<number, Unit & { readonly success: boolean }>();
+  for (const row of rows) {
+    const unit = ids?.codes[row] ?? 0;
+    const success = isSuccess(row);
+    const id = ids?.levels[unit] ?? '';
+    const before = units.get(unit);
+    if (before !== undefined && before.success !== success) {
+      const where = { file: table.file(row), line: table.line(row), field: 0 };
+      throw new Refusal('units-disagree', { column: ids?.name ?? '', unit: id }, where);
+    }
+    units.set(unit, { path: [id], readings: (before?.readings ?? 0) + 1, success });
+  }
+  return units;
+}

@@ -1,0 +1,18 @@
+import type { EvidenceDescriptor } from '../model/comparison';
+import { brownForsythe } from './brownForsythe';
+import { constant } from './constant';
+import { sharedUnit } from './sharedUnit';
+import { varianceRatio } from './varianceRatio';
+
+/** Every check of what the file shows, in the order in which findings of one level are printed. */
+export const evidenceChecks = [sharedUnit, constant, varianceRatio, brownForsythe] as const;
+
+export type EvidenceId = (typeof evidenceChecks)[number]['id'];
+
+/** The check with this id, from the list unless another is given. */
+export function evidenceById(
+  id: string,
+  list: readonly EvidenceDescriptor[] = evidenceChecks,
+): EvidenceDescriptor | undefined {
+  return list.find(check => check.id === id);
+}
