@@ -5,24 +5,19 @@ import { command, root } from '../../.config/command.mjs';
 
 export const promise = 'from a CSV to an answer and a settings block on the clipboard, by keyboard alone';
 
-export async function flow({ page, input, panel, refusals, openFile, run, clipboard, picture }, folder) {
+export async function flow(
+  { page, input, panel, refusals, openFile, run, answerAll, clipboard, picture },
+  folder,
+) {
   const data = path.join(folder, 'firings-april.csv');
   const before = await readFile(data);
   await openFile('firings-april.csv');
   await run('Weighbeam: Compare groups…');
 
-  // The first question names its file and what was taken of it; Enter takes the likely answer of each.
+  // The questions name their file and what was taken of it.
   await page.getByText('firings-april.csv ·').waitFor();
   await picture('question');
-  const headline = panel.locator('h1').first();
-  for (let asked = 0; asked < 12 && !(await headline.isVisible()); asked++) {
-    if (await input.isVisible()) await page.keyboard.press('Enter');
-    await page.waitForTimeout(300);
-  }
-  await panel
-    .getByText(/interval/)
-    .first()
-    .waitFor();
+  await answerAll();
   await picture('panel');
   assert.ok(await panel.locator('svg[role=img]').first().isVisible(), 'the figure is drawn');
   assert.ok((await panel.locator('table').count()) > 0, 'the numbers stand in a table');

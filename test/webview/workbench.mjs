@@ -27,10 +27,11 @@ export async function openWorkbench(folder, { extension = root, file, viewport, 
     await close();
     throw error;
   }
-  return { page, refusals, close, ...gestures(page) };
+  return { page, server, refusals, close, ...gestures(page) };
 }
 
 function gestures(page) {
+  const panel = page.frameLocator('iframe.webview.ready').frameLocator('#active-frame');
   const input = page.locator('.quick-input-widget:visible input');
   const rows = page.locator('.quick-input-widget:visible .monaco-list-row');
   return {
@@ -39,7 +40,17 @@ function gestures(page) {
     /** Items of the quick pick that is open. */
     rows,
     /** The page that the extension shows in its panel. */
-    panel: page.frameLocator('iframe.webview.ready').frameLocator('#active-frame'),
+    panel,
+
+    /** Takes the likely answer of every question, until the panel shows an answer. */
+    async answerAll() {
+      const answer = panel.getByText(/interval/).first();
+      for (let waited = 0; waited < 60 && !(await answer.isVisible()); waited++) {
+        if (await input.isVisible()) await page.keyboard.press('Enter');
+        await page.waitForTimeout(250);
+      }
+      await answer.waitFor();
+    },
 
     async openFile(name) {
       await page.keyboard.press('Control+P');
