@@ -1,4 +1,4 @@
-import { ExtensionMode, languages, window, type ExtensionContext } from 'vscode';
+import { ExtensionMode, languages, window, workspace, type ExtensionContext } from 'vscode';
 import { addToNotebook } from './commands/addToNotebook';
 import { register } from './commands/command';
 import { compare } from './commands/compare';
@@ -41,6 +41,11 @@ export function activate(context: ExtensionContext): TestApi | undefined {
     panels,
     diagnostics,
     window.registerWebviewPanelSerializer(viewType, panels),
+    // Marks stand at lines: once the text moves on they would point at something else.
+    workspace.onDidChangeTextDocument(({ document, contentChanges }) => {
+      if (contentChanges.length > 0) diagnostics.delete(document.uri);
+    }),
+    workspace.onDidCloseTextDocument(({ uri }) => diagnostics.delete(uri)),
     ...register(
       log,
       commands.map(make => make(host)),

@@ -10,7 +10,7 @@ interface Waiting {
 /** Runs a task; when it takes longer than a moment, says so with its progress and a way to give up. */
 export async function whileWaiting<T>(title: string, task: (waiting: Waiting) => Promise<T>): Promise<T> {
   const source = new CancellationTokenSource();
-  let tell = (_done: number, _total: number): void => undefined;
+  let tell: Waiting['onProgress'] = () => undefined;
   const running = task({ token: source.token, onProgress: (done, total) => tell(done, total) });
   const timer = setTimeout(() => {
     void window.withProgress(

@@ -97,14 +97,11 @@ export const stepSchema: v.GenericSchema<unknown, Step> = v.variant('kind', [
 /** What picking these items adds: plain answers replace each other, lists are joined. */
 export function joinAnswers(picked: readonly Partial<Request>[]): Partial<Request> {
   const joined: Record<string, unknown> = {};
-  for (const adds of picked) {
-    for (const [key, value] of Object.entries(adds)) {
-      const before = joined[key];
-      joined[key] =
-        Array.isArray(before) && Array.isArray(value)
-          ? [...(before as unknown[]), ...(value as unknown[])]
-          : value;
-    }
+  for (const [key, value] of picked.flatMap(adds => Object.entries<unknown>(adds))) {
+    const before = joined[key];
+    joined[key] = isList(before) && isList(value) ? [...before, ...value] : value;
   }
-  return joined as Partial<Request>;
+  return joined;
 }
+
+const isList = (value: unknown): value is readonly unknown[] => Array.isArray(value);

@@ -1,18 +1,19 @@
 import * as v from 'valibot';
 import { checked } from './checked';
+import { countSchema, lineSchema } from './places';
 import type { Request } from '../compare/request';
 
 const text = v.string();
 const texts = v.array(v.string());
 const pair = v.tuple([v.string(), v.string()]);
 const numbers = v.tuple([v.number(), v.number()]);
-const line = v.pipe(v.number(), v.integer(), v.minValue(1));
 
 const wishSchema = v.strictObject({
   encoding: v.exactOptional(text),
   delimiter: v.exactOptional(text),
   decimal: v.exactOptional(v.picklist(['.', ','])),
-  header: v.exactOptional(line),
+  thousands: v.exactOptional(text),
+  header: v.exactOptional(countSchema),
   missing: v.exactOptional(texts),
   below: v.exactOptional(v.picklist(['refuse', 'zero', 'half', 'limit'])),
 });
@@ -46,13 +47,13 @@ const told = {
   matters: v.exactOptional(v.number()),
   against: v.exactOptional(v.number()),
   confidence: v.exactOptional(v.number()),
-  rows: v.exactOptional(v.array(v.tuple([line, line]))),
+  rows: v.exactOptional(v.array(v.tuple([lineSchema, lineSchema]))),
   where: v.exactOptional(v.array(pair)),
   leaveOut: v.exactOptional(
     v.array(
       v.strictObject({
-        file: v.pipe(v.number(), v.integer(), v.minValue(0)),
-        line,
+        file: countSchema,
+        line: lineSchema,
         reason: text,
         afterResult: v.boolean(),
       }),

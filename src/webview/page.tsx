@@ -11,16 +11,15 @@ interface PageProps {
 
 /** The whole page: what is going on, what must be known, then the comparison or why there is none. */
 export function Page({ show, busy, send }: PageProps) {
+  const { view, problem, revision } = show ?? { view: null, problem: null, revision: 0 };
   return (
     <>
       <Status show={show} busy={busy} />
       {show?.notices.map(notice => (
         <NoticeLine notice={notice} send={send} />
       ))}
-      {show?.problem != null && <ProblemPart problem={show.problem} words={show.words} send={send} />}
-      {show?.view != null && (
-        <Panel view={show.view} send={action => send({ type: 'act', revision: show.revision, action })} />
-      )}
+      {problem !== null && show !== null && <ProblemPart problem={problem} words={show.words} send={send} />}
+      {view !== null && <Panel view={view} send={action => send({ type: 'act', revision, action })} />}
     </>
   );
 }

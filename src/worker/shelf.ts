@@ -7,11 +7,19 @@ export class Shelf<T> {
 
   constructor(private readonly size: number) {}
 
-  /** What is kept under the key, or what `make` makes of it. A failure is not kept. */
+  /**
+   * What is kept under the key, or what `make` makes of it. A failure is not kept; one that befell another caller, who
+   * may have given up, is not this one's: it makes its own.
+   */
   get(key: string, make: () => Promise<T>): Promise<T> {
     const found = this.kept.get(key);
+    if (found === undefined) return this.keep(key, make());
     this.kept.delete(key);
-    const value = found ?? make();
+    this.kept.set(key, found);
+    return found.catch(() => this.keep(key, make()));
+  }
+
+  private keep(key: string, value: Promise<T>): Promise<T> {
     this.kept.set(key, value);
     value.catch(() => {
       if (this.kept.get(key) === value) this.kept.delete(key);

@@ -20,6 +20,7 @@ export async function rememberAnswers(
   files: readonly Uri[],
   request: Request,
 ): Promise<void> {
-  const { files: _files, wish: _wish, rows: _rows, leaveOut: _leaveOut, ...answers } = request;
-  await state.update(keyOf(files), answers);
+  const passing: readonly string[] = ['files', 'wish', 'rows', 'leaveOut', 'confidence'];
+  const answers = Object.entries(request).filter(([key]) => !passing.includes(key));
+  await state.update(keyOf(files), Object.fromEntries(answers));
 }

@@ -19,7 +19,11 @@ export const addToNotebook = (host: Host): Command => ({
     const end = document.lineAt(document.lineCount - 1).range.end;
     const gap = document.getText().trim() === '' ? '' : end.character === 0 ? '\n' : '\n\n';
     const edit = new WorkspaceEdit();
-    edit.insert(notebook, new Position(end.line, end.character), `${gap}${block.paragraph}\n\n${block.fenced}`);
+    edit.insert(
+      notebook,
+      new Position(end.line, end.character),
+      `${gap}${block.paragraph}\n\n${block.fenced}`,
+    );
     await workspace.applyEdit(edit);
     const editor = await window.showTextDocument(document, { viewColumn: ViewColumn.One, preview: false });
     editor.revealRange(document.lineAt(document.lineCount - 1).range);
@@ -34,9 +38,14 @@ async function chooseNotebook(root: Uri): Promise<Uri | null> {
   const elsewhere = { label: l10n.t('Another file…'), description: '', uri: null };
   const items = found
     .sort((a, b) => a.path.localeCompare(b.path))
-    .map(uri => ({ label: lastPart(uri), description: workspace.asRelativePath(Uri.joinPath(uri, '..')), uri }));
+    .map(uri => ({
+      label: lastPart(uri),
+      description: workspace.asRelativePath(Uri.joinPath(uri, '..')),
+      uri,
+    }));
   const title = l10n.t('To which notebook is the settings block added?');
-  const picked = items.length === 0 ? elsewhere : await window.showQuickPick([...items, elsewhere], { title });
+  const picked =
+    items.length === 0 ? elsewhere : await window.showQuickPick([...items, elsewhere], { title });
   if (picked === undefined) return null;
   if (picked.uri !== null) return picked.uri;
   const chosen = await window.showOpenDialog({ title, filters: { Markdown: ['md', 'markdown'] } });

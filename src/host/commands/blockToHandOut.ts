@@ -29,10 +29,12 @@ export async function blockToHandOut(
   stated: Stated | null,
 ): Promise<HandedOut | null> {
   if (comparison === null) {
-    void window.showInformationMessage(l10n.t('Compare groups first: there is no comparison to take a settings block from.'));
+    void window.showInformationMessage(
+      l10n.t('Compare groups first: there is no comparison to take a settings block from.'),
+    );
     return null;
   }
-  if (comparison.shown?.blockText == null) return tellWhy(comparison);
+  if (blockOf(comparison) === null) return tellWhy(comparison);
   const said = stated ?? (asked.has(comparison) ? comparison.stated : await askStated(comparison, memory));
   if (said === null) return null;
   asked.add(comparison);
@@ -40,15 +42,18 @@ export async function blockToHandOut(
   if (said.sampling !== sampling || said.analyst !== analyst) {
     await comparison.state({ sampling: said.sampling, analyst: said.analyst });
   }
-  const { blockText, view } = comparison.shown;
-  return blockText === null || view === null
-    ? tellWhy(comparison)
-    : { fenced: fenced(blockText), paragraph: view.notebook.paragraph };
+  return blockOf(comparison) ?? tellWhy(comparison);
+}
+
+function blockOf({ shown }: Comparison): HandedOut | null {
+  if (shown === null || shown.blockText === null || shown.view === null) return null;
+  return { fenced: fenced(shown.blockText), paragraph: shown.view.notebook.paragraph };
 }
 
 function tellWhy(comparison: Comparison): null {
   const { shown } = comparison;
-  const why = shown?.view?.notebook.noBlock ?? shown?.problem?.message ?? l10n.t('It is still being computed.');
+  const why =
+    shown?.view?.notebook.noBlock ?? shown?.problem?.message ?? l10n.t('It is still being computed.');
   void window.showWarningMessage(l10n.t('There is no settings block yet. {0}', why));
   return null;
 }

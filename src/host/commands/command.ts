@@ -5,7 +5,7 @@ import type { Log } from '../log';
 /** One command of the extension: its id and what it does. */
 export interface Command {
   readonly id: string;
-  execute(...args: readonly unknown[]): Promise<unknown>;
+  readonly execute: (...args: readonly unknown[]) => Promise<unknown>;
 }
 
 /**

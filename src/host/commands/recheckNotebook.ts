@@ -1,4 +1,13 @@
-import { Diagnostic, DiagnosticSeverity, l10n, Range, window, workspace, Uri, type TextDocument } from 'vscode';
+import {
+  Diagnostic,
+  DiagnosticSeverity,
+  l10n,
+  Range,
+  window,
+  workspace,
+  Uri,
+  type TextDocument,
+} from 'vscode';
 import type { BlockPlace, OutcomeShown } from '../../protocol/fromWorker';
 import type { NamedFile } from '../../protocol/toWorker';
 import { findNamedFile } from '../files/namedFile';
@@ -16,7 +25,9 @@ export const recheckNotebook = (host: Host): Command => ({
   async execute(first) {
     const uri = first instanceof Uri ? first : activeUri();
     if (uri === null) {
-      void window.showInformationMessage(l10n.t('Open the notebook whose settings blocks are to be rechecked first.'));
+      void window.showInformationMessage(
+        l10n.t('Open the notebook whose settings blocks are to be rechecked first.'),
+      );
       return [];
     }
     const document = await workspace.openTextDocument(uri);
@@ -28,10 +39,14 @@ export const recheckNotebook = (host: Host): Command => ({
       return [];
     }
     const files = await filesOf(blocks, uri);
-    const { outcomes } = await whileWaiting(l10n.t('Rechecking {0} settings blocks', blocks.length), options =>
-      host.client.ask({ type: 'recheck', revision: 0, text, files }, options),
+    const { outcomes } = await whileWaiting(
+      l10n.t('Rechecking {0} settings blocks', blocks.length),
+      options => host.client.ask({ type: 'recheck', revision: 0, text, files }, options),
     );
-    host.diagnostics.set(uri, outcomes.flatMap(outcome => marked(outcome, document)));
+    host.diagnostics.set(
+      uri,
+      outcomes.flatMap(outcome => marked(outcome, document)),
+    );
     void window.showInformationMessage(summary(outcomes));
     return outcomes;
   },
@@ -44,7 +59,12 @@ const filesOf = (blocks: readonly BlockPlace[], notebook: Uri): Promise<readonly
 function marked(outcome: OutcomeShown, document: TextDocument): readonly Diagnostic[] {
   if (outcome.kind === 'same' || outcome.kind === 'planned') return [];
   const line = document.lineAt(Math.min(outcome.line, document.lineCount) - 1);
-  const range = new Range(line.lineNumber, line.firstNonWhitespaceCharacterIndex, line.lineNumber, line.text.length);
+  const range = new Range(
+    line.lineNumber,
+    line.firstNonWhitespaceCharacterIndex,
+    line.lineNumber,
+    line.text.length,
+  );
   const changes = outcome.changes.map(({ key, was, is }) => l10n.t('{0}: was {1}, is {2}', key, was, is));
   const severity = outcome.kind === 'blocked' ? DiagnosticSeverity.Error : DiagnosticSeverity.Warning;
   const diagnostic = new Diagnostic(range, [outcome.sentence, ...changes].join('\n'), severity);

@@ -98,7 +98,9 @@ export class Comparison implements Disposable {
   /** The files as the worker gets them now. */
   async open(): Promise<Opened> {
     const names = this.request.files;
-    const opened = await Promise.all(this.subject.files.map((uri, index) => openFile(uri, names[index] ?? '')));
+    const opened = await Promise.all(
+      this.subject.files.map((uri, index) => openFile(uri, names[index] ?? '')),
+    );
     return { files: opened.map(({ input }) => input), unsaved: opened.some(({ unsaved }) => unsaved) };
   }
 
@@ -110,7 +112,15 @@ export class Comparison implements Disposable {
 
   private async compute(revision: number, source: CancellationTokenSource): Promise<Shown> {
     const request = this.request;
-    const nothing = { revision, request, view: null, blockText: null, problem: null, open: [], numbers: null };
+    const nothing = {
+      revision,
+      request,
+      view: null,
+      blockText: null,
+      problem: null,
+      open: [],
+      numbers: null,
+    };
     let unsaved = false;
     let restarted = false;
     try {
@@ -164,7 +174,10 @@ export class Comparison implements Disposable {
     const { request, seen } = this;
     if (seen !== null && seen.request === request && seen.cells === cells) return false;
     const before = seenBefore(state, cells);
-    const session = this.session.firstShown === null ? { ...this.session, firstShown: before?.firstShown ?? null } : this.session;
+    const session =
+      this.session.firstShown === null
+        ? { ...this.session, firstShown: before?.firstShown ?? null }
+        : this.session;
     this.session = reduce(session, { kind: 'shown', when: timestamp() });
     this.seen = { request, cells };
     const looks = Math.max(before?.looks ?? 0, seen === null ? 0 : this.provenance.looks) + 1;

@@ -68,7 +68,10 @@ export class ComparisonPanel implements Disposable {
 
   private receive(message: unknown): void {
     this.handle(readFromPanel(message)).catch((error: unknown) => {
-      this.services.log.failed('panel', error instanceof Error ? (error.stack ?? error.message) : String(error));
+      this.services.log.failed(
+        'panel',
+        error instanceof Error ? (error.stack ?? error.message) : String(error),
+      );
     });
   }
 
@@ -80,7 +83,8 @@ export class ComparisonPanel implements Disposable {
         return;
       case 'act':
         // A click on numbers that have just been replaced means something else by now.
-        if (message.revision === this.comparison.shown?.revision) await actOn(this.services, this.comparison, message.action);
+        if (message.revision === this.comparison.shown?.revision)
+          await actOn(this.services, this.comparison, message.action);
         return;
       case 'notice':
         await this.onNotice(message.id);
@@ -94,7 +98,7 @@ export class ComparisonPanel implements Disposable {
     const { comparison } = this;
     switch (id) {
       case 'saveAndRunAgain':
-        await Promise.all(comparison.subject.files.map(uri => documentOf(uri)?.save()));
+        await Promise.all(comparison.subject.files.map(async uri => documentOf(uri)?.save()));
         break;
       case 'runAgain':
         break;
@@ -112,7 +116,11 @@ export class ComparisonPanel implements Disposable {
     const { comparison } = this;
     const files = comparison.subject.files.map((file, at) => (at === index ? uri : file));
     const root = rootOf(files[0] ?? uri);
-    comparison.moveTo({ files, root }, files.map(file => recordName(file, root)), timestamp());
+    comparison.moveTo(
+      { files, root },
+      files.map(file => recordName(file, root)),
+      timestamp(),
+    );
     this.follow();
   }
 

@@ -10,7 +10,9 @@ export function watchFiles(
 ): Disposable {
   const isOurs = (uri: Uri): boolean => files.some(file => file.toString() === uri.toString());
   const watchers = files.map(file => {
-    const watcher = workspace.createFileSystemWatcher(new RelativePattern(Uri.joinPath(file, '..'), lastPart(file)));
+    const watcher = workspace.createFileSystemWatcher(
+      new RelativePattern(Uri.joinPath(file, '..'), lastPart(file)),
+    );
     watcher.onDidChange(() => onState('changed'));
     watcher.onDidCreate(() => onState('changed'));
     watcher.onDidDelete(() => onState('gone'));

@@ -13,14 +13,19 @@ export function noticesFor(shown: Shown | null, state: FileState, { files }: Sub
   const notices: Notice[] = [];
   if (shown?.unsaved === true) {
     notices.push({
-      text: l10n.t('Computed from the text in the editor, which is not saved. No settings block is made of it.'),
+      text: l10n.t(
+        'Computed from the text in the editor, which is not saved. No settings block is made of it.',
+      ),
       action: { id: 'saveAndRunAgain', label: l10n.t('Save and run again') },
     });
   }
   const runAgain = { id: 'runAgain', label: l10n.t('Run again') } as const;
   switch (state) {
     case 'changed':
-      notices.push({ text: l10n.t('{0} has changed since these numbers were computed.', name), action: runAgain });
+      notices.push({
+        text: l10n.t('{0} has changed since these numbers were computed.', name),
+        action: runAgain,
+      });
       break;
     case 'edited':
       if (shown?.unsaved !== true) {
@@ -40,7 +45,10 @@ export function noticesFor(shown: Shown | null, state: FileState, { files }: Sub
       break;
   }
   if (shown?.restarted === true) {
-    notices.push({ text: l10n.t('The calculation had stopped unexpectedly; it was started again.'), action: null });
+    notices.push({
+      text: l10n.t('The calculation had stopped unexpectedly; it was started again.'),
+      action: null,
+    });
   }
   return notices;
 }

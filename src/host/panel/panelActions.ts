@@ -47,7 +47,9 @@ async function showAt({ client }: Services, comparison: Comparison, at: CellRef)
 export async function offerToLeaveOut(comparison: Comparison, { file, line }: CellRef): Promise<void> {
   const leaveOut = l10n.t('Leave line {0} out…', line);
   const detail = l10n.t('The row stays in the file; the record names it with your reason');
-  const picked = await window.showQuickPick([{ label: leaveOut, detail }], { title: l10n.t('Line {0}', line) });
+  const picked = await window.showQuickPick([{ label: leaveOut, detail }], {
+    title: l10n.t('Line {0}', line),
+  });
   if (picked === undefined) return;
   const reason = await askText({
     title: leaveOut,
@@ -92,7 +94,9 @@ async function change(services: Services, comparison: Comparison, key: ChangeKey
   const unset = unsetBy(key, patch);
   await comparison.act(
     { kind: 'change', patch, unset, when },
-    ...(reason === '' ? [] : Object.keys(patch).map(changed => ({ kind: 'reason', key: changed, reason }) as const)),
+    ...(reason === ''
+      ? []
+      : Object.keys(patch).map(changed => ({ kind: 'reason', key: changed, reason }) as const)),
   );
 }
 
@@ -162,6 +166,8 @@ async function askStep(
 const askReason = (): Promise<string | null> =>
   askText({
     title: l10n.t('Why is it changed?'),
-    prompt: l10n.t('A result was seen before: the change stands in the settings block, with your reason if you give one'),
+    prompt: l10n.t(
+      'A result was seen before: the change stands in the settings block, with your reason if you give one',
+    ),
     placeholder: l10n.t('for example: protocol 12'),
   });

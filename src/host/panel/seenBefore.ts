@@ -6,4 +6,5 @@ const keyOf = (cells: string): string => `seen ${cells}`;
 /** How often results on these cells were seen, and what was asked the first time; kept when panels are closed. */
 export const seenBefore = (state: Memento, cells: string): Seen | null => readSeen(state.get(keyOf(cells)));
 
-export const keepSeen = (state: Memento, cells: string, seen: Seen): Thenable<void> => state.update(keyOf(cells), seen);
+export const keepSeen = (state: Memento, cells: string, seen: Seen): Thenable<void> =>
+  state.update(keyOf(cells), seen);

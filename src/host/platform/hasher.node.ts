@@ -5,7 +5,10 @@ import type { Hasher } from '../../core/model/hasher';
 export function createHasher(): Hasher {
   const hash = createHash('sha256');
   return {
-    update: bytes => void (typeof bytes === 'string' ? hash.update(bytes, 'utf8') : hash.update(bytes)),
+    update: bytes => {
+      if (typeof bytes === 'string') hash.update(bytes, 'utf8');
+      else hash.update(bytes);
+    },
     hex: () => hash.digest('hex'),
   };
 }

@@ -1,7 +1,10 @@
 import { answer, type Answered } from '../../compare/answer';
+import { changedAfterShown } from '../../compare/changedAfterShown';
 import { compare } from '../../compare/compare';
-import { settle } from '../../compare/settle';
 import type { Request } from '../../compare/request';
+import { requestOf } from '../../compare/session';
+import { settle } from '../../compare/settle';
+import type { Provenance } from '../../core/model/settings';
 import type { Answer } from '../../protocol/toWorker';
 import { jsonReport } from '../../report/json';
 import { viewOf } from '../../report/view';
@@ -13,3 +16,65 @@ import { filesKey } from '../filesAtHand';
 import { readingFacts } from '../readingFacts';
 import type { Reply } from '../reply';
 import { shelfKey } from '../shelf';
+
+/** Compares, and makes everything a panel shows of it: sentences, printed numbers, figure, record. */
+export async function answerCall(call: Answer, sitting: Sitting): Promise<Reply<'answered'>> {
+  const { desk } = sitting;
+  const request = requestOf(call.session);
+  const answered = await answeredBy(call, request, sitting);
+  const { comparison, table, files } = answered;
+  const provenance: Provenance = {
+    ...call.provenance,
+    changed: changedAfterShown(call.session),
+    reasons: call.session.reasons,
+  };
+  const blockText =
+    call.record && comparison.open.length === 0 ? recordOf(answered, provenance, call, sitting) : null;
+  const { t, version } = desk;
+  return {
+    type: 'answered',
+    view: viewOf(comparison, { t, table, files, version, provenance, blockText }),
+    blockText,
+    readings: comparison.readings.map((reading, index) =>
+      readingFacts(files[index]?.path ?? '', reading, table?.rows ?? 0),
+    ),
+    cells: table === null ? '' : cellsDigest(table, comparison.settings, desk.platform.createHasher),
+    open: comparison.open,
+    numbers: call.numbers ? { ...jsonReport(comparison, t) } : null,
+  };
+}
+
+/** The comparison; what was read for an earlier answer is used again while the files and what is needed of them are the same. */
+async function answeredBy(call: Answer, request: Request, { desk, tick }: Sitting): Promise<Answered> {
+  const { createHasher } = desk.platform;
+  const sources = call.files.map(file => desk.platform.open(file));
+  let read = false;
+  const kept = await desk.answers.get(
+    shelfKey(filesKey(call.files, request.wish), readingPart(request)),
+    () => {
+      read = true;
+      return answer(sources, request, { tick, createHasher });
+    },
+  );
+  if (read || kept.table === null) return kept;
+  return { ...kept, comparison: compare(kept.table, settle(request, kept.table), tick) };
+}
+
+/** What decides which columns and rows are read; the rest of a request asks something else of the same table. */
+function readingPart(request: Request): Partial<Request> {
+  const {
+    question,
+    variance,
+    df,
+    curve,
+    sigma,
+    confidence,
+    against,
+    margin,
+    matters,
+    onlyChosen,
+    ...reading
+  } = request;
+  const { test, reference, same, rows, options, ...columns } = reading;
+  return columns;
+}
