@@ -1,0 +1,87 @@
+import { readFile } from 'node:fs/promises';
+import path from 'node:path';
+import type { Request } from '../compare/request';
+import { Refusal } from '../core/model/problem';
+import { findBlocks } from '../settings/findBlocks';
+import { parseBlock } from '../settings/parseBlock';
+import { requestFrom } from '../settings/requestFrom';
+import type { Said } from './compareRequest';
+import { UsageError } from './usageError';
+
+/** Takes "NOTE.md:31" apart; the line is that of any line of the block. */
+export function placeOf(like: string): { readonly note: string; readonly line: number | null } {
+  const found = /^(.+):(\d+)$/.exec(like);
+  return found === null ? { note: like, line: null } : { note: found[1] ?? like, line: Number(found[2]) };
+}
+
+/**
+ * The request of a block in a notebook. A notebook with several blocks needs the line. Throws a UsageError for a
+ * notebook or line without a block, a Refusal for a block that cannot be read.
+ */
+export async function recipeOf(like: string, cwd: string): Promise<Request> {
+  const { note, line } = placeOf(like);
+  const text = await readFile(path.resolve(cwd, note), 'utf8').catch(() => {
+    throw new Refusal('file-not-found', { name: note }, note);
+  });
+  const found = findBlocks(text);
+  const lines = found.map(({ firstLine }) => firstLine).join(', ');
+  if (found.length === 0)
+    throw new UsageError(`There is no settings block in ${note}`, 'Name a notebook that holds one.');
+  if (line === null && found.length > 1) {
+    throw new UsageError(
+      `${note} holds ${found.length} settings blocks, from lines ${lines}`,
+      `Add the line of the one you mean, as --like ${note}:${found[0]?.firstLine ?? 1}.`,
+    );
+  }
+  const block =
+    line === null ? found[0] : found.find(({ firstLine, lastLine }) => firstLine <= line && line <= lastLine);
+  if (block === undefined) {
+    throw new UsageError(
+      `No settings block of ${note} is at line ${line ?? 1}`,
+      `Its blocks start at lines ${lines}.`,
+    );
+  }
+  return requestFrom(parseBlock(block.text, block.firstLine).block);
+}
+
+/** Keys that cannot stand together: a word on the command line drops what the recipe said in another way. */
+const replaces: Readonly<Partial<Record<keyof Said, readonly (keyof Said)[]>>> = {
+  measured: ['columns', 'summary', 'typed'],
+  label: ['columns', 'summary', 'typed'],
+  columns: ['measured', 'label', 'summary', 'typed'],
+  summary: ['measured', 'label', 'columns', 'typed', 'per', 'pair'],
+  per: ['pair'],
+  pair: ['per'],
+  variance: ['method', 'df', 'curve'],
+  df: ['method'],
+  curve: ['method'],
+  method: ['variance', 'df', 'curve'],
+  measure: ['method', 'variance', 'df', 'curve'],
+};
+
+/**
+ * A recipe on other files: what the command line says is laid over it. Rows left out in the block are rows of its own
+ * file, so they are not carried to another; nor is the line of its header, which is found anew.
+ */
+export function laidOver(
+  recipe: Request,
+  said: Said,
+  files: readonly string[],
+  wish: Request['wish'],
+): Request {
+  const sameFiles =
+    files.length === recipe.files.length && files.every((name, index) => name === recipe.files[index]);
+  const dropped = new Set<string>(Object.keys(said).flatMap(key => replaces[key as keyof Said] ?? []));
+  if (!sameFiles) dropped.add('leaveOut');
+  const kept = Object.fromEntries(Object.entries(recipe).filter(([key]) => !dropped.has(key)));
+  const { header, ...reading } = recipe.wish;
+  return {
+    ...kept,
+    ...said,
+    ...(said.options === undefined && recipe.options === undefined
+      ? {}
+      : { options: { ...recipe.options, ...said.options } }),
+    files,
+    wish: { ...reading, ...(sameFiles && header !== undefined ? { header } : {}), ...wish },
+  };
+}

@@ -1,0 +1,88 @@
+import { realpath } from 'node:fs/promises';
+import path from 'node:path';
+import { Refusal } from '../core/model/problem';
+
+/** A file by its place on disk and by its name from the root, with / between folders. */
+export interface NamedFile {
+  readonly file: string;
+  readonly name: string;
+}
+
+/** Whether a path lies in a folder or is it; both without links. */
+const isInside = (folder: string, file: string): boolean => {
+  const relative = path.relative(folder, file);
+  return relative !== '..' && !relative.startsWith(`..${path.sep}`) && !path.isAbsolute(relative);
+};
+
+const slashes = (name: string): string => name.split(path.sep).join('/');
+
+async function real(file: string, name: string): Promise<string> {
+  return realpath(file).catch(() => {
+    throw new Refusal('file-not-found', { name }, name);
+  });
+}
+
+/** The deepest folder that holds all of these files. */
+const commonFolder = (files: readonly string[]): string =>
+  files
+    .map(file => path.dirname(file))
+    .reduce((folder, other) => {
+      let common = folder;
+      while (!isInside(common, other)) common = path.dirname(common);
+      return common;
+    });
+
+/**
+ * Names data files as a settings block will: from the root, which is `root` or else the current directory. A file
+ * outside a root that was given is refused, after links are resolved; outside the current directory the folder that
+ * holds the files becomes the root. Errors: file-not-found, file-outside-root.
+ */
+export async function nameFiles(
+  files: readonly string[],
+  cwd: string,
+  root: string | undefined,
+): Promise<readonly NamedFile[]> {
+  const base = await real(path.resolve(cwd, root ?? '.'), root ?? '.');
+  const reals = await Promise.all(files.map(file => real(path.resolve(cwd, file), file)));
+  const outside = reals.findIndex(file => !isInside(base, file));
+  if (outside >= 0 && root !== undefined) {
+    throw new Refusal('file-outside-root', { name: files[outside] ?? '', root }, files[outside] ?? null);
+  }
+  const from = outside >= 0 ? commonFolder(reals) : base;
+  return reals.map(file => ({ file, name: slashes(path.relative(from, file)) }));
+}
+
+/**
+ * Finds the file that a block of `notebook` names: from the root, else from the folders between the notebook and the
+ * root, nearest first; null when it is nowhere. Throws file-outside-root for a path that leaves the root, also by a link.
+ */
+export async function findNamed(name: string, root: string, notebook: string): Promise<string | null> {
+  const base = await realpath(root);
+  const refuse = () => new Refusal('file-outside-root', { name, root: path.basename(base) }, name);
+  if (path.isAbsolute(name) || path.win32.isAbsolute(name) || !isInside(base, path.resolve(base, name)))
+    throw refuse();
+  const folders = [base];
+  for (
+    let folder = path.dirname(await realpath(notebook));
+    isInside(base, folder);
+    folder = path.dirname(folder)
+  ) {
+    folders.push(folder);
+    if (folder === path.dirname(folder)) break;
+  }
+  for (const folder of folders) {
+    const found = await realpath(path.resolve(folder, name)).catch(() => null);
+    if (found === null) continue;
+    if (!isInside(base, found)) throw refuse();
+    return found;
+  }
+  return null;
+}
+
+/** The root of a recheck: what was given, else the current directory, else (notebook elsewhere) the notebook's folder. */
+export async function rootOf(notebook: string, cwd: string, given: string | undefined): Promise<string> {
+  if (given !== undefined) return path.resolve(cwd, given);
+  const here = await realpath(cwd);
+  const folder = path.dirname(await realpath(notebook));
+  return isInside(here, folder) ? here : folder;
+}
