@@ -12,6 +12,7 @@ export const stepIds = [
   'columns',
   'success',
   'label',
+  'same',
   'reference',
   'test',
   'units',

@@ -12,7 +12,7 @@ export const openDemo = ({ context }: Host): Command => ({
     await copyNew(Uri.joinPath(context.extensionUri, 'media', 'demo'), demo);
     const notebook = await workspace.openTextDocument(Uri.joinPath(demo, 'notes', 'kiln-notebook.md'));
     await window.showTextDocument(notebook, { viewColumn: ViewColumn.One, preview: false });
-    const data = await workspace.openTextDocument(Uri.joinPath(demo, 'firings', 'april.csv'));
+    const data = await workspace.openTextDocument(Uri.joinPath(demo, 'firings-april.csv'));
     await window.showTextDocument(data, { viewColumn: ViewColumn.One, preview: false });
     await commands.executeCommand('revealInExplorer', data.uri).then(undefined, () => undefined);
   },

@@ -63,6 +63,15 @@ export class Comparison implements Disposable {
     await this.run();
   }
 
+  /** Takes up a request that was asked from the beginning; rows left out and labels merged here stay so. */
+  async askAnew(request: Request): Promise<void> {
+    const staying: readonly (keyof Request)[] = ['leaveOut', 'same'];
+    const keys = Object.keys(this.request) as (keyof Request)[];
+    const unset = keys.filter(key => request[key] === undefined && !staying.includes(key));
+    const isSame = unset.length === 0 && sameRequest({ ...this.request, ...request }, this.request);
+    await (isSame ? this.run() : this.act({ kind: 'change', patch: request, unset, when: timestamp() }));
+  }
+
   /** States something for the record that changes no number. */
   async state(stated: Partial<Provenance>): Promise<void> {
     this.provenance = { ...this.provenance, ...stated };
@@ -187,4 +196,10 @@ export class Comparison implements Disposable {
     if (firstShown !== null) void keepSeen(state, cells, { looks, firstShown });
     return outdated;
   }
+}
+
+/** Whether two requests say the same, in whatever order. */
+function sameRequest(a: Request, b: Request): boolean {
+  const keys = [...new Set([...Object.keys(a), ...Object.keys(b)])] as (keyof Request)[];
+  return keys.every(key => JSON.stringify(a[key]) === JSON.stringify(b[key]));
 }

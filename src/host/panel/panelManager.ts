@@ -36,9 +36,7 @@ export class PanelManager implements WebviewPanelSerializer, Disposable {
     }
     this.bringForward(there);
     there.reveal();
-    const isSame = JSON.stringify(there.comparison.request) === JSON.stringify(request);
-    if (isSame) await there.comparison.run();
-    else await there.comparison.act({ kind: 'change', patch: request, when: timestamp() });
+    await there.comparison.askAnew(request);
   }
 
   /** Brings back a panel after the window was reloaded, from the settings block or the request that it kept. */

@@ -17,7 +17,12 @@ export const measuredStep: Asker = context => {
     if (pair !== null || labels.length === 0) guess = items.length;
     items.push(wideItem(context, pair));
   }
-  for (const column of narrowed(context, context.columns.filter(hasTwoOutcomes))) {
+  const groupings = labels.filter(column => column.kind === 'label' || column.distinct === 2);
+  // A column that alone can name the groups is no outcome.
+  const outcomes = context.columns.filter(
+    column => hasTwoOutcomes(column) && groupings.some(other => other !== column),
+  );
+  for (const column of narrowed(context, outcomes)) {
     items.push(outcomeItem(context, column));
   }
   const only = items[0];

@@ -8,6 +8,7 @@ import { marginStep } from './marginStep';
 import { measureStep } from './measureStep';
 import { measuredStep } from './measuredStep';
 import { questionStep } from './questionStep';
+import { sameStep } from './sameStep';
 import { successStep } from './successStep';
 import { unitsStep } from './unitsStep';
 import { varianceStep } from './varianceStep';
@@ -17,6 +18,7 @@ const askers: Readonly<Record<StepId, Asker>> = {
   columns: columnsStep,
   success: successStep,
   label: labelStep,
+  same: sameStep,
   reference: referenceStep,
   test: testStep,
   units: unitsStep,

@@ -1,9 +1,7 @@
-import { answer, type Answered } from '../../compare/answer';
+import { answer, answerFrom, type Answered } from '../../compare/answer';
 import { changedAfterShown } from '../../compare/changedAfterShown';
-import { compare } from '../../compare/compare';
 import type { Request } from '../../compare/request';
 import { requestOf } from '../../compare/session';
-import { settle } from '../../compare/settle';
 import type { Provenance } from '../../core/model/settings';
 import type { Answer } from '../../protocol/toWorker';
 import { jsonReport } from '../../report/json';
@@ -57,7 +55,7 @@ async function answeredBy(call: Answer, request: Request, { desk, tick }: Sittin
     },
   );
   if (read || kept.table === null) return kept;
-  return { ...kept, comparison: compare(kept.table, settle(request, kept.table), tick) };
+  return { ...kept, comparison: answerFrom(kept.table, request, tick) };
 }
 
 /** What decides which columns and rows are read; the rest of a request asks something else of the same table. */

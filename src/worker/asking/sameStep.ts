@@ -1,0 +1,43 @@
+import { choice, isAnswered, type Asker } from './askContext';
+import { groupLabels, type GroupLabel } from './groupLabels';
+
+/** Whether labels that differ only in capitals or spaces mean the same group. */
+export const sameStep: Asker = context => {
+  const { t, request } = context;
+  if (request.label === undefined || isAnswered(context, 'same', 'same')) return null;
+  const same = variants(groupLabels(context));
+  if (same.length === 0) return null;
+  const pairs = same.map(([from, to]) => t('“{0}” and “{1}”', from, to)).join(', ');
+  return choice(context, {
+    title: t('Do these labels mean the same group?'),
+    prompt: pairs,
+    items: [
+      {
+        label: t('The same: {0}', pairs),
+        description: '',
+        detail: t('Their rows are one group; the settings block names the labels that were merged'),
+        adds: { same },
+      },
+      {
+        label: t('Different groups'),
+        description: '',
+        detail: t('Each label stays a group of its own'),
+        adds: {},
+      },
+    ],
+  });
+};
+
+/** Each label that is spelled like a more frequent one, with that one. */
+function variants(groups: readonly GroupLabel[]): readonly (readonly [from: string, to: string])[] {
+  const byCount = [...groups].sort((a, b) => (b.rows ?? 0) - (a.rows ?? 0));
+  const known = new Map<string, string>();
+  const found: [string, string][] = [];
+  for (const { label } of byCount) {
+    const spelled = label.trim().replace(/\s+/g, ' ').toLowerCase();
+    const to = known.get(spelled);
+    if (to === undefined) known.set(spelled, label);
+    else found.push([label, to]);
+  }
+  return found;
+}
