@@ -4,7 +4,7 @@ import type { CellRef } from '../../core/model/problem';
 export interface RuleShown {
   readonly at: number;
   readonly label: string;
-  readonly kind: 'against' | 'matters' | 'margin';
+  readonly kind: 'zero' | 'against' | 'matters' | 'margin';
 }
 
 export interface IntervalShown {
@@ -57,6 +57,8 @@ export interface FigureShown {
     | (IntervalShown & {
         readonly label: string;
         readonly axis: string;
+        /** Power of ten by which axis values are printed larger: 2 for shares. */
+        readonly power: number;
         readonly rules: readonly RuleShown[];
         /** Difference of each pair. */
         readonly points: readonly number[];

@@ -16,6 +16,8 @@ export interface ControlShown<Key = ChangeKey> {
 }
 
 export interface AnswerShown {
+  /** "crazed = yes: 12/36 (33%) in slow cool, 6/36 (17%) in standard": printed first; null for means. */
+  readonly shares: string | null;
   /** "hardness is higher in slow cool than in standard by 22.6 MPa". */
   readonly headline: string;
   /** The difference in words where the headline does not hold it; null where it does. */
@@ -53,6 +55,8 @@ export interface RowShown {
   readonly data: string;
   readonly title: string;
   readonly chosen: boolean;
+  /** "chosen", else ''. */
+  readonly chosenWord: string;
   readonly counted: boolean;
   /** "8.6 to 36.6" or "no interval". */
   readonly interval: Printed;
@@ -70,6 +74,13 @@ export interface WhatIfShown {
   /** One more sentence where the choice decides: which group is smaller and more variable. */
   readonly explained: string | null;
   readonly sameData: string;
+  /** Column heads. */
+  readonly words: {
+    readonly assumption: string;
+    readonly interval: string;
+    readonly decision: string;
+    readonly note: string;
+  };
   /** Chosen first, then counted rows and bounds of the same quantity. */
   readonly rows: readonly RowShown[];
   /** Rows about another quantity: shown, not counted. */
@@ -99,6 +110,8 @@ export interface FindingsShown {
 }
 
 export interface NumberRow {
+  readonly key:
+    'n' | 'readings' | 'missing' | 'leftOut' | 'mean' | 'sd' | 'median' | 'range' | 'percent' | 'p';
   readonly name: string;
   /** One cell a group, then one for the difference where there is one. */
   readonly cells: readonly (Printed | null)[];
@@ -179,7 +192,7 @@ export interface ButtonWords {
   readonly show: string;
   readonly takeBack: string;
   readonly copyBlock: string;
-  readonly line: string;
+  readonly full: string;
 }
 
 /** A comparison in words and printed numbers: plain data, the same for panel, terminal, notebook entry and page. */

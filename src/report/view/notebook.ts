@@ -1,0 +1,30 @@
+import type { Comparison } from '../../core/model/comparison';
+import type { Say } from '../../core/model/say';
+import { notebookParagraph } from './paragraph';
+import { statedOr } from './stated';
+import { changedSentences } from './changed';
+import type { ViewContext } from './context';
+import type { Scale } from '../words/scale';
+import type { NotebookShown } from './shown';
+
+/** What goes into the notebook: what a person states, what was changed after a result was seen, the block. */
+export function notebookOf(comparison: Comparison, context: ViewContext, scale: Scale): NotebookShown {
+  const { t, provenance, blockText } = context;
+  return {
+    heading: t('For the notebook'),
+    states: [
+      { key: 'sampling', label: t('Sampling'), value: statedOr(provenance.sampling, t) },
+      { key: 'analyst', label: t('Analyst'), value: statedOr(provenance.analyst, t) },
+    ],
+    changed: changedSentences(provenance, comparison, t),
+    blockHeading: t('Settings block'),
+    blockText,
+    noBlock: blockText === null ? noBlock(comparison, t) : null,
+    paragraph: notebookParagraph(comparison, context, scale),
+  };
+}
+
+const noBlock = ({ open }: Comparison, t: Say): string =>
+  open.length > 0
+    ? t('No settings block until the open question is answered.')
+    : t('No settings block: what was compared is not what stands in the file.');

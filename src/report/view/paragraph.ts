@@ -1,0 +1,77 @@
+import type { Comparison } from '../../core/model/comparison';
+import type { Say } from '../../core/model/say';
+import { printPercent, printThree, sayP } from '../numbersPrinted';
+import { shareWords } from '../words/count';
+import { showLabel, visible } from '../words/label';
+import { measuredName, subjectOf } from '../words/measuredName';
+import { assumptionPhrase } from '../words/methodWords';
+import type { Scale } from '../words/scale';
+import { statisticOf } from './answer';
+import type { ViewContext } from './context';
+import { designSentence } from './designSentence';
+import { headline } from './headline';
+import { leftOutOf } from './leftOut';
+import { statedOr } from './stated';
+import { verdictSentence } from './verdictSentence';
+
+/** The comparison in one paragraph that stands for itself in a notebook. */
+export function notebookParagraph(comparison: Comparison, context: ViewContext, scale: Scale): string {
+  const { t, provenance, table, files } = context;
+  const { groups } = comparison;
+  const described = groups.map(group => groupWords(group, scale, t));
+  const name = comparison.measured === '' ? subjectOf(comparison, t) : measuredName(comparison);
+  const unit =
+    comparison.unit === null || comparison.groups.some(group => group.count !== null)
+      ? ''
+      : ` (${comparison.unit})`;
+  const source = files.map(file => t('{0}, SHA-256 {1}…', visible(file.path), file.sha256.slice(0, 12)));
+  const opening = t('{0}{1} in {2}', name, unit, joined(described, t));
+  const left = leftOutOf(comparison, table, scale, t);
+  const excluded =
+    left.rows.length === 0
+      ? t('Left out: none.')
+      : t('Left out: {0}. {1}', left.rows.map(row => row.sentence).join('; '), left.kept ?? '').trim();
+  return [
+    source.length === 0 ? `${opening}.` : t('{0}; {1}.', opening, source.join('; ')),
+    designSentence(comparison, t),
+    differenceSentence(comparison, scale, t),
+    `${headline(comparison, scale, t)}.`,
+    verdictSentence(comparison, scale, t),
+    excluded,
+    t('Not examined by this analysis: how the samples were drawn: {0}.', statedOr(provenance.sampling, t)),
+  ]
+    .filter(sentence => sentence !== '')
+    .join(' ');
+}
+
+function groupWords(group: Comparison['groups'][number], scale: Scale, t: Say): string {
+  const label = showLabel(group.label);
+  if (group.count !== null) return t('{0} {1}', label, shareWords(group.count));
+  const mean = scale.number(group.mean).text;
+  return Number.isFinite(group.sd)
+    ? t('{0} (n = {1}, mean {2}, SD {3})', label, group.n, mean, printThree(group.sd))
+    : t('{0} (n = {1}, value {2})', label, group.n, mean);
+}
+
+const joined = (parts: readonly string[], t: Say): string =>
+  parts.length === 2 ? t('{0} and {1}', parts[0] ?? '', parts[1] ?? '') : parts.join(', ');
+
+/** "slow cool − standard = 22.6 MPa (95% confidence interval 8.6 to 36.6); p = 0.003 (t 3.38 on …); separate variances." */
+function differenceSentence(comparison: Comparison, scale: Scale, t: Say): string {
+  const { chosen, groups, settings } = comparison;
+  const result = chosen.result;
+  const [test, reference] = groups;
+  const estimate = result?.estimate ?? null;
+  if (result === null || estimate === null || test === undefined || reference === undefined) return '';
+  const names = `${showLabel(test.label)} \u2212 ${showLabel(reference.label)}`;
+  const interval = t(
+    '{0}% confidence interval {1}',
+    printPercent(result.confidence),
+    scale.interval(result).text,
+  );
+  const size = t('{0} = {1} ({2})', names, scale.difference(estimate), interval);
+  const statistic = statisticOf(comparison, t);
+  const p = result.p === null ? null : sayP(result.p, settings.confidence);
+  const held = p === null ? statistic : statistic === null ? p : `${p} (${statistic})`;
+  return `${[size, held, assumptionPhrase(chosen.id, t)].filter(part => part !== null).join('; ')}.`;
+}

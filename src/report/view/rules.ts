@@ -1,0 +1,36 @@
+import type { Comparison } from '../../core/model/comparison';
+import type { Say } from '../../core/model/say';
+import type { Scale } from '../words/scale';
+import type { RuleShown } from './figureShown';
+
+/**
+ * The values ruled on the axis of a difference: what it is held against, a margin, and what matters: on the side of the
+ * estimate, or on both sides where the interval crosses 0.
+ */
+export function rulesOf({ settings, chosen }: Comparison, scale: Scale, t: Say): readonly RuleShown[] {
+  const { against, matters, margin, question } = settings;
+  const lower = chosen.result?.lower ?? 0;
+  const upper = chosen.result?.upper ?? 0;
+  const sides =
+    matters === null
+      ? []
+      : lower < 0 && upper > 0
+        ? [-matters, matters]
+        : upper <= 0
+          ? [-matters]
+          : [matters];
+  const bounds =
+    margin === null
+      ? []
+      : question === 'not-lower'
+        ? [margin[0]]
+        : question === 'not-higher'
+          ? [margin[1]]
+          : margin;
+  return [
+    ...(against === 0 ? [] : [{ at: 0, label: '0', kind: 'zero' as const }]),
+    { at: against, label: scale.typedNumber(against), kind: 'against' },
+    ...sides.map(at => ({ at, label: t('{0} matters', scale.typedNumber(at)), kind: 'matters' as const })),
+    ...bounds.map(at => ({ at, label: t('{0} margin', scale.typedNumber(at)), kind: 'margin' as const })),
+  ];
+}

@@ -1,0 +1,99 @@
+import type { Comparison } from '../../core/model/comparison';
+import type { MethodResult } from '../../core/model/methods';
+import type { Say } from '../../core/model/say';
+import { boundsWords } from './boundsWords';
+import { clearOf, fullText, placeOf, printAt, withMinus } from '../numbersPrinted';
+import type { Printed } from '../view/shown';
+import { movedPoint, roundedText } from './rounding';
+
+/** How the values of one comparison are printed: one place for the difference, its limits and the means; one unit. */
+export interface Scale {
+  /** Unit of a difference, '' where there is none. */
+  readonly unit: string;
+  /** A value or a difference without its unit. */
+  readonly number: (value: number) => Printed;
+  /** A value as observed, such as a median or an extreme: as written where it stands in the file. */
+  readonly observed: (value: number) => Printed;
+  readonly withUnit: (text: string) => string;
+  /** A difference with its unit: "22.6 MPa". */
+  readonly difference: (value: number) => string;
+  /** A number as it was typed, with the unit: "15 MPa". */
+  readonly typed: (value: number) => string;
+  readonly typedNumber: (value: number) => string;
+  /** "8.6 to 36.6", "at least 8.6", "no interval". */
+  readonly interval: (result: Pick<MethodResult, 'lower' | 'upper'> | null) => Printed;
+}
+
+/** Share of the length of an interval that stands for a standard error where a method gives none. */
+const LIMITS_APART = 4;
+
+export function scaleOf(comparison: Comparison, t: Say): Scale {
+  const shares = comparison.design === 'counts' || comparison.design === 'pairedCounts';
+  const power = shares ? 2 : 0;
+  const moved = (value: number): number => (power === 0 ? value : movedPoint(value, power));
+  const special = specialValues(comparison).map(moved);
+  const place = placeFor(comparison, moved, special);
+  const unit = shares ? t('percentage points') : (comparison.unit ?? '');
+
+  const number = (value: number): Printed => ({ text: printAt(moved(value), place), full: fullText(value) });
+  const withUnit = (text: string): string => (unit === '' ? text : `${text} ${unit}`);
+  const typedNumber = (value: number): string => withMinus(String(moved(value)));
+  return {
+    unit,
+    number,
+    observed: value => ({
+      text: printAt(moved(value), observedPlace(comparison, place, value)),
+      full: fullText(value),
+    }),
+    withUnit,
+    difference: value => withUnit(number(value).text),
+    typed: value => withUnit(typedNumber(value)),
+    typedNumber,
+    interval: result => {
+      const lower = result?.lower ?? null;
+      const upper = result?.upper ?? null;
+      const limits = [lower, upper].map(limit => (limit === null ? null : moved(limit)));
+      const at = clearOf(place, limits, special);
+      const text = (limit: number): string => printAt(moved(limit), at);
+      return { text: spanWords(lower, upper, text, t), full: spanWords(lower, upper, fullText, t) };
+    },
+  };
+}
+
+function spanWords(
+  lower: number | null,
+  upper: number | null,
+  text: (limit: number) => string,
+  t: Say,
+): string {
+  return lower === null && upper === null ? t('no interval') : boundsWords(lower, upper, text, t);
+}
+
+/** Values that no limit may print as unless it truly has them. */
+export function specialValues({ settings }: Pick<Comparison, 'settings'>): readonly number[] {
+  const { against, matters, margin } = settings;
+  return [0, against, ...(matters === null ? [] : [matters, -matters]), ...(margin ?? [])];
+}
+
+function placeFor(
+  { chosen, groups }: Comparison,
+  moved: (value: number) => number,
+  special: readonly number[],
+): number {
+  const result = chosen.result;
+  const { lower, upper } = result ?? { lower: null, upper: null };
+  const limits = [lower, upper].map(limit => (limit === null ? null : moved(limit)));
+  const length = lower === null || upper === null ? null : (upper - lower) / LIMITS_APART;
+  const se = result?.se ?? length;
+  return placeOf(se === null ? null : moved(se), limits, special, decimalsOf(groups) + 1);
+}
+
+const decimalsOf = (groups: Comparison['groups']): number =>
+  Math.max(0, ...groups.map(group => group.sample?.numbers.decimals ?? 0));
+
+/** Values of the file have the file's decimals, a median of two one more; unit means have those of the means. */
+function observedPlace({ groups }: Comparison, place: number, value: number): number {
+  const decimals = decimalsOf(groups);
+  if (groups.some(group => group.units !== null)) return Math.max(place, decimals);
+  return Number(roundedText(value, decimals)) === value ? decimals : decimals + 1;
+}
