@@ -1,0 +1,9 @@
+export const TAB = 9;
+export const LF = 10;
+export const CR = 13;
+export const SPACE = 32;
+export const QUOTE = 34;
+export const HASH = 35;
+export const PLUS = 43;
+export const MINUS = 45;
+export const ZERO = 48;

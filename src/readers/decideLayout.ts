@@ -1,0 +1,132 @@
+import { Refusal } from '../core/model/problem';
+import { isNumber, provenThousands } from './cellClasses';
+import { isBlank } from './foot';
+import { headRecords, type Head } from './headRecords';
+import { bestCandidate, DELIMITERS, type Candidate } from './layoutScore';
+import type { HeadBytes } from './readHead';
+import { MISSING_WORDS, type ReadingWish } from './readingWish';
+import { readGrouped } from './thousands';
+
+export interface Layout extends Candidate {
+  readonly thousands: string;
+  readonly missing: readonly string[];
+}
+
+/** Two readings whose scores are nearer than this are equally good. */
+const EQUAL = 0.98;
+
+/** A first line that names the delimiter: sep=; */
+const NAMED_DELIMITER = /^\uFEFF?"?sep=(.)"?\s*$/i;
+
+/**
+ * Decides delimiter, decimal mark and header row together: the reading under which most records have the width of the
+ * header and most cells are numbers.
+ * @param name the file, for problems
+ * @param file its index, for problems
+ * @throws Refusal quote-unclosed, file-empty, file-header-only, decimal-undecidable, layouts-equal, header-not-found
+ */
+export function decideLayout(head: HeadBytes, wish: ReadingWish, name: string, file: number): Layout {
+  const missing = wish.missing ?? MISSING_WORDS;
+  const delimiters = delimitersToTry(head, wish);
+  const decimals: readonly ('.' | ',')[] = wish.decimal === undefined ? ['.', ','] : [wish.decimal];
+  const candidates = delimiters.flatMap(delimiter => {
+    const records = headRecords(head.bytes, delimiter, head.whole);
+    return decimals.flatMap(
+      decimal =>
+        bestCandidate({
+          head: records,
+          delimiter,
+          decimal,
+          missing: new Set(missing),
+          headerLine: wish.header,
+        }) ?? [],
+    );
+  });
+  const best = candidates.reduce<Candidate | null>(
+    (a, b) => (a === null || b.score > a.score + 1e-9 ? b : a),
+    null,
+  );
+  const openQuote = firstOpenQuote(head, delimiters);
+  if (best === null || best.head.openQuote !== null) {
+    if (openQuote === null) throw new Refusal('file-empty', { name }, name);
+    throw new Refusal('quote-unclosed', { name, line: openQuote.line }, { file, ...openQuote });
+  }
+  refuseWithoutRows(best, head.whole, wish, name, file);
+  refuseUndecidable(best, candidates, name, file);
+  refuseEqualLayouts(best, candidates, name);
+  const rows = best.head.records.slice(best.place.data);
+  const thousands =
+    wish.thousands ?? provenThousands(rows, best.decimal, best.width, wish.decimal !== undefined);
+  return { ...best, thousands, missing };
+}
+
+function delimitersToTry(head: HeadBytes, wish: ReadingWish): readonly string[] {
+  if (wish.delimiter !== undefined) return [wish.delimiter];
+  const firstLine = new TextDecoder().decode(head.bytes.subarray(0, 16)).split(/[\r\n]/)[0] ?? '';
+  const named = NAMED_DELIMITER.exec(firstLine)?.[1];
+  if (named !== undefined) return [named];
+  const present = DELIMITERS.filter(delimiter => head.bytes.includes(delimiter.charCodeAt(0)));
+  return present.length > 0 ? present : [','];
+}
+
+function firstOpenQuote(head: HeadBytes, delimiters: readonly string[]): Head['openQuote'] {
+  const open = delimiters.flatMap(
+    delimiter => headRecords(head.bytes, delimiter, head.whole).openQuote ?? [],
+  );
+  return open.sort((a, b) => a.line - b.line)[0] ?? null;
+}
+
+function refuseWithoutRows(
+  best: Candidate,
+  whole: boolean,
+  wish: ReadingWish,
+  name: string,
+  file: number,
+): void {
+  const { records } = best.head;
+  if (records.every(({ cells }) => isBlank(cells))) throw new Refusal('file-empty', { name }, name);
+  const { header, data } = best.place;
+  const at = records[Math.max(0, header)]?.line ?? 1;
+  const noRows = records.length === 1 || (header >= 0 && data >= records.length);
+  if (noRows && whole)
+    throw new Refusal('file-header-only', { name, line: at }, { file, line: at, field: 0 });
+  if (header < 0 && wish.header !== 0) {
+    const line = wish.header ?? records[data]?.line ?? 1;
+    throw new Refusal('header-not-found', { name, line }, { file, line, field: 0 });
+  }
+}
+
+/** Every comma stands before three digits, and nothing says whether it parts decimals or thousands. */
+function refuseUndecidable(best: Candidate, all: readonly Candidate[], name: string, file: number): void {
+  const rival = all.find(
+    ({ delimiter, decimal }) => delimiter === best.delimiter && decimal !== best.decimal,
+  );
+  if (rival === undefined || Math.abs(rival.score - best.score) > 1e-9) return;
+  for (let row = best.place.data; row < best.head.records.length; row++) {
+    const record = best.head.records[row];
+    if (record === undefined) continue;
+    for (const column of best.place.numeric) {
+      const text = record.cells[column]?.trim() ?? '';
+      const grouped = readGrouped(text, '.');
+      if (!isNumber(best.classes[row]?.[column]) || grouped?.mark !== ',' || !grouped.ambiguous) continue;
+      const facts = { name, text, asDecimal: text.replace(',', '.'), asThousands: grouped.text };
+      throw new Refusal('decimal-undecidable', facts, { file, line: record.line, field: column });
+    }
+  }
+}
+
+function refuseEqualLayouts(best: Candidate, all: readonly Candidate[], name: string): void {
+  const rival = all.find(
+    ({ delimiter, score }) => delimiter !== best.delimiter && score >= EQUAL * best.score,
+  );
+  if (rival === undefined) return;
+  throw new Refusal(
+    'layouts-equal',
+    {
+      name,
+      delimiters: [best.delimiter, rival.delimiter],
+      widths: [best.width, rival.width],
+    },
+    name,
+  );
+}
