@@ -1,0 +1,220 @@
+import { methodById, methods } from '../core/methods/index';
+import { evidenceChecks } from '../core/evidence/index';
+import type { Answered } from '../compare/answer';
+import type { Comparison, Row } from '../core/model/comparison';
+import type { Hasher } from '../core/model/hasher';
+import type { MethodDescriptor, MethodResult } from '../core/model/methods';
+import { Refusal } from '../core/model/problem';
+import type { Provenance, Settings } from '../core/model/settings';
+import { MISSING_WORDS } from '../readers/readingWish';
+import { cellsDigest, recordId, rowDigest } from './digests';
+import type {
+  Block,
+  BlockComparison,
+  BlockData,
+  BlockGroups,
+  BlockLeftOut,
+  BlockResult,
+  BlockSummary,
+} from './document';
+import { printBlock } from './printBlock';
+import { rangesText } from './ranges';
+import { thresholdKeys } from './optionKeys';
+
+export type { Block } from './document';
+
+/** Who wrote a record, when (ISO 8601 with offset), with which version. */
+export interface Stamp {
+  readonly version: string;
+  readonly written: string;
+  readonly createHasher: () => Hasher;
+}
+
+/**
+ * The record of a comparison. Throws Refusal 'answer-needed' while a question of the data is open: a record is made of
+ * what was decided, never of what was guessed.
+ */
+export function blockFrom(
+  answered: Answered,
+  provenance: Provenance,
+  stamp: Stamp,
+  list: readonly MethodDescriptor[] = methods,
+): Block {
+  const { comparison } = answered;
+  if (comparison.open.length > 0) throw new Refusal('answer-needed', { open: comparison.open });
+  const { settings } = comparison;
+  const left = leftOutOf(answered, stamp);
+  const { changed, replaces } = provenance;
+  const block: Block = {
+    purpose: { 'question-in-words': provenance.questionInWords, plan: provenance.plan ?? 'none' },
+    ...(settings.layout.kind === 'typed'
+      ? { summary: settings.layout.groups.map(summaryOf) }
+      : { data: dataOf(answered, stamp) }),
+    groups: groupsOf(comparison),
+    ...(left.length === 0 ? {} : { 'left-out': left }),
+    comparison: comparisonOf(settings, provenance),
+    ...(changed.length === 0
+      ? {}
+      : { changed: changed.map(change => ({ ...change, from: plain(change.from), to: plain(change.to) })) }),
+    result: resultOf(comparison, list),
+    record: { id: '', replaces: replaces ?? 'none' },
+    by: {
+      analyst: provenance.analyst,
+      weighbeam: stamp.version,
+      'method-version': methodById(comparison.chosen.id, list)?.version ?? 0,
+      looks: provenance.looks,
+      written: stamp.written,
+    },
+  };
+  const id = recordId(printBlock(block), stamp.createHasher);
+  return { ...block, record: { id, replaces: replaces ?? 'none' } };
+}
+
+function dataOf({ comparison, table, files }: Answered, { createHasher }: Stamp): BlockData[] {
+  const { settings, readings } = comparison;
+  const { reading } = settings;
+  return files.map(({ path, bytes, sha256 }, index) => {
+    const read = readings[index];
+    const missing = read?.missingWords ?? reading.missing;
+    return {
+      file: path,
+      bytes,
+      sha256,
+      cells:
+        table === null ? '' : cellsDigest(table, settings, createHasher, files.length > 1 ? index : null),
+      encoding: read?.encoding ?? reading.encoding,
+      delimiter: read?.delimiter ?? reading.delimiter,
+      decimal: read?.decimal ?? reading.decimal,
+      ...(read === undefined || read.thousands === '' ? {} : { thousands: read.thousands }),
+      header: read?.headerLine ?? reading.header,
+      ...(read?.unitsLine == null ? {} : { 'units-row': read.unitsLine }),
+      ...(read === undefined || read.footer.length === 0
+        ? {}
+        : { 'footer-left': read.footer.map(({ line, text }) => `${line}: ${text}`) }),
+      ...(sameWords(missing, MISSING_WORDS) ? {} : { 'missing-words': [...missing] }),
+      ...(reading.below === 'refuse' ? {} : { below: reading.below }),
+      rows: rangesText(settings.rows),
+      ...(settings.where.length === 0
+        ? {}
+        : { where: settings.where.map(([column, label]) => [column, label]) }),
+    };
+  });
+}
+
+function groupsOf({ settings, unit }: Comparison): BlockGroups {
+  const { layout, relation, same, test, reference } = settings;
+  return {
+    ...(layout.kind === 'long' ? {} : { layout: layout.kind }),
+    ...(layout.kind === 'long' ? { measured: [...layout.measured] } : {}),
+    ...(layout.kind === 'files' ? { measured: [layout.measured] } : {}),
+    ...(unit === null ? {} : { 'measured-in': unit }),
+    ...(layout.kind === 'wide' ? { columns: [...layout.columns] } : {}),
+    ...(layout.kind === 'long' || layout.kind === 'summary' ? { label: layout.label } : {}),
+    ...(test === null ? {} : { test }),
+    ...(reference === null ? {} : { reference }),
+    ...(same.length === 0 ? {} : { merged: same.map(([from, to]) => [from, to]) }),
+    ...(relation.kind === 'units' ? { per: [...relation.columns] } : {}),
+    ...(relation.kind === 'rows' ? { 'rows-are': 'not stated' as const } : {}),
+    ...(relation.kind === 'independent' ? { 'rows-are': 'independent' as const } : {}),
+    ...(relation.kind === 'pairs' ? { pair: relation.column } : {}),
+    ...(settings.numberingRestarts ? { numbering: 'starts again in each group' as const } : {}),
+  };
+}
+
+function leftOutOf({ comparison, table, files }: Answered, { createHasher }: Stamp): BlockLeftOut[] {
+  return comparison.leftOut.map(row => ({
+    ...(files.length > 1 ? { file: files[row.file]?.path ?? '' } : {}),
+    line: row.line,
+    value: row.value,
+    ...(row.unit.length === 0 ? {} : { unit: row.unit.map(([column, id]) => `${column} ${id}`).join(', ') }),
+    'row-sha256': rowDigest(table?.cells(row.row) ?? [], createHasher),
+    reason: row.reason,
+    'after-result': row.afterResult,
+  }));
+}
+
+function comparisonOf(settings: Settings, { sampling, reasons }: Provenance): BlockComparison {
+  const thresholds = thresholdKeys(evidenceChecks);
+  const options = Object.entries(settings.options).map(([key, value]) => [key, plain(value)] as const);
+  const set = options.filter(([key]) => thresholds.includes(key));
+  return {
+    measure: settings.measure,
+    method: settings.method,
+    question: settings.question,
+    confidence: settings.confidence,
+    against: settings.against,
+    ...(settings.margin === null ? {} : { margin: [...settings.margin] }),
+    ...(settings.matters === null ? {} : { matters: settings.matters }),
+    ...Object.fromEntries(options.filter(([key]) => !thresholds.includes(key))),
+    ...(set.length === 0 ? {} : { thresholds: Object.fromEntries(set) }),
+    ...(Object.keys(reasons).length === 0 ? {} : { reasons: { ...reasons } }),
+    sampling: sampling === '' ? 'not stated' : sampling,
+  };
+}
+
+/** The numbers of the chosen row: what a recheck holds a later computation against. */
+export function resultOf(comparison: Comparison, list: readonly MethodDescriptor[] = methods): BlockResult {
+  const { chosen, groups, whatIf } = comparison;
+  const result = chosen.result;
+  const counts = groups.flatMap(({ count }) => (count === null ? [] : [count.x]));
+  const counted = whatIf.counted.flatMap(index => whatIf.rows[index] ?? []);
+  const kept = keptOf(whatIf.rows, chosen);
+  return {
+    n: groups.map(({ n }) => n),
+    ...(groups.some(({ n, readings }) => n !== readings)
+      ? { readings: groups.map(({ readings }) => readings) }
+      : {}),
+    ...(counts.length > 0 ? { x: counts } : { mean: groups.map(({ mean }) => mean) }),
+    ...(counts.length > 0 || groups.some(({ sd }) => !Number.isFinite(sd))
+      ? {}
+      : { sd: groups.map(({ sd }) => sd) }),
+    ...(result === null ? {} : numbersOf(result, methodById(chosen.id, list)?.statistic ?? '')),
+    decision: chosen.decision ?? 'not settled',
+    'depends-on-choice': whatIf.depends,
+    counted: [...new Set(counted.filter(({ data }) => data === chosen.data).map(({ id }) => id))],
+    ...(kept === null ? {} : { 'with-left-out-kept': kept }),
+  };
+}
+
+function numbersOf(
+  result: MethodResult,
+  statisticName: string,
+): Pick<BlockResult, 'difference' | 'interval' | 'statistic-name' | 'statistic' | 'df' | 'p'> {
+  const { estimate, statistic, df, p, lower, upper } = result;
+  return {
+    ...(estimate === null ? {} : { difference: estimate }),
+    ...(lower === null && upper === null ? {} : { interval: [lower ?? -Infinity, upper ?? Infinity] }),
+    ...(statistic === null ? {} : { 'statistic-name': statisticName, statistic }),
+    ...(df === null ? {} : { df: typeof df === 'number' ? df : [df[0], df[1]] }),
+    ...(p === null ? {} : { p }),
+  };
+}
+
+function keptOf(rows: readonly Row[], chosen: Row): BlockResult['with-left-out-kept'] | null {
+  if (chosen.data === 'all') return null;
+  const kept = rows.find(({ id, data }) => id === chosen.id && data === 'all');
+  const result = kept?.result;
+  if (result == null || result.estimate === null) return null;
+  const { estimate, lower, upper } = result;
+  return {
+    difference: estimate,
+    ...(lower === null && upper === null ? {} : { interval: [lower ?? -Infinity, upper ?? Infinity] }),
+    decision: kept?.decision ?? 'not settled',
+  };
+}
+
+const summaryOf = (
+  group: { readonly label: string; readonly n: number } & (
+    { readonly mean: number; readonly sd: number } | { readonly x: number }
+  ),
+): BlockSummary =>
+  'x' in group
+    ? { label: group.label, n: group.n, x: group.x }
+    : { label: group.label, n: group.n, mean: group.mean, sd: group.sd };
+
+/** Arrays of settings are readonly; those of a block are its own. */
+const plain = (value: string | number | boolean | readonly number[]): string | number | boolean | number[] =>
+  typeof value === 'object' ? [...value] : value;
+
+const sameWords = (a: readonly string[], b: readonly string[]): boolean =>
+  a.length === b.length && a.every((word, index) => word === b[index]);

@@ -1,0 +1,88 @@
+import { parse, TomlError } from 'smol-toml';
+import * as v from 'valibot';
+import { evidenceChecks } from '../core/evidence/index';
+import { methods } from '../core/methods/index';
+import type { MethodDescriptor } from '../core/model/methods';
+import { Refusal } from '../core/model/problem';
+import { blockSchema, KEY_ORDER, type Block } from './document';
+import { keyLines, type LineOf } from './keyLines';
+import { optionKeys } from './optionKeys';
+import { FORMAT, LAST_LINE } from './printBlock';
+
+export interface ParsedBlock {
+  readonly block: Block;
+  /** Line in the notebook of a key such as 'result.p' or 'left-out.0.line'; of its table, else of the block, where it is absent. */
+  readonly lineOf: LineOf;
+  /** Keys this version does not know, as 'table.key'. */
+  readonly unknownKeys: readonly string[];
+  /** The text as found, from which the record id is made again. */
+  readonly text: string;
+}
+
+const HEAD = /^# weighbeam settings block, format (?<format>\d+)$/u;
+
+/**
+ * Reads one block (as findBlocks gives it). `firstLine` is the line of the notebook on which it begins. Throws Refusal
+ * 'block-newer-format', or 'block-not-readable' with what was expected and the line.
+ */
+export function parseBlock(
+  text: string,
+  firstLine: number,
+  list: readonly MethodDescriptor[] = methods,
+): ParsedBlock {
+  const lines = text.split('\n');
+  const format = HEAD.exec((lines[0] ?? '').trimEnd())?.groups?.['format'];
+  if (format === undefined) throw unreadable(firstLine, 'the first line of a settings block', lines[0] ?? '');
+  if (Number(format) > FORMAT) {
+    throw new Refusal('block-newer-format', { format: Number(format), known: FORMAT }, `line ${firstLine}`);
+  }
+  if (!lines.some(line => line.trimEnd() === LAST_LINE)) {
+    throw unreadable(firstLine, LAST_LINE, 'the end of the text');
+  }
+  const lineOf = keyLines(lines, firstLine);
+  const read = v.safeParse(blockSchema, tables(text, firstLine));
+  if (!read.success) {
+    const [issue] = read.issues;
+    const path = v.getDotPath(issue) ?? '';
+    throw unreadable(lineOf(path), issue.expected ?? issue.message, issue.received, path);
+  }
+  const block = read.output;
+  const { method } = block.comparison;
+  if (!list.some(({ id }) => id === method)) {
+    throw unreadable(
+      lineOf('comparison.method'),
+      list.map(({ id }) => id).join(', '),
+      method,
+      'comparison.method',
+    );
+  }
+  if (block.data === undefined && block.summary === undefined) {
+    throw unreadable(firstLine, '[[data]] or [[summary]]', 'neither');
+  }
+  return { block, lineOf, unknownKeys: unknownKeys(block, list), text };
+}
+
+function tables(text: string, firstLine: number): unknown {
+  try {
+    return parse(text);
+  } catch (error) {
+    if (!(error instanceof TomlError)) throw error;
+    const reason = error.message.split('\n')[0]?.replace(/^Invalid TOML document: /u, '') ?? '';
+    throw unreadable(firstLine + error.line - 1, 'TOML 1.0', reason);
+  }
+}
+
+const unreadable = (line: number, expected: string, found: string, key = ''): Refusal =>
+  new Refusal('block-not-readable', { line, expected, found, key }, `line ${line}`);
+
+function unknownKeys(block: Block, list: readonly MethodDescriptor[]): readonly string[] {
+  const options = optionKeys(list, evidenceChecks);
+  return Object.entries(block).flatMap(([table, value]) => {
+    const known = KEY_ORDER[table];
+    if (known === undefined) return [table];
+    const items: readonly unknown[] = Array.isArray(value) ? value : [value];
+    const keys = items.flatMap(item => Object.keys(item as object));
+    const strange = keys.filter(key => !known.includes(key) && !(table === 'comparison' && options.has(key)));
+    return [...new Set(strange)].map(key => `${table}.${key}`);
+  });
+}

@@ -1,0 +1,13 @@
+type Ranges = 'all' | readonly (readonly [number, number])[];
+
+/** Ranges of line numbers as a block writes them: 'all', '5-76', '5-40, 50-76'. */
+export const rangesText = (rows: Ranges): string =>
+  rows === 'all' ? 'all' : rows.map(([first, last]) => `${first}-${last}`).join(', ');
+
+/** The inverse of rangesText; what is no range is passed over, so that a block without one takes all rows. */
+export function rangesOf(text: string): Ranges {
+  const found = [...text.matchAll(/(\d+)\s*-\s*(\d+)/gu)].map(
+    ([, first, last]) => [Number(first), Number(last)] as const,
+  );
+  return found.length === 0 ? 'all' : found;
+}
