@@ -45,7 +45,7 @@ export async function answer(
     return { comparison: answerFrom(null, request, platform.tick, options), table: null, files: [] };
   }
   const scouted: Scouted[] = [];
-  for (const source of sources) scouted.push(await scout(source, request.wish));
+  for (const [file, source] of sources.entries()) scouted.push(await scout(source, request.wish, file));
   const wanted = {
     ...columnsNeeded(request, scouted[0]?.fields ?? [], options.methods),
     keepLines: new Set((request.leaveOut ?? []).map(({ line }) => line)),
