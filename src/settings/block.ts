@@ -1,6 +1,7 @@
 import { methodById, methods } from '../core/methods/index';
 import { evidenceChecks } from '../core/evidence/index';
 import type { Answered } from '../compare/answer';
+import type { Reading } from '../core/model/cells';
 import type { Comparison, Row } from '../core/model/comparison';
 import type { Hasher } from '../core/model/hasher';
 import type { MethodDescriptor, MethodResult } from '../core/model/methods';
@@ -87,7 +88,7 @@ function dataOf({ comparison, table, files }: Answered, { createHasher }: Stamp)
       decimal: read?.decimal ?? reading.decimal,
       ...(read === undefined || read.thousands === '' ? {} : { thousands: read.thousands }),
       header: read?.headerLine ?? reading.header,
-      ...(read?.unitsLine == null ? {} : { 'units-row': read.unitsLine }),
+      ...unitsRow(read),
       ...(read === undefined || read.footer.length === 0
         ? {}
         : { 'footer-left': read.footer.map(({ line, text }) => `${line}: ${text}`) }),
@@ -100,6 +101,9 @@ function dataOf({ comparison, table, files }: Answered, { createHasher }: Stamp)
     };
   });
 }
+
+const unitsRow = (read: Reading | undefined): Pick<BlockData, 'units-row'> =>
+  read === undefined || read.unitsLine === null ? {} : { 'units-row': read.unitsLine };
 
 function groupsOf({ settings, unit }: Comparison): BlockGroups {
   const { layout, relation, same, test, reference } = settings;
@@ -190,11 +194,11 @@ function numbersOf(
   };
 }
 
-function keptOf(rows: readonly Row[], chosen: Row): BlockResult['with-left-out-kept'] | null {
+function keptOf(rows: readonly Row[], chosen: Row): NonNullable<BlockResult['with-left-out-kept']> | null {
   if (chosen.data === 'all') return null;
   const kept = rows.find(({ id, data }) => id === chosen.id && data === 'all');
   const result = kept?.result;
-  if (result == null || result.estimate === null) return null;
+  if (result === undefined || result === null || result.estimate === null) return null;
   const { estimate, lower, upper } = result;
   return {
     difference: estimate,

@@ -1,0 +1,28 @@
+import type { Comparison } from '../core/model/comparison';
+import type { Refusal } from '../core/model/problem';
+import type { Reason } from '../core/model/say';
+
+export type OutcomeKind = 'same' | 'moved' | 'turned' | 'altered' | 'reworked' | 'planned' | 'blocked';
+
+/** A number or word of the record that is not what it was. `change` is is − was, for numbers. */
+export interface OutcomeChange {
+  /** Key of the block: 'result.p', 'result.mean[0]'. */
+  readonly key: string;
+  readonly was: string | number;
+  readonly is: string | number;
+  readonly change: number | null;
+}
+
+/** What became of one settings block. */
+export interface Outcome {
+  readonly kind: OutcomeKind;
+  /** Line of the first key that moved, else of the block. */
+  readonly line: number;
+  readonly firstLine: number;
+  readonly changes: readonly OutcomeChange[];
+  /** 'lines-moved', 'file-changed', 'text-edited', 'unknown-keys', 'header-moved', each with its facts. */
+  readonly notes: readonly Reason[];
+  /** Why it is blocked. */
+  readonly reason: Refusal | null;
+  readonly now: Comparison | null;
+}
