@@ -106,16 +106,20 @@ export function printShare(x: number, n: number): string {
   return printAt(percent, clearOf(n < 100 ? 0 : 1, [percent], [0, 100]));
 }
 
-/** The place of an effect size with an interval: the first significant digit of a quarter of its length. */
+/**
+ * The place of an effect size with an interval: the first significant digit of a quarter of its length (of half the
+ * distance to its one limit), never coarser than ones.
+ */
 export function effectPlace(
   value: number,
   lower: number | null,
   upper: number | null,
   special: readonly number[],
 ): number {
-  const length = lower === null || upper === null ? 0 : upper - lower;
-  const place =
-    length > 0 && Number.isFinite(length) ? -firstDigitExponent(length / 4) : significantPlace(value, 3);
+  const reach = [lower, upper].filter(limit => limit !== null).map(limit => Math.abs(limit - value));
+  const half = reach.reduce((sum, own) => sum + own, 0) / reach.length;
+  const known = half > 0 && Number.isFinite(half);
+  const place = known ? Math.max(0, -firstDigitExponent(half / 2)) : significantPlace(value, 3);
   return clearOf(place, [lower, upper], special);
 }
 

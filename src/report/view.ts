@@ -11,7 +11,7 @@ import { recordOf } from './view/record';
 import type { ButtonWords, View } from './view/shown';
 import { severalTables } from './view/severalTables';
 import { whatIfOf } from './view/whatIf';
-import { showLabel } from './words/label';
+import { differenceName } from './words/groupLabels';
 import { measuredName } from './words/measuredName';
 import { scaleOf } from './words/scale';
 
@@ -43,7 +43,7 @@ export function viewOf(comparison: Comparison, context: ViewContext): View {
 
 /** "hardness: slow cool − standard". */
 function titleOf(comparison: Comparison, t: Say): string {
-  const labels = comparison.groups.map(group => showLabel(group.label)).join(' \u2212 ');
+  const labels = differenceName(comparison);
   return comparison.measured === '' ? labels : t('{0}: {1}', measuredName(comparison), labels);
 }
 
@@ -52,4 +52,7 @@ const buttonWords = (t: Say): ButtonWords => ({
   takeBack: t('Take back'),
   copyBlock: t('Copy block'),
   full: t('Every number in full'),
+  ask: t('ask'),
+  theFile: t('the file:'),
+  leftOut: t('left out:'),
 });

@@ -3,7 +3,7 @@ import type { Say } from '../../core/model/say';
 import { cautionsFor, quietCaution } from '../cautions';
 import { printDf, printThree, sayP } from '../numbersPrinted';
 import { shareWords } from '../words/count';
-import { showLabel } from '../words/label';
+import { differenceName, groupLabel } from '../words/groupLabels';
 import { assumptionPhrase, methodOf, reasonWords } from '../words/methodWords';
 import { noteWords } from '../words/noteWords';
 import { outcomeOf } from '../words/measuredName';
@@ -20,13 +20,15 @@ import type { AnswerShown } from './shown';
 export function answerOf(comparison: Comparison, questionInWords: string, scale: Scale, t: Say): AnswerShown {
   const { chosen, settings, findings } = comparison;
   const result = chosen.result;
+  const matters = mattersSentence(comparison, scale, t);
   return {
-    shares: sharesOf(comparison, t),
+    shares: sharesWords(comparison, t),
     headline: headline(comparison, scale, t),
     difference: differenceOf(comparison, scale, t),
     interval: intervalSentence(comparison, scale, t),
     beside: besideSentence(comparison, scale, t),
-    matters: mattersSentence(comparison, scale, t),
+    matters: matters.full,
+    mattersShort: matters.short,
     p: result === null || result.p === null ? null : sayP(result.p, settings.confidence),
     statistic: statisticOf(comparison, t),
     design: designSentence(comparison, t),
@@ -36,7 +38,7 @@ export function answerOf(comparison: Comparison, questionInWords: string, scale:
     controls: controlsOf(comparison, scale, t),
     caution: quietCaution(t),
     cautions: cautionsFor(comparison, questionInWords, scale, t),
-    notes: comparison.notes.map(note => noteWords(note, t)),
+    notes: comparison.notes.filter(({ code }) => code !== 'summary-only').map(note => noteWords(note, t)),
   };
 }
 
@@ -59,9 +61,9 @@ export function statisticOf({ chosen }: Comparison, t: Say): string | null {
 }
 
 /** "crazed = yes: 12/36 (33%) in slow cool, 6/36 (17%) in standard": counts stand before any difference of shares. */
-function sharesOf(comparison: Comparison, t: Say): string | null {
+export function sharesWords(comparison: Comparison, t: Say): string | null {
   const parts = comparison.groups.flatMap(({ count, label }) =>
-    count === null ? [] : [t('{0} in {1}', shareWords(count), showLabel(label))],
+    count === null ? [] : [t('{0} in {1}', shareWords(count), groupLabel(label, comparison))],
   );
   if (parts.length === 0) return null;
   const outcome = outcomeOf(comparison);
@@ -70,16 +72,9 @@ function sharesOf(comparison: Comparison, t: Say): string | null {
 
 /** The difference where the headline does not name its size. */
 function differenceOf(comparison: Comparison, scale: Scale, t: Say): string | null {
-  const { chosen, groups } = comparison;
-  const estimate = chosen.result?.estimate ?? null;
-  const [test, reference] = groups;
-  if (estimate === null || test === undefined || reference === undefined) return null;
-  if (chosen.decision === 'differs' || chosen.decision === 'higher' || chosen.decision === 'lower')
+  const { decision, result } = comparison.chosen;
+  const estimate = result?.estimate ?? null;
+  if (estimate === null || decision === 'differs' || decision === 'higher' || decision === 'lower')
     return null;
-  return t(
-    '{0} \u2212 {1} is {2}',
-    showLabel(test.label),
-    showLabel(reference.label),
-    scale.difference(estimate),
-  );
+  return t('{0} is {1}', differenceName(comparison), scale.difference(estimate));
 }

@@ -6,7 +6,7 @@ import type { MethodDescriptor } from '../../core/model/methods';
 import type { Say } from '../../core/model/say';
 import { printPercent } from '../numbersPrinted';
 import type { Scale } from '../words/scale';
-import { marginText } from './headline';
+import { marginText } from './marginHeadline';
 import type { ControlShown } from './shown';
 
 /** What can be changed beside the answer, each with what it is set to now. */

@@ -1,5 +1,6 @@
 import type { Comparison } from '../../core/model/comparison';
 import type { Say } from '../../core/model/say';
+import { groupLabel } from '../words/groupLabels';
 import { showLabel } from '../words/label';
 import { columnNoun, counted, unitNoun, type Noun } from '../words/unitNoun';
 
@@ -33,10 +34,13 @@ export function designSentence(comparison: Comparison, t: Say): string {
   }
 }
 
-function sizesOf({ groups }: Comparison, noun: Noun, t: Say): string {
+function sizesOf(comparison: Comparison, noun: Noun, t: Say): string {
+  const { groups } = comparison;
   const [test, reference] = groups;
   if (test === undefined || reference === undefined || groups.length > 2)
-    return groups.map(group => t('{0} in {1}', counted(group.n, noun), showLabel(group.label))).join(', ');
+    return groups
+      .map(group => t('{0} in {1}', counted(group.n, noun), groupLabel(group.label, comparison)))
+      .join(', ');
   return t('{0} against {1}', counted(test.n, noun), reference.n);
 }
 

@@ -4,6 +4,7 @@ import type { Sample } from '../../core/model/groups';
 import type { CellRef } from '../../core/model/problem';
 import type { Say } from '../../core/model/say';
 import { shareWords } from '../words/count';
+import { differenceName, groupLabel } from '../words/groupLabels';
 import { showLabel } from '../words/label';
 import { measuredName, outcomeOf } from '../words/measuredName';
 import { measuredField, placeWords } from '../words/places';
@@ -65,7 +66,7 @@ function groupFigure(
   const averaged = group.units !== null;
   const density = crowded && group.sample !== null ? densityOf(group.sample) : null;
   return {
-    label: showLabel(group.label),
+    label: groupLabel(group.label, comparison),
     n: group.count === null ? t('n = {0}', group.n) : shareWords(group.count),
     points:
       density === null
@@ -93,15 +94,15 @@ function pairLines(groups: readonly Group[]): readonly (readonly [number, number
 function differenceFigure(comparison: Comparison, scale: Scale, t: Say): FigureShown['difference'] {
   const { chosen, groups, design } = comparison;
   const result = chosen.result;
-  const [test, reference] = groups;
   const estimate = result?.estimate ?? null;
-  if (result === null || estimate === null || test === undefined || reference === undefined) return null;
+  if (result === null || estimate === null) return null;
   const drawn: IntervalShown = { estimate, lower: result.lower, upper: result.upper };
-  const label = `${showLabel(test.label)} \u2212 ${showLabel(reference.label)}`;
+  const label = differenceName(comparison);
   return {
     ...drawn,
     label,
     axis: scale.unit === '' ? label : `${label}, ${scale.unit}`,
+    unit: scale.unit,
     power: design === 'counts' || design === 'pairedCounts' ? 2 : 0,
     rules: rulesOf(comparison, scale, t),
     points:

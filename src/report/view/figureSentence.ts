@@ -1,7 +1,7 @@
 import type { Comparison } from '../../core/model/comparison';
 import type { Say } from '../../core/model/say';
 import { shareWords } from '../words/count';
-import { showLabel } from '../words/label';
+import { groupLabel } from '../words/groupLabels';
 import { subjectOf } from '../words/measuredName';
 import type { Scale } from '../words/scale';
 import { counted, unitNoun } from '../words/unitNoun';
@@ -12,7 +12,7 @@ export function figureSentence(comparison: Comparison, scale: Scale, t: Say): st
   const { groups, chosen } = comparison;
   const noun = unitNoun(comparison, t);
   const described = groups.map(group => {
-    const label = showLabel(group.label);
+    const label = groupLabel(group.label, comparison);
     if (group.count !== null) return t('{0}: {1}', label, shareWords(group.count));
     const mean = meanWords(group, comparison, scale, t);
     const range =

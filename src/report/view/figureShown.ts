@@ -57,6 +57,8 @@ export interface FigureShown {
     | (IntervalShown & {
         readonly label: string;
         readonly axis: string;
+        /** Unit of the difference, '' where there is none. */
+        readonly unit: string;
         /** Power of ten by which axis values are printed larger: 2 for shares. */
         readonly power: number;
         readonly rules: readonly RuleShown[];

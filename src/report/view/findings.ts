@@ -53,7 +53,9 @@ function restSummary(rest: readonly FindingShown[], t: Say): string {
 }
 
 function quietSentence(comparison: Comparison, t: Say): string {
-  const { quiet, groups } = comparison;
+  const { quiet, groups, settings } = comparison;
+  if (settings.layout.kind === 'typed' || settings.layout.kind === 'summary')
+    return t('No check of the data was possible.');
   const saw =
     quiet.sawNothing === 1 ? t('1 check saw nothing') : t('{0} checks saw nothing', quiet.sawNothing);
   if (quiet.cannotTell === 0) return `${saw}.`;

@@ -1,9 +1,10 @@
 import type { Comparison } from '../../core/model/comparison';
 import type { Say } from '../../core/model/say';
 import { notebookParagraph } from './paragraph';
-import { statedOr } from './stated';
+import { isStated, statedOr } from './stated';
 import { changedSentences } from './changed';
 import type { ViewContext } from './context';
+import type { StateKey } from '../panel/action';
 import type { Scale } from '../words/scale';
 import type { NotebookShown } from './shown';
 
@@ -13,15 +14,26 @@ export function notebookOf(comparison: Comparison, context: ViewContext, scale: 
   return {
     heading: t('For the notebook'),
     states: [
-      { key: 'sampling', label: t('Sampling'), value: statedOr(provenance.sampling, t) },
-      { key: 'analyst', label: t('Analyst'), value: statedOr(provenance.analyst, t) },
+      stateOf('sampling', t('Sampling'), provenance.sampling, '--sampling "..."', t),
+      stateOf('analyst', t('Analyst'), provenance.analyst, '--analyst "..."', t),
     ],
     changed: changedSentences(provenance, comparison, t),
+    isChanged: provenance.changed.length > 0 || comparison.leftOut.some(row => row.afterResult),
     blockHeading: t('Settings block'),
     blockText,
     noBlock: blockText === null ? noBlock(comparison, t) : null,
     paragraph: notebookParagraph(comparison, context, scale),
   };
+}
+
+function stateOf(
+  key: StateKey,
+  label: string,
+  text: string,
+  flag: string,
+  t: Say,
+): NotebookShown['states'][number] {
+  return { key, label, value: statedOr(text, t), flag: isStated(text) ? null : flag };
 }
 
 const noBlock = ({ open }: Comparison, t: Say): string =>

@@ -2,7 +2,8 @@ import type { Comparison } from '../../core/model/comparison';
 import type { Say } from '../../core/model/say';
 import { printPercent, printThree, sayP } from '../numbersPrinted';
 import { shareWords } from '../words/count';
-import { showLabel, visible } from '../words/label';
+import { differenceName, groupLabel } from '../words/groupLabels';
+import { visible } from '../words/label';
 import { measuredName, subjectOf } from '../words/measuredName';
 import { assumptionPhrase } from '../words/methodWords';
 import type { Scale } from '../words/scale';
@@ -18,7 +19,7 @@ import { verdictSentence } from './verdictSentence';
 export function notebookParagraph(comparison: Comparison, context: ViewContext, scale: Scale): string {
   const { t, provenance, table, files } = context;
   const { groups } = comparison;
-  const described = groups.map(group => groupWords(group, scale, t));
+  const described = groups.map(group => groupWords(group, groupLabel(group.label, comparison), scale, t));
   const name = comparison.measured === '' ? subjectOf(comparison, t) : measuredName(comparison);
   const unit =
     comparison.unit === null || comparison.groups.some(group => group.count !== null)
@@ -44,8 +45,7 @@ export function notebookParagraph(comparison: Comparison, context: ViewContext, 
     .join(' ');
 }
 
-function groupWords(group: Comparison['groups'][number], scale: Scale, t: Say): string {
-  const label = showLabel(group.label);
+function groupWords(group: Comparison['groups'][number], label: string, scale: Scale, t: Say): string {
   if (group.count !== null) return t('{0} {1}', label, shareWords(group.count));
   const mean = scale.number(group.mean).text;
   return Number.isFinite(group.sd)
@@ -58,18 +58,16 @@ const joined = (parts: readonly string[], t: Say): string =>
 
 /** "slow cool − standard = 22.6 MPa (95% confidence interval 8.6 to 36.6); p = 0.003 (t 3.38 on …); separate variances." */
 function differenceSentence(comparison: Comparison, scale: Scale, t: Say): string {
-  const { chosen, groups, settings } = comparison;
+  const { chosen, settings } = comparison;
   const result = chosen.result;
-  const [test, reference] = groups;
   const estimate = result?.estimate ?? null;
-  if (result === null || estimate === null || test === undefined || reference === undefined) return '';
-  const names = `${showLabel(test.label)} \u2212 ${showLabel(reference.label)}`;
+  if (result === null || estimate === null) return '';
   const interval = t(
     '{0}% confidence interval {1}',
     printPercent(result.confidence),
     scale.interval(result).text,
   );
-  const size = t('{0} = {1} ({2})', names, scale.difference(estimate), interval);
+  const size = t('{0} = {1} ({2})', differenceName(comparison), scale.difference(estimate), interval);
   const statistic = statisticOf(comparison, t);
   const p = result.p === null ? null : sayP(result.p, settings.confidence);
   const held = p === null ? statistic : statistic === null ? p : `${p} (${statistic})`;

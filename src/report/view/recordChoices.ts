@@ -1,6 +1,7 @@
 import type { Comparison } from '../../core/model/comparison';
 import type { Say } from '../../core/model/say';
 import type { Layout, Relation, Settings } from '../../core/model/settings';
+import { differenceName } from '../words/groupLabels';
 import { showLabel, visible } from '../words/label';
 import { methodOf } from '../words/methodWords';
 import type { ViewContext } from './context';
@@ -12,11 +13,11 @@ type Rows = RecordPart['rows'];
 
 /** What was compared with what, and how rows belong together. */
 export function designRows(comparison: Comparison, { t, provenance }: ViewContext): Rows {
-  const { settings, unit, groups, pairs } = comparison;
+  const { settings, unit, pairs } = comparison;
   return [
     ...layoutRows(settings.layout, t),
     [t('unit'), unit ?? t('not stated')],
-    [t('difference'), groups.map(group => showLabel(group.label)).join(' \u2212 ')],
+    [t('difference'), differenceName(comparison)],
     ...settings.same.map(
       ([from, to]) => [t('labels declared the same'), `${showLabel(from)} \u2192 ${showLabel(to)}`] as const,
     ),

@@ -7,18 +7,8 @@ import type { RuleShown } from './figureShown';
  * The values ruled on the axis of a difference: what it is held against, a margin, and what matters: on the side of the
  * estimate, or on both sides where the interval crosses 0.
  */
-export function rulesOf({ settings, chosen }: Comparison, scale: Scale, t: Say): readonly RuleShown[] {
-  const { against, matters, margin, question } = settings;
-  const lower = chosen.result?.lower ?? 0;
-  const upper = chosen.result?.upper ?? 0;
-  const sides =
-    matters === null
-      ? []
-      : lower < 0 && upper > 0
-        ? [-matters, matters]
-        : upper <= 0
-          ? [-matters]
-          : [matters];
+export function rulesOf(comparison: Comparison, scale: Scale, t: Say): readonly RuleShown[] {
+  const { against, margin, question } = comparison.settings;
   const bounds =
     margin === null
       ? []
@@ -30,7 +20,22 @@ export function rulesOf({ settings, chosen }: Comparison, scale: Scale, t: Say):
   return [
     ...(against === 0 ? [] : [{ at: 0, label: '0', kind: 'zero' as const }]),
     { at: against, label: scale.typedNumber(against), kind: 'against' },
-    ...sides.map(at => ({ at, label: t('{0} matters', scale.typedNumber(at)), kind: 'matters' as const })),
+    ...mattersOf(comparison).map(at => ({
+      at,
+      label: t('{0} matters', scale.typedNumber(at)),
+      kind: 'matters' as const,
+    })),
     ...bounds.map(at => ({ at, label: t('{0} margin', scale.typedNumber(at)), kind: 'margin' as const })),
   ];
+}
+
+function mattersOf({ settings, chosen }: Comparison): readonly number[] {
+  const { matters, question } = settings;
+  if (matters === null) return [];
+  if (question === 'higher' || question === 'not-lower') return [matters];
+  if (question === 'lower' || question === 'not-higher') return [-matters];
+  const lower = chosen.result?.lower ?? 0;
+  const upper = chosen.result?.upper ?? 0;
+  if (lower < 0 && upper > 0) return [-matters, matters];
+  return upper <= 0 && lower < 0 ? [-matters] : [matters];
 }

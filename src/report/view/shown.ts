@@ -26,8 +26,9 @@ export interface AnswerShown {
   readonly interval: string | null;
   /** The two-sided interval beside a bound; the interval at the stated confidence beside that of a margin question. */
   readonly beside: string | null;
-  /** What the interval says of the size that matters. */
+  /** What the interval says of the size that matters, and the same in few words; '' where a margin was asked about. */
   readonly matters: string;
+  readonly mattersShort: string;
   /** "p = 0.003"; null: the chosen row has none. */
   readonly p: string | null;
   /** "t 3.38 on 19.4 degrees of freedom". */
@@ -71,6 +72,8 @@ export interface WhatIfShown {
   readonly heading: string;
   readonly caption: string;
   readonly verdict: string;
+  /** Without the range of the intervals. */
+  readonly verdictShort: string;
   /** One more sentence where the choice decides: which group is smaller and more variable. */
   readonly explained: string | null;
   readonly sameData: string;
@@ -113,6 +116,8 @@ export interface NumberRow {
   readonly key:
     'n' | 'readings' | 'missing' | 'leftOut' | 'mean' | 'sd' | 'median' | 'range' | 'percent' | 'p';
   readonly name: string;
+  /** Without the unit. */
+  readonly short: string;
   /** One cell a group, then one for the difference where there is one. */
   readonly cells: readonly (Printed | null)[];
 }
@@ -121,8 +126,12 @@ export interface NumbersShown {
   readonly heading: string;
   readonly caption: string;
   readonly quantity: string;
+  /** "in MPa", '' without a unit. */
+  readonly inUnit: string;
   readonly columns: readonly string[];
   readonly rows: readonly NumberRow[];
+  /** "2.8% of standard (1.0 to 4.5)"; null where it has no meaning. */
+  readonly percent: string | null;
   /** Effect sizes and evidence on the assumptions, folded. */
   readonly more: {
     readonly summary: string;
@@ -157,9 +166,13 @@ export interface TableShown {
 
 export interface NotebookShown {
   readonly heading: string;
-  readonly states: readonly ControlShown<StateKey>[];
+  readonly states: readonly (ControlShown<StateKey> & {
+    /** The command line's flag where it is not stated; else null. */
+    readonly flag: string | null;
+  })[];
   /** "Nothing was changed after the result was seen.", or one sentence a change. */
   readonly changed: readonly string[];
+  readonly isChanged: boolean;
   readonly blockHeading: string;
   readonly blockText: string | null;
   /** Why there is no block; null where there is one. */
@@ -193,6 +206,9 @@ export interface ButtonWords {
   readonly takeBack: string;
   readonly copyBlock: string;
   readonly full: string;
+  readonly ask: string;
+  readonly theFile: string;
+  readonly leftOut: string;
 }
 
 /** A comparison in words and printed numbers: plain data, the same for panel, terminal, notebook entry and page. */

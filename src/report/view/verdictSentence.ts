@@ -2,7 +2,7 @@ import type { Comparison, Row } from '../../core/model/comparison';
 import type { Say } from '../../core/model/say';
 import { printP, printSignificant } from '../numbersPrinted';
 import { decisionWords } from '../words/decisionWords';
-import { showLabel } from '../words/label';
+import { groupLabel } from '../words/groupLabels';
 import type { Scale } from '../words/scale';
 import { rowTitle } from './rowTitle';
 
@@ -28,6 +28,13 @@ export function verdictSentence(comparison: Comparison, scale: Scale, t: Say): s
       );
     }
   }
+}
+
+/** The verdict without the range of the intervals: for a line of a terminal. */
+export function verdictShort(comparison: Comparison, scale: Scale, t: Say): string {
+  return comparison.whatIf.depends === 'no' && heardRows(comparison).length > 1
+    ? t('The decision does not depend on the choice.')
+    : verdictSentence(comparison, scale, t);
 }
 
 /** The rows the verdict listens to: the counted ones and the chosen one. */
@@ -137,20 +144,20 @@ export function explainedBy(comparison: Comparison, t: Say): string | null {
     return t(
       'The groups are of equal size (n = {0}); {1} is {2} times as variable.',
       small.n,
-      showLabel(more.label),
+      groupLabel(more.label, comparison),
       ratio,
     );
   return more === small
     ? t(
         'The smaller group ({0}, n = {1} against {2}) is {3} times as variable: pooling overstates the evidence.',
-        showLabel(small.label),
+        groupLabel(small.label, comparison),
         small.n,
         large.n,
         ratio,
       )
     : t(
         'The larger group ({0}, n = {1} against {2}) is {3} times as variable: pooling understates the evidence.',
-        showLabel(large.label),
+        groupLabel(large.label, comparison),
         large.n,
         small.n,
         ratio,

@@ -6,22 +6,21 @@ import type { Scale } from '../words/scale';
 import { rulesOf } from './rules';
 import { putsBack, rowTitle } from './rowTitle';
 import type { RowShown, WhatIfShown } from './shown';
-import { explainedBy, isSame, verdictSentence } from './verdictSentence';
+import { explainedBy, isSame, verdictSentence, verdictShort } from './verdictSentence';
 
 /** The rows under other assumptions and what they say together: chosen first, then the order of the registry. */
 export function whatIfOf(comparison: Comparison, scale: Scale, t: Say): WhatIfShown {
   const { whatIf, chosen } = comparison;
   const rows = [chosen, ...whatIf.rows.filter(row => !isSame(row, chosen))];
-  const open = rows.filter(
-    row => isSame(row, chosen) || (row.applies && (row.counted || isSameQuantity(row, chosen))),
-  );
-  const others = rows.filter(row => row.applies && !open.includes(row));
-  const absent = rows.filter(row => !row.applies && !open.includes(row));
+  const open = rows.filter(row => isSame(row, chosen) || row.counted || isBound(row, chosen));
+  const others = rows.filter(row => !open.includes(row) && row.applies && !isDoubted(row));
+  const absent = rows.filter(row => !open.includes(row) && !others.includes(row));
   const shown = (row: Row): RowShown => rowOf(row, comparison, scale, t);
   return {
     heading: t('Under other assumptions'),
     caption: t('Each row answers the same question under another assumption'),
     verdict: verdictSentence(comparison, scale, t),
+    verdictShort: verdictShort(comparison, scale, t),
     explained: explainedBy(comparison, t),
     sameData: t('The rows share the same data: agreement among them is not extra evidence.'),
     words: {
@@ -42,7 +41,9 @@ export function whatIfOf(comparison: Comparison, scale: Scale, t: Say): WhatIfSh
       absent.length === 0
         ? null
         : {
-            summary: t('Does not apply ({0})', absent.length),
+            summary: absent.some(row => row.applies)
+              ? t('Does not apply or is not relied on ({0})', absent.length)
+              : t('Does not apply ({0})', absent.length),
             rows: absent.map(row => ({
               title: rowTitle(row, comparison, t),
               why: reasonWords(row, t) ?? '',
@@ -52,11 +53,15 @@ export function whatIfOf(comparison: Comparison, scale: Scale, t: Say): WhatIfSh
   };
 }
 
-/** Rows of one quantity have one estimate: a bound or an uncounted rule of the same difference. */
-function isSameQuantity(row: Row, chosen: Row): boolean {
+/** A method that never counts but is about the same difference: it has the same estimate. */
+function isBound(row: Row, chosen: Row): boolean {
   const estimate = row.result?.estimate ?? null;
-  return estimate !== null && row.data === chosen.data && estimate === chosen.result?.estimate;
+  const same = estimate !== null && row.data === chosen.data && estimate === chosen.result?.estimate;
+  return same && row.applies && !methodOf(row.id).counted;
 }
+
+/** Counted on other data, but something speaks against it on these. */
+const isDoubted = (row: Row): boolean => row.reason !== null && methodOf(row.id).counted;
 
 function rowOf(row: Row, comparison: Comparison, scale: Scale, t: Say): RowShown {
   const { chosen } = comparison;

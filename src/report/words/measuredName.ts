@@ -3,19 +3,22 @@ import type { Say } from '../../core/model/say';
 import { showLabel } from './label';
 
 /** The measured column without the unit that its header carries: "gloss" for "gloss (GU)". */
-export function measuredName({ measured, unit }: Pick<Comparison, 'measured' | 'unit'>): string {
-  const name = measured.trim();
+export const measuredName = ({ measured, unit }: Pick<Comparison, 'measured' | 'unit'>): string =>
+  withoutUnit(measured, unit);
+
+/** A header without its unit. */
+export function withoutUnit(header: string, unit: string | null): string {
+  const name = header.trim();
   const endings = unit === null ? [] : [`(${unit})`, `[${unit}]`, `, ${unit}`, `/${unit}`];
   const ending = endings.find(end => name.endsWith(end) && name.length > end.length);
-  return showLabel(ending === undefined ? name : name.slice(0, -ending.length).trim());
+  return showLabel(ending === undefined ? header : name.slice(0, -ending.length).trim());
 }
 
 /** What the sentence is about: the measured column, the share of an outcome, or the mean where no column is named. */
 export function subjectOf(comparison: Comparison, t: Say): string {
   const named = comparison.measured.trim() !== '';
-  const name = named ? measuredName(comparison) : '';
   if (comparison.design !== 'counts' && comparison.design !== 'pairedCounts')
-    return named ? name : t('the mean');
+    return named ? measuredName(comparison) : t('the mean');
   const outcome = outcomeOf(comparison);
   return outcome === null ? t('the share') : t('the share of {0}', outcome);
 }
