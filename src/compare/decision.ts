@@ -61,6 +61,7 @@ function isBeyond({ lower, upper }: MethodResult, { margin }: Asked): boolean {
 /** The one-sided test the other way round, at the same level: its p is 1 − p of this one. */
 function isOpposite({ p, twoSided }: MethodResult, { confidence, margin }: Asked): boolean {
   if (p !== null) return p > confidence;
-  if (margin === null || twoSided?.upper == null || twoSided.lower === null) return false;
-  return twoSided.upper <= margin[0] || twoSided.lower >= margin[1];
+  const { lower = null, upper = null } = twoSided ?? {};
+  if (margin === null || lower === null || upper === null) return false;
+  return upper <= margin[0] || lower >= margin[1];
 }

@@ -5,6 +5,7 @@ import type { Settings } from '../core/model/settings';
 import { alignFrames } from '../core/numeric/numbers';
 import { pairedDifferences } from '../core/numeric/pairedDifferences';
 import { makeSample } from '../core/numeric/sample';
+import { groupAt } from './groupAt';
 import { groupOf } from './groupOf';
 import { Entry, type Selection } from './selection';
 import { uncounted } from './uncounted';
@@ -15,25 +16,24 @@ import { valuesOf } from './valueGroups';
  * twice in a group is refused ('pairs-repeated'), as is a file without a complete pair ('pairs-none').
  */
 export function pairGroups(table: Table, selection: Selection, settings: Settings): Designs['pairs'] {
-  const byId = [0, 1].map(group => rowsById(table, selection, group));
-  const [tests, references] = byId;
-  if (tests === undefined || references === undefined) throw new RangeError('pairs need two groups');
+  const tests = rowsById(table, selection, 0);
+  const references = rowsById(table, selection, 1);
   const complete = [...tests.keys()].filter(id => references.has(id));
-  const column = selection.ids[0]?.name ?? '';
   const unmatched = unmatchedIds(selection, new Set(complete));
-  if (complete.length === 0) throw new Refusal('pairs-none', { column, unmatched: unmatched.slice(0, 10) });
-
+  if (complete.length === 0) {
+    throw new Refusal('pairs-none', {
+      column: selection.ids[0]?.name ?? '',
+      unmatched: unmatched.slice(0, 10),
+    });
+  }
   const rows = [tests, references].map(own => Int32Array.from(complete, id => own.get(id) ?? 0));
   const numbers = alignFrames(rows.map((own, group) => valuesOf(selection, group, own, settings)));
   const rest = uncounted(selection, settings.layout);
-  const [test, reference] = selection.groups.flatMap((label, group): readonly Group[] => {
-    const [own, ownRows, left] = [numbers[group], rows[group], rest[group]];
-    if (own === undefined || ownRows === undefined || left === undefined) return [];
-    return [groupOf(label, makeSample(own, ownRows), left)];
-  });
-  if (test?.sample == null || reference?.sample == null)
-    throw new RangeError('pairs need two groups of values');
-  return { test, reference, differences: pairedDifferences(test.sample, reference.sample), unmatched };
+  const samples = numbers.map((own, group) => makeSample(own, groupAt(rows, group)));
+  const groupFrom = (group: number): Group =>
+    groupOf(groupAt(selection.groups, group), groupAt(samples, group), groupAt(rest, group));
+  const differences = pairedDifferences(groupAt(samples, 0), groupAt(samples, 1));
+  return { test: groupFrom(0), reference: groupFrom(1), differences, unmatched };
 }
 
 /** Row of each id code, in file order. */

@@ -1,5 +1,6 @@
 import { Refusal } from '../core/model/problem';
 import type { Settings } from '../core/model/settings';
+import { patched } from './patched';
 import type { Request } from './request';
 import { requestPatch } from './requestPatch';
 
@@ -63,9 +64,9 @@ export function reduce(session: Session, action: Action): Session {
   const request = requestOf(session);
   switch (action.kind) {
     case 'change':
-      return advance(session, without({ ...request, ...action.patch }, action.unset ?? []), action.when);
+      return advance(session, patched(request, action.patch, action.unset), action.when);
     case 'answer':
-      return advance(session, { ...request, ...requestPatch(action.answer) }, action.when);
+      return advance(session, patched(request, requestPatch(action.answer)), action.when);
     case 'leave out':
       return advance(session, leaveOut(session, action), action.when);
     case 'take back': {
@@ -108,11 +109,6 @@ function leaveOut(session: Session, row: Extract<Action, { kind: 'leave out' }>)
 function advance(session: Session, request: Request, when: string): Session {
   const history = [...session.history.slice(0, session.at + 1), { request, when }];
   return { ...session, history, at: history.length - 1 };
-}
-
-function without(request: Request, keys: readonly (keyof Request)[]): Request {
-  const kept = Object.entries(request).filter(([key]) => !(keys as readonly string[]).includes(key));
-  return { ...(Object.fromEntries(kept) as Partial<Request>), files: request.files, wish: request.wish };
 }
 
 function stepOf(session: Session): Step {

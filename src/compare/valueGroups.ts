@@ -5,6 +5,7 @@ import { alignFrames } from '../core/numeric/numbers';
 import { makeSample } from '../core/numeric/sample';
 import { unitMeans, type UnitMeans } from '../core/numeric/unitMeans';
 import { gathered } from './gathered';
+import { groupAt } from './groupAt';
 import { groupOf, type Readings } from './groupOf';
 import { uncounted } from './uncounted';
 import { usedRows, type Selection } from './selection';
@@ -16,19 +17,26 @@ export function valueGroups(selection: Selection, settings: Settings): readonly 
   const rest = uncounted(selection, settings.layout);
   if (settings.relation.kind !== 'units') {
     return selection.groups.map((label, group) =>
-      groupOf(label, makeSample(at(readings, group), at(rows, group)), at(rest, group)),
+      groupOf(label, makeSample(groupAt(readings, group), groupAt(rows, group)), groupAt(rest, group)),
     );
   }
-  const averaged = readings.map((numbers, group) => unitMeans(numbers, levelsOf(selection, at(rows, group))));
+  const averaged = readings.map((numbers, group) =>
+    unitMeans(numbers, levelsOf(selection, groupAt(rows, group))),
+  );
   const means = alignFrames(averaged.map(unit => unit.means));
   return selection.groups.map((label, group) => {
-    const own = at(averaged, group);
-    const ownRows = at(rows, group);
+    const own = groupAt(averaged, group);
+    const ownRows = groupAt(rows, group);
     const sample = makeSample(
-      at(means, group),
+      groupAt(means, group),
       own.first.map(reading => ownRows[reading] ?? 0),
     );
-    return groupOf(label, sample, at(rest, group), readingsOf(selection, own, at(readings, group), ownRows));
+    return groupOf(
+      label,
+      sample,
+      groupAt(rest, group),
+      readingsOf(selection, own, groupAt(readings, group), ownRows),
+    );
   });
 }
 
@@ -36,7 +44,7 @@ export function valueGroups(selection: Selection, settings: Settings): readonly 
 export function valuesOf(selection: Selection, group: number, rows: Int32Array, settings: Settings): Numbers {
   const { success } = settings.options;
   const word = typeof success === 'string' ? success : null;
-  return gathered(at(selection.measured, group), rows, settings.reading.below, word);
+  return gathered(groupAt(selection.measured, group), rows, settings.reading.below, word);
 }
 
 /** The code of each unit column at these rows, outermost first. */
@@ -51,10 +59,4 @@ function readingsOf({ ids }: Selection, own: UnitMeans, numbers: Numbers, rows: 
     return { path, readings: own.readings[unit] ?? 0 };
   });
   return { units, sample: makeSample(numbers, rows), unitOf: own.unitOf };
-}
-
-function at<T>(list: readonly T[], index: number): T {
-  const item = list[index];
-  if (item === undefined) throw new RangeError(`no group ${index}`);
-  return item;
 }

@@ -59,7 +59,7 @@ function hasBelow({ measured, rows, group, state }: Selection): boolean {
   const columns = measured.map(own => (own.kind === 'numbers' && own.column.state !== null ? own : null));
   if (columns.every(column => column === null)) return false;
   return rows.some((row, at) => {
-    const column = columns[group[at] ?? 0];
-    return state[at] === Entry.Used && column != null && cellState(column, row) === Cell.Below;
+    const column = columns[group[at] ?? 0] ?? null;
+    return state[at] === Entry.Used && column !== null && cellState(column, row) === Cell.Below;
   });
 }

@@ -21,6 +21,6 @@ export function whatIfOf(rows: readonly Row[], chosen: Row, confidence: number):
 
 function onTheLine(rows: readonly Row[], confidence: number): boolean {
   const alpha = alphaOf(confidence);
-  const ps = rows.flatMap(({ result }) => (result?.p == null ? [] : [result.p]));
+  const ps = rows.flatMap(({ result }) => (result === null || result.p === null ? [] : [result.p]));
   return ps.length > 0 && ps.every(p => p >= alpha / LINE_FACTOR && p <= alpha * LINE_FACTOR);
 }

@@ -1,0 +1,40 @@
+import type { Request } from './request';
+
+type Key = keyof Request;
+
+const ASSUMPTION: readonly Key[] = ['method', 'variance', 'df', 'curve'];
+const SIDES: readonly Key[] = ['test', 'reference', 'same'];
+
+/** What else no longer holds when a key is said anew: it was said of another layout, relation, measure or method. */
+const REPLACES: Readonly<Partial<Record<Key, readonly Key[]>>> = {
+  columns: ['measured', 'label', 'summary', ...SIDES],
+  measured: ['columns', 'summary'],
+  label: ['columns', ...SIDES],
+  measure: ['success', ...ASSUMPTION],
+  method: ['variance', 'df', 'curve'],
+  variance: ['method', 'df', 'curve'],
+  df: ['method', 'curve'],
+  curve: ['method', 'df'],
+};
+
+/**
+ * A request with a part of it said anew. Keys that the new part takes the place of are dropped unless they are said with
+ * it, so that one change in a panel never leaves a contradiction behind. `unset` leaves keys open again.
+ */
+export function patched(request: Request, patch: Partial<Request>, unset: readonly Key[] = []): Request {
+  const replaced = (Object.keys(patch) as Key[]).flatMap(key =>
+    isSame(request[key], patch[key]) ? [] : replacedBy(key, patch),
+  );
+  const dropped = new Set<string>([...replaced.filter(key => !(key in patch)), ...unset]);
+  const kept = Object.entries({ ...request, ...patch }).filter(([key]) => !dropped.has(key));
+  const { files, wish } = { ...request, ...patch };
+  return { ...(Object.fromEntries(kept) as Partial<Request>), files, wish };
+}
+
+function replacedBy(key: Key, patch: Partial<Request>): readonly Key[] {
+  if (key === 'pair') return patch.pair === 'none' ? [] : ['per', ...ASSUMPTION];
+  if (key === 'per') return patch.per === 'none' ? [] : ['pair'];
+  return REPLACES[key] ?? [];
+}
+
+const isSame = (a: unknown, b: unknown): boolean => JSON.stringify(a) === JSON.stringify(b);
