@@ -28,8 +28,8 @@ export function Page({ show, busy, send }: PageProps) {
 function Status({ show, busy }: Pick<PageProps, 'show' | 'busy'>) {
   const known = busy !== null && busy.total > 0;
   return (
-    <div role="status" class={busy === null ? 'wb-status wb-status-ready' : 'wb-status'}>
-      {busy === null ? <span class="wb-unseen">{show?.words.ready}</span> : busy.says}
+    <div role="status" class={busy === null ? 'page-status page-status-ready' : 'page-status'}>
+      {busy === null ? <span class="page-unseen">{show?.words.ready}</span> : busy.says}
       {known && <progress value={busy.done} max={busy.total} aria-label={busy.says} />}
     </div>
   );
@@ -38,7 +38,7 @@ function Status({ show, busy }: Pick<PageProps, 'show' | 'busy'>) {
 function NoticeLine({ notice, send }: { readonly notice: Notice } & Pick<PageProps, 'send'>) {
   const { action } = notice;
   return (
-    <p class="wb-notice">
+    <p class="page-notice">
       {notice.text}
       {action !== null && (
         <button type="button" onClick={() => send({ type: 'notice', id: action.id })}>
@@ -57,7 +57,7 @@ interface ProblemProps extends Pick<PageProps, 'send'> {
 /** Why there is no number: what happened, where, and what to do. */
 function ProblemPart({ problem, words, send }: ProblemProps) {
   return (
-    <section class="wb-problem" aria-label={words.problem}>
+    <section class="page-problem" aria-label={words.problem}>
       <h1>{problem.message}</h1>
       {problem.where !== null && (
         <p>

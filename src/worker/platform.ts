@@ -5,6 +5,6 @@ import type { FileInput } from '../protocol/files';
 /** What the worker needs of the machine it runs on. */
 export interface WorkerPlatform {
   /** The bytes of a file: streamed from its path where there is a disk, or those that came with the message. */
-  open(file: FileInput): ByteSource;
-  createHasher(): Hasher;
+  readonly open: (file: FileInput) => ByteSource;
+  readonly createHasher: () => Hasher;
 }

@@ -20,6 +20,7 @@ export function panelHtml(webview: Webview, extensionUri: Uri): string {
 <meta name="viewport" content="width=device-width, initial-scale=1">
 <title>${escaped(l10n.t('Comparison'))}</title>
 <link rel="stylesheet" href="${address('media', 'panel.css')}">
+<link rel="stylesheet" href="${address('media', 'page.css')}">
 </head>
 <body>
 <main id="root"></main>

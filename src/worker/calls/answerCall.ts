@@ -44,35 +44,40 @@ export async function answerCall(call: Answer, sitting: Sitting): Promise<Reply<
 
 /** The comparison; what was read for an earlier answer is used again while the files and what is needed of them are the same. */
 async function answeredBy(call: Answer, request: Request, { desk, tick }: Sitting): Promise<Answered> {
-  const { createHasher } = desk.platform;
-  const sources = call.files.map(file => desk.platform.open(file));
-  let read = false;
+  const { open, createHasher } = desk.platform;
   const kept = await desk.answers.get(
     shelfKey(filesKey(call.files, request.wish), readingPart(request)),
-    () => {
-      read = true;
-      return answer(sources, request, { tick, createHasher });
-    },
+    async () => ({ request, answered: await answer(call.files.map(open), request, { tick, createHasher }) }),
   );
-  if (read || kept.table === null) return kept;
-  return { ...kept, comparison: answerFrom(kept.table, request, tick) };
+  const { table } = kept.answered;
+  if (kept.request === request || table === null) return kept.answered;
+  return { ...kept.answered, comparison: answerFrom(table, request, tick) };
 }
 
-/** What decides which columns and rows are read; the rest of a request asks something else of the same table. */
-function readingPart(request: Request): Partial<Request> {
-  const {
-    question,
-    variance,
-    df,
-    curve,
-    sigma,
-    confidence,
-    against,
-    margin,
-    matters,
-    onlyChosen,
-    ...reading
-  } = request;
-  const { test, reference, same, rows, options, ...columns } = reading;
-  return columns;
+/** What asks something else of the same table; the rest decides which columns and rows are read. */
+const askedOfTable: ReadonlySet<string> = new Set<keyof Request>([
+  'question',
+  'variance',
+  'df',
+  'curve',
+  'sigma',
+  'confidence',
+  'against',
+  'margin',
+  'matters',
+  'onlyChosen',
+  'test',
+  'reference',
+  'same',
+  'rows',
+  'options',
+]);
+
+const readingPart = (request: Request): unknown =>
+  Object.entries(request).filter(([key]) => !askedOfTable.has(key));
+
+function recordOf(answered: Answered, provenance: Provenance, call: Answer, { desk }: Sitting): string {
+  const { version, platform } = desk;
+  const stamp = { version, written: call.written, createHasher: platform.createHasher };
+  return printBlock(blockFrom(answered, provenance, stamp));
 }

@@ -1,14 +1,13 @@
 import type { LabelColumn } from '../../core/model/cells';
 import type { FileInput } from '../../protocol/files';
 import type { NextStep } from '../../protocol/toWorker';
-import { readTable } from '../../readers/readTable';
 import type { ReadingWish } from '../../readers/readingWish';
 import type { Survey } from '../../readers/survey';
 import type { AskContext } from '../asking/askContext';
 import { canBeIds, canBeLabels } from '../asking/columnRoles';
 import { nextStep, onlyStep } from '../asking/nextStep';
 import type { Sitting } from '../desk';
-import { filesKey, scoutFiles, surveyFile } from '../filesAtHand';
+import { surveyFile, tableOf } from '../filesAtHand';
 import type { Reply } from '../reply';
 
 /** Above this, labels are not looked at row by row before a question: asking must stay quick. */
@@ -50,13 +49,6 @@ async function labelColumns(
   const wanted = survey.columns
     .filter(column => canBeIds(column) || canBeLabels(column))
     .map(({ field }) => field);
-  const table = await desk.tables.get(filesKey([file], wish), async () =>
-    readTable(
-      [desk.platform.open(file)],
-      await scoutFiles(desk, [file], wish),
-      { numbers: [], labels: wanted },
-      { tick },
-    ),
-  );
+  const table = await tableOf(desk, file, wish, wanted, tick);
   return new Map(wanted.map(field => [survey.fields[field]?.name ?? '', table.labels(field)]));
 }

@@ -15,7 +15,8 @@ export async function recheckCall(call: Recheck, { desk, tick }: Sitting): Promi
     const named = call.files.find(({ name }) => name === path);
     if (named?.outside === true)
       return Promise.reject(new Refusal('file-outside-root', { file: path }, path));
-    return Promise.resolve(named?.input == null ? null : desk.platform.open(named.input));
+    const input = named?.input ?? null;
+    return Promise.resolve(input === null ? null : desk.platform.open(input));
   };
   const outcomes: OutcomeShown[] = [];
   for (const found of findBlocks(call.text)) {
