@@ -1,11 +1,20 @@
 import type { EvidenceDescriptor } from '../model/comparison';
 import { brownForsythe } from './brownForsythe';
 import { constant } from './constant';
+import { footerRow } from './footerRow';
+import { labelVariants } from './labelVariants';
 import { sharedUnit } from './sharedUnit';
 import { varianceRatio } from './varianceRatio';
 
 /** Every check of what the file shows, in the order in which findings of one level are printed. */
-export const evidenceChecks = [sharedUnit, constant, varianceRatio, brownForsythe] as const;
+export const evidenceChecks = [
+  labelVariants,
+  sharedUnit,
+  footerRow,
+  constant,
+  varianceRatio,
+  brownForsythe,
+] as const;
 
 export type EvidenceId = (typeof evidenceChecks)[number]['id'];
 
