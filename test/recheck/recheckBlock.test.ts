@@ -1,0 +1,212 @@
+import { describe, expect, it } from 'vitest';
+import { answer } from '../../src/compare/answer';
+import { blockFrom } from '../../src/settings/block';
+import { printBlock } from '../../src/settings/printBlock';
+import { separateT } from '../../src/core/methods/separateT';
+import { methods } from '../../src/core/methods/index';
+import { Refusal } from '../../src/core/model/problem';
+import type { Outcome } from '../../src/recheck/outcome';
+import { recheckBlock, type Open } from '../../src/recheck/recheckBlock';
+import { sameNumber } from '../../src/recheck/resultChanges';
+import { fenced } from '../../src/settings/fenced';
+import { findBlocks } from '../../src/settings/findBlocks';
+import { recordId } from '../../src/settings/digests';
+import { EXPORT, STAMP, blockOf, platform, provenance, source } from '../settings/recording';
+
+const notebookOf = (block: string): string => `# Kiln notebook\n\n${fenced(block)}\nafter\n`;
+
+async function recheck(block: string, text: string | null, open?: Open): Promise<Outcome> {
+  const [found] = findBlocks(notebookOf(block));
+  if (found === undefined) throw new Error('no block was found');
+  const disk: Open = name => Promise.resolve(text === null ? null : source(name, text));
+  return recheckBlock(found, open ?? disk, platform);
+}
+
+const codes = ({ notes }: Outcome): readonly string[] => notes.map(({ code }) => code);
+
+/** The block with an id that fits its text again, as someone who edits it with care could make. */
+function resealed(block: string): string {
+  return block.replace(/^id = ".*"$/mu, `id = "${recordId(block, platform.createHasher)}"`);
+}
+
+describe('a recheck', () => {
+  it('says same for an unchanged file', async () => {
+    const outcome = await recheck(await blockOf(EXPORT), EXPORT);
+    expect([outcome.kind, outcome.changes, outcome.notes, outcome.firstLine]).toEqual(['same', [], [], 4]);
+  });
+
+  it('says same, with a note, when a column that is not used was edited', async () => {
+    const outcome = await recheck(await blockOf(EXPORT), EXPORT.replace('lost', 'dropped'));
+    expect([outcome.kind, codes(outcome)]).toEqual(['same', ['file-changed']]);
+  });
+
+  it('says same, with a note, when a line was put in above', async () => {
+    const outcome = await recheck(await blockOf(EXPORT), `Kiln 2;;;;\n${EXPORT}`);
+    expect([outcome.kind, codes(outcome)]).toEqual(['same', ['lines-moved', 'file-changed']]);
+  });
+
+  it('says moved, with was and is, when a used cell changed and the conclusion holds', async () => {
+    const outcome = await recheck(await blockOf(EXPORT), EXPORT.replace('815,0', '815,5'));
+    expect(outcome.kind).toBe('moved');
+    expect(outcome.changes[0]).toMatchObject({ key: 'result.mean[1]', was: 815.75 });
+    expect(outcome.line).toBe(lineIn(await blockOf(EXPORT), 'mean = '));
+  });
+
+  it('says turned when the conclusion changed', async () => {
+    const outcome = await recheck(
+      await blockOf(EXPORT),
+      EXPORT.replace('standard;6;a;821,5', 'standard;6;a;901,5'),
+    );
+    expect(outcome.kind).toBe('turned');
+    expect(outcome.changes.find(({ key }) => key === 'result.decision')).toMatchObject({
+      was: 'differs',
+      is: 'not settled',
+    });
+  });
+
+  it('says altered, at its line, when a digit of the result was edited, also with a new record id', async () => {
+    const block = await blockOf(EXPORT);
+    const edited = block.replace(
+      /^p = 0\.0(\d)/mu,
+      (_, digit: string) => `p = 0.0${(Number(digit) + 1) % 10}`,
+    );
+    for (const text of [edited, resealed(edited)]) {
+      const outcome = await recheck(text, EXPORT);
+      expect([outcome.kind, outcome.line]).toEqual(['altered', lineIn(block, 'p = ')]);
+    }
+  });
+
+  it('says same, with a note, when only words of the block were edited', async () => {
+    const edited = (await blockOf(EXPORT)).replace('places by lot', 'places drawn by lot');
+    const outcome = await recheck(edited, EXPORT);
+    expect([outcome.kind, codes(outcome)]).toEqual(['same', ['text-edited']]);
+  });
+
+  it('says reworked when our method changed since', async () => {
+    const block = await blockOf(EXPORT);
+    const [found] = findBlocks(notebookOf(block));
+    const newer = {
+      ...separateT,
+      version: separateT.version + 1,
+      run: (...asked: Parameters<typeof separateT.run>) => ({ ...separateT.run(...asked), df: 7 }),
+    };
+    const list = methods.map(known => (known.id === newer.id ? newer : known));
+    const outcome = await recheckBlock(found!, name => Promise.resolve(source(name, EXPORT)), platform, list);
+    expect([outcome.kind, outcome.changes.map(({ key }) => key)]).toEqual(['reworked', ['result.df']]);
+  });
+
+  it('says planned of a block without a result', async () => {
+    const block = await blockOf(EXPORT);
+    const planned = block.replace(/\[result\][^]*?(?=\[by\])/u, '');
+    expect((await recheck(planned, null)).kind).toBe('planned');
+  });
+
+  it('finds a left-out row again on another line, and is blocked when it is gone', async () => {
+    const block = await blockOf(EXPORT);
+    const lines = EXPORT.split('\n');
+    const swapped = [...lines.slice(0, 5), lines[6], lines[5], ...lines.slice(7)].join('\n');
+    const moved = await recheck(block, swapped);
+    expect([moved.kind, codes(moved)]).toEqual(['same', ['lines-moved', 'file-changed']]);
+    const gone = await recheck(block, lines.filter(line => !line.includes('cracked')).join('\n'));
+    expect([gone.kind, gone.reason?.code]).toEqual(['blocked', 'left-out-row-gone']);
+  });
+
+  it('is blocked when a left-out row moved and is no longer unique', async () => {
+    const lines = EXPORT.split('\n');
+    const twice = [
+      ...lines.slice(0, 4),
+      lines[6],
+      ...lines.slice(4, 6),
+      lines[5],
+      lines[6],
+      ...lines.slice(7),
+    ];
+    const outcome = await recheck(await blockOf(EXPORT), twice.join('\n'));
+    expect([outcome.kind, outcome.reason?.facts['found']]).toEqual(['blocked', 2]);
+  });
+
+  it('is blocked when the file is gone, or lies outside the root', async () => {
+    const block = await blockOf(EXPORT);
+    expect((await recheck(block, null)).reason?.code).toBe('file-not-found');
+    const outside: Open = name => Promise.reject(new Refusal('file-outside-root', { name }, name));
+    const outcome = await recheck(block, EXPORT, outside);
+    expect([outcome.kind, outcome.reason?.code]).toEqual(['blocked', 'file-outside-root']);
+  });
+
+  it('is blocked, not broken, when a label, a column or all values of a group are gone', async () => {
+    const block = await blockOf(EXPORT);
+    const codeOf = async (text: string) => (await recheck(block, text)).reason?.code;
+    expect(await codeOf(EXPORT.replaceAll('standard', 'fast'))).toBe('label-unknown');
+    expect(await codeOf(EXPORT.replace('hardness', 'strength'))).toBe('column-unknown');
+    expect(await codeOf('')).toBe('file-empty');
+  });
+
+  it('is blocked at the line of a key that cannot be read', async () => {
+    const block = (await blockOf(EXPORT)).replace('against = 0', 'against = "zero"');
+    const outcome = await recheck(block, EXPORT);
+    expect([outcome.kind, outcome.reason?.code, outcome.line]).toEqual([
+      'blocked',
+      'block-not-readable',
+      lineIn(block, 'against'),
+    ]);
+  });
+
+  it('keeps the verdict of an old record when a later version counts more rows', async () => {
+    const block = (await blockOf(EXPORT)).replace(
+      'counted = ["separate-t", "pooled-t"]',
+      'counted = ["separate-t"]',
+    );
+    const outcome = await recheck(resealed(block), EXPORT);
+    expect(outcome.now?.whatIf.rows.map(({ id }) => id)).not.toContain('pooled-t');
+    expect(outcome.kind).toBe('same');
+  });
+
+  it('rechecks typed numbers without a file', async () => {
+    const block = await blockOf('', {
+      files: [],
+      wish: {},
+      typed: [
+        { label: 'mill A', n: 12, mean: 31.4, sd: 1.1 },
+        { label: 'mill B', n: 10, mean: 30.2, sd: 0.9 },
+      ],
+    });
+    expect((await recheck(block, null)).kind).toBe('same');
+    expect((await recheck(block.replace('sd = 1.1', 'sd = 1.2'), null)).kind).toBe('altered');
+  });
+
+  it('compares one file a group, each with its own digest', async () => {
+    const files: Readonly<Record<string, string>> = {
+      'may.csv': 'x\n1.5\n2.5\n3\n',
+      'june.csv': 'x\n4\n5.5\n6\n',
+    };
+    const open: Open = name => Promise.resolve(source(name, files[name] ?? ''));
+    const sources = Object.keys(files);
+    const asked = { files: sources, wish: {}, measured: ['x'] };
+    const answered = await answer(
+      sources.map(name => source(name, files[name] ?? '')),
+      asked,
+      platform,
+    );
+    const block = printBlock(blockFrom(answered, provenance, STAMP));
+    expect((await recheck(block, null, open)).kind).toBe('same');
+    const changed: Open = name => Promise.resolve(source(name, (files[name] ?? '').replace('5.5', '5.6')));
+    expect((await recheck(block, null, changed)).kind).toBe('moved');
+  });
+});
+
+describe('numbers of a recheck', () => {
+  it('are held to 12 significant digits', () => {
+    expect(sameNumber(0.123456789012, 0.1234567890124)).toBe(true);
+    expect(sameNumber(0.123456789012, 0.1234567890127)).toBe(false);
+    expect(sameNumber(0, 1e-300)).toBe(false);
+    expect(sameNumber(Infinity, Infinity)).toBe(true);
+  });
+});
+
+function lineIn(block: string, needle: string): number {
+  return (
+    notebookOf(block)
+      .split('\n')
+      .findIndex(at => at.startsWith(needle)) + 1
+  );
+}
