@@ -1,4 +1,4 @@
-import type { CellRef, Problem, ProblemCode, Refusal } from '../core/model/problem';
+import type { Problem, ProblemCode, Refusal } from '../core/model/problem';
 import type { Say } from '../core/model/say';
 import { askingProblems } from './problems/asking';
 import { computingProblems } from './problems/computing';
@@ -18,7 +18,7 @@ const words: Readonly<Record<ProblemCode, SayProblem>> = {
 /** A refusal in words: what happened, where (file, line and column, each from 1), and what to do. */
 export function problemWords(refusal: Refusal, t: Say, files: readonly string[] = []): Problem {
   const { message, fix } = words[refusal.code](toldBy(refusal.facts, t));
-  return { code: refusal.code, message, where: whereOf(refusal.where, t, files), fix };
+  return { code: refusal.code, message, where: whereOf(refusal, message, t, files), fix };
 }
 
 /** A problem on one line, as the command line prints it; surfaces have problems of their own beside those of core. */
@@ -31,8 +31,10 @@ export function problemLine({
   return `${code}: ${message}${where === null ? '' : ` (${where})`}. ${fix}`;
 }
 
-function whereOf(where: CellRef | string | null, t: Say, files: readonly string[]): string | null {
-  if (where === null || typeof where === 'string') return where === null ? null : visible(where);
+/** A name that the message bears already is not said twice. */
+function whereOf({ where }: Refusal, message: string, t: Say, files: readonly string[]): string | null {
+  if (where === null) return null;
+  if (typeof where === 'string') return message.includes(visible(where)) ? null : visible(where);
   const file = files[where.file];
   const place = t('line {0}, column {1}', where.line, where.field + 1);
   return file === undefined ? place : `${visible(file)} ${place}`;

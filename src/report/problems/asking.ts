@@ -1,3 +1,4 @@
+import { evidenceById } from '../../core/evidence/index';
 import type { SayProblem } from './told';
 
 /** Why what was asked cannot be asked of these data, or was asked in a way that could mean two things. */
@@ -51,8 +52,13 @@ export const askingProblems = {
     message: t('{0} does not answer the question "{1}"', text('method') ?? '', text('question') ?? ''),
     fix: t('It answers: {0}.', list('questions') ?? ''),
   }),
-  'answer-needed': ({ t, list }) => ({
-    message: t('The data leave a question open, so no record is made: {0}', list('open') ?? ''),
+  'answer-needed': ({ t, names }) => ({
+    message: t(
+      'The data leave a question open, so no record is made: {0}',
+      names('open')
+        .map(id => evidenceById(id)?.title(t) ?? id)
+        .join(', '),
+    ),
     fix: t('Answer it; the number itself is printed beside the question (--format text or json).'),
   }),
   'reason-needed': ({ t, number, text }) => ({

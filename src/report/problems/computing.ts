@@ -1,17 +1,29 @@
+import type { Say } from '../../core/model/say';
 import type { SayProblem } from './told';
 
 /** Why the values cannot be compared, or a settings block cannot be computed again. */
 export const computingProblems = {
-  'values-too-few': ({ t, text, number }) => ({
-    message: t(
-      'Group {0} has {1} values: two are the least for a mean with a spread',
-      text('label') ?? '?',
-      number('n') ?? 0,
-    ),
-    fix: t(
-      'Check that its rows were read and not left out; one value is enough only with known standard deviations.',
-    ),
-  }),
+  'values-too-few': ({ t, text, number }) =>
+    text('what') === 'pairs'
+      ? {
+          message: t(
+            'There are {0} complete pairs: two are the least for a difference with a spread',
+            number('n') ?? 0,
+          ),
+          fix: t('Check that the ids of the pair column are written alike in both groups.'),
+        }
+      : {
+          message: t(
+            'Group {0} has {1} usable values ({2} missing, {3} left out): two are the least for a mean with a spread',
+            text('label') ?? '?',
+            number('n') ?? 0,
+            number('missing') ?? 0,
+            number('leftOut') ?? 0,
+          ),
+          fix: t(
+            'Check the rows of this group; one value is enough only with known standard deviations (--variance known).',
+          ),
+        },
   'values-all-equal': ({ t, text }) => ({
     message:
       text('value') === null
@@ -20,19 +32,19 @@ export const computingProblems = {
     fix: t('Check that the right column was chosen and at what resolution it was recorded.'),
   }),
   'summary-invalid': ({ t, text }) => ({
-    message:
-      text('label') === null
-        ? t('A summary does not make sense')
-        : t('The summary of {0} does not make sense', text('label') ?? ''),
-    fix: t(
-      'n is a whole number of at least 2, the SD not below 0; for counts, x is a whole number from 0 to n.',
-    ),
+    message: summaryFault(text('what'), text('label') ?? '?', t),
+    fix: t('n is a whole number above 0, the SD not below 0; for counts, x is a whole number from 0 to n.'),
   }),
   'block-not-readable': ({ t, text }) => ({
     message:
-      text('reason') === null
+      text('expected') === null
         ? t('The settings block cannot be read')
-        : t('The settings block cannot be read: {0}', text('reason') ?? ''),
+        : t(
+            'The settings block cannot be read: {0}expected {1}, found {2}',
+            text('key') === null ? '' : `${text('key') ?? ''}: `,
+            text('expected') ?? '',
+            text('found') ?? t('nothing'),
+          ),
     fix: t('Mend the line, or copy the block anew from the comparison.'),
   }),
   'block-newer-format': ({ t, text }) => ({
@@ -43,11 +55,36 @@ export const computingProblems = {
     fix: t('Use a newer version of Weighbeam to recheck it.'),
   }),
   'left-out-row-gone': ({ t, number, text }) => ({
-    message: t(
-      'The row left out on line {0} ({1}) is not in the file any more, or no longer the only one of its kind',
-      number('line') ?? '?',
-      text('value') ?? '?',
-    ),
+    message:
+      (number('found') ?? 0) > 1
+        ? t(
+            'The row left out on line {0} ({1}) now stands {2} times in the file',
+            number('line') ?? '?',
+            text('value') ?? '?',
+            number('found') ?? 0,
+          )
+        : t(
+            'The row left out on line {0} ({1}) is not in the file any more',
+            number('line') ?? '?',
+            text('value') ?? '?',
+          ),
     fix: t('Look up the row, then leave out the right one in a new comparison.'),
   }),
 } as const satisfies Record<string, SayProblem>;
+
+function summaryFault(what: string | null, label: string, t: Say): string {
+  switch (what) {
+    case 'n':
+      return t('The summary of {0} has no usable n', label);
+    case 'x':
+      return t('The summary of {0} has no usable count x', label);
+    case 'mean':
+      return t('The summary of {0} has no usable mean', label);
+    case 'sd':
+      return t('The summary of {0} has no usable SD', label);
+    case 'repeated':
+      return t('There is more than one summary of {0}', label);
+    default:
+      return t('The summaries are partly of means and partly of counts');
+  }
+}

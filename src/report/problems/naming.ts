@@ -81,24 +81,23 @@ export const namingProblems = {
     ),
     fix: t('Declare outcomes the same (--same "FROM -> TO"), or name the one that is counted (--success).'),
   }),
-  'units-disagree': ({ t, text, list }) => ({
+  'units-disagree': ({ t, text }) => ({
     message: t(
-      'Unit {0} stands in more than one group{1}',
+      'The readings of {0} {1} disagree: some are the counted outcome and some are not',
+      text('column') ?? t('unit'),
       text('unit') ?? '',
-      list('labels') === null ? '' : `: ${list('labels') ?? ''}`,
     ),
-    fix: t(
-      'A unit that got both treatments makes a pair (--pair). If ids start again in each group, say so: --pair none.',
-    ),
+    fix: t('A unit has one outcome: correct the file, or compare rows one by one (--per none).'),
   }),
-  'pairs-repeated': ({ t, text, number }) => ({
+  'pairs-repeated': ({ t, text, list }) => ({
     message: t(
-      'The id {0} occurs more than once in a group{1}',
+      'The id {0} stands more than once in {1}{2}',
       text('id') ?? '',
-      number('count') === null ? '' : ` (${String(number('count'))})`,
+      text('label') ?? t('a group'),
+      list('lines') === null ? '' : `, ${t('on lines {0}', list('lines') ?? '')}`,
     ),
     fix: t(
-      'Each id may have one value in each group: average the readings first, or name the unit column (--per).',
+      'A pair has one value in each group: average the readings of an id first, or take another pair column.',
     ),
   }),
   'pairs-none': ({ t, text }) => ({

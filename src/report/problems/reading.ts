@@ -37,17 +37,21 @@ export const readingProblems = {
   }),
   'decimal-undecidable': ({ t, text }) => ({
     message: t(
-      'The values read equally well with a decimal comma and with a decimal point{0}',
-      text('example') === null ? '' : ` (${text('example') ?? ''})`,
+      '{0} can be read as {1} and as {2}, and nothing in the file says which',
+      text('text') ?? '1,234',
+      text('asDecimal') ?? '1.234',
+      text('asThousands') ?? '1234',
     ),
-    fix: t('Say which it is: --decimal , or --decimal .'),
+    fix: t('Say which mark parts the decimals: --decimal , or --decimal .'),
   }),
-  'layouts-equal': ({ t, list }) => ({
+  'layouts-equal': ({ t, names }) => ({
     message: t(
-      'Two ways of cutting the lines into cells fit equally well{0}',
-      list('delimiters') === null ? '' : `: ${list('delimiters') ?? ''}`,
+      'The lines can be cut into cells equally well by {0}',
+      names('delimiters')
+        .map(mark => (mark === '\t' ? t('tab') : mark))
+        .join(t(' and by ')),
     ),
-    fix: t('Name the delimiter (--delimiter), and the header’s line if needed (--header).'),
+    fix: t('Name the delimiter: --delimiter.'),
   }),
   'header-not-found': ({ t, text }) => ({
     message:

@@ -8,6 +8,8 @@ export interface Told {
   readonly number: (name: string) => number | null;
   /** Names joined by commas, the first 20 of them. */
   readonly list: (name: string) => string | null;
+  /** The names as they are. */
+  readonly names: (name: string) => readonly string[];
 }
 
 /** What happened, and what to do. */
@@ -25,12 +27,16 @@ export function toldBy(facts: Facts, t: Say): Told {
     t,
     text: name => {
       const fact = facts[name];
-      if (typeof fact === 'string') return showLabel(fact);
+      if (typeof fact === 'string') return fact === '' ? null : showLabel(fact);
       return typeof fact === 'number' ? String(fact) : null;
     },
     number: name => {
       const fact = facts[name];
       return typeof fact === 'number' ? fact : null;
+    },
+    names: name => {
+      const fact = facts[name];
+      return Array.isArray(fact) ? fact.map(String) : [];
     },
     list: name => {
       const fact = facts[name];

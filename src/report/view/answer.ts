@@ -4,7 +4,7 @@ import { cautionsFor, quietCaution } from '../cautions';
 import { printDf, printThree, sayP } from '../numbersPrinted';
 import { shareWords } from '../words/count';
 import { differenceName, groupLabel } from '../words/groupLabels';
-import { assumptionPhrase, methodOf, reasonWords } from '../words/methodWords';
+import { assumptionPhrase, reasonWords, statisticName } from '../words/methodWords';
 import { noteWords } from '../words/noteWords';
 import { outcomeOf } from '../words/measuredName';
 import type { Scale } from '../words/scale';
@@ -46,7 +46,7 @@ export function answerOf(comparison: Comparison, questionInWords: string, scale:
 export function statisticOf({ chosen }: Comparison, t: Say): string | null {
   const result = chosen.result;
   if (result === null || result.statistic === null) return null;
-  const name = methodOf(chosen.id).statistic;
+  const name = statisticName(chosen.id, t);
   const value = printThree(result.statistic);
   if (result.df === null) return t('{0} {1} on the normal curve', name, value);
   if (typeof result.df === 'number')

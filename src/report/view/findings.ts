@@ -70,9 +70,7 @@ function quietSentence(comparison: Comparison, t: Say): string {
 
 /** The sentence of a finding, in the words of the check that found it. */
 export function findingSentence(finding: Finding, t: Say): string {
-  const check = evidenceById(finding.id);
-  if (check === undefined) throw new RangeError(`no check ${finding.id}`);
-  return check.say(finding, withFacts(t));
+  return evidenceById(finding.id)?.say(finding, withFacts(t)) ?? finding.id;
 }
 
 /** Evidence on an assumption: what was looked at, its statistic and p, and what the check says of it. */

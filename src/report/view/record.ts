@@ -1,9 +1,10 @@
+import { methodById } from '../../core/methods/index';
 import type { Comparison, Row } from '../../core/model/comparison';
 import type { Say } from '../../core/model/say';
 import { fullDf, fullText } from '../numbersPrinted';
 import { visible } from '../words/label';
-import { methodOf } from '../words/methodWords';
-import { recordIdOf } from '../words/recordId';
+import { statisticName } from '../words/methodWords';
+import { recordIdOf, recordKeyOf } from '../words/recordKeys';
 import type { ViewContext } from './context';
 import { choiceRows, designRows, exclusionRows } from './recordChoices';
 import { dataParts } from './recordData';
@@ -36,6 +37,7 @@ function identity({ t, provenance, blockText }: ViewContext): RecordPart {
     heading: t('Identity'),
     rows: [
       [t('record id'), recordIdOf(blockText) ?? t('none')],
+      [t('written'), recordKeyOf(blockText, 'written') ?? t('not yet')],
       [t('replaces'), provenance.replaces ?? t('none')],
       [t('plan'), provenance.plan ?? t('none')],
       [t('question in words'), statedOr(provenance.questionInWords, t)],
@@ -78,7 +80,7 @@ function rowPart(row: Row, { chosen }: Comparison, t: Say): RecordPart {
       ...filled([
         [t('difference'), result?.estimate ?? null],
         [t('standard error'), result?.se ?? null],
-        [methodOf(row.id).statistic, result?.statistic ?? null],
+        [statisticName(row.id, t), result?.statistic ?? null],
       ]),
       ...(result === null || result.df === null
         ? []
@@ -124,13 +126,15 @@ function evidencePart({ evidence }: Comparison, t: Say): RecordPart {
 }
 
 function computation({ chosen }: Comparison, { t, version, provenance }: ViewContext): RecordPart {
-  const method = methodOf(chosen.id);
+  const method = methodById(chosen.id);
   return {
     heading: t('Computation'),
     rows: [
       [t('computed by'), t('Weighbeam {0}', version)],
-      [t('method'), t('{0}, version {1}', method.id, method.version)],
-      ...method.references.map((reference, index) => [index === 0 ? t('sources') : '', reference] as const),
+      [t('method'), t('{0}, version {1}', chosen.id, method?.version ?? 0)],
+      ...(method?.references ?? []).map(
+        (reference, index) => [index === 0 ? t('sources') : '', reference] as const,
+      ),
       [t('results looked at before this one'), String(provenance.looks)],
     ],
   };

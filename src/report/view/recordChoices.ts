@@ -3,7 +3,7 @@ import type { Say } from '../../core/model/say';
 import type { Layout, Relation, Settings } from '../../core/model/settings';
 import { differenceName } from '../words/groupLabels';
 import { showLabel, visible } from '../words/label';
-import { methodOf } from '../words/methodWords';
+import { methodAssumes } from '../words/methodWords';
 import type { ViewContext } from './context';
 import { changedSentences } from './changed';
 import type { RecordPart } from './shown';
@@ -87,7 +87,7 @@ export function choiceRows(comparison: Comparison, { t, provenance }: ViewContex
   );
   return [
     [t('measure'), settings.measure],
-    [t('method'), t('{0}: {1}', settings.method, methodOf(settings.method).assumes(t))],
+    [t('method'), t('{0}: {1}', settings.method, methodAssumes(settings.method, t))],
     [t('question'), settings.question],
     [t('confidence'), String(settings.confidence)],
     [t('held against'), String(settings.against)],

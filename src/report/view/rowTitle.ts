@@ -1,13 +1,13 @@
 import type { Comparison, Row } from '../../core/model/comparison';
 import type { Say } from '../../core/model/say';
-import { methodOf } from '../words/methodWords';
+import { methodTitle } from '../words/methodWords';
 
 const LEFT_OUT = 'without left-out';
 
 /** The short name of a row: its method, the treatment of its data where that is not the chosen one, or both. */
 export function rowTitle(row: Row, comparison: Comparison, t: Say): string {
   const { chosen } = comparison;
-  const method = methodOf(row.id).title(t);
+  const method = methodTitle(row.id, t);
   if (row.data === chosen.data) return method;
   const data = dataWords(row.data, comparison, t);
   return row.id === chosen.id ? data : `${method}, ${data}`;

@@ -1,7 +1,7 @@
 import type { Comparison, Row } from '../../core/model/comparison';
 import type { Say } from '../../core/model/say';
 import { decisionWords } from '../words/decisionWords';
-import { methodOf, reasonWords } from '../words/methodWords';
+import { methodAssumes, reasonWords, usuallyCounted } from '../words/methodWords';
 import type { Scale } from '../words/scale';
 import { rulesOf } from './rules';
 import { putsBack, rowTitle } from './rowTitle';
@@ -57,15 +57,14 @@ export function whatIfOf(comparison: Comparison, scale: Scale, t: Say): WhatIfSh
 function isBound(row: Row, chosen: Row): boolean {
   const estimate = row.result?.estimate ?? null;
   const same = estimate !== null && row.data === chosen.data && estimate === chosen.result?.estimate;
-  return same && row.applies && !methodOf(row.id).counted;
+  return same && row.applies && !usuallyCounted(row.id);
 }
 
 /** Counted on other data, but something speaks against it on these. */
-const isDoubted = (row: Row): boolean => row.reason !== null && methodOf(row.id).counted;
+const isDoubted = (row: Row): boolean => row.reason !== null && usuallyCounted(row.id);
 
 function rowOf(row: Row, comparison: Comparison, scale: Scale, t: Say): RowShown {
   const { chosen } = comparison;
-  const method = methodOf(row.id);
   const isChosen = isSame(row, chosen);
   const { result } = row;
   const hasInterval = result !== null && (result.lower !== null || result.upper !== null);
@@ -79,7 +78,8 @@ function rowOf(row: Row, comparison: Comparison, scale: Scale, t: Say): RowShown
     interval: scale.interval(result),
     decision: row.decision === null || (!row.counted && !isChosen) ? '' : decisionWords(row.decision, t),
     note:
-      reasonWords(row, t) ?? (putsBack(row, comparison) ? t('what was left out counts') : method.assumes(t)),
+      reasonWords(row, t) ??
+      (putsBack(row, comparison) ? t('what was left out counts') : methodAssumes(row.id, t)),
     bar: hasInterval ? { estimate: result.estimate, lower: result.lower, upper: result.upper } : null,
   };
 }

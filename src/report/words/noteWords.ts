@@ -1,5 +1,5 @@
 import type { Reason, Say } from '../../core/model/say';
-import { methodOf } from './methodWords';
+import { methodTitle } from './methodWords';
 import { withFacts } from './withFacts';
 
 /** What was decided for the person, or met on the way, in one sentence. */
@@ -32,7 +32,7 @@ export function noteWords({ code, facts }: Reason, words: Say): string {
     case 'curve-resolved':
       return t(
         'Both groups have more than 30 values: by the rule asked for, the normal curve is used ({0}).',
-        methodOf(text('method')).title(words),
+        methodTitle(text('method'), words),
       );
     case 'confidence-low':
       return t('A confidence of {0} is unusually low.', Number(facts['confidence']));
