@@ -1,5 +1,7 @@
+import type { Numbers } from '../core/model/cells';
 import type { GroupNumbers } from '../core/model/comparison';
 import type { Group } from '../core/model/groups';
+import { keysOf, valueAt } from '../core/numeric/numbers';
 import { quantileSorted } from '../core/numeric/quantile';
 
 /**
@@ -11,7 +13,7 @@ export function groupNumbers(group: Group, sorting: boolean): GroupNumbers {
   const { sample } = group;
   if (sample === null || sample.n === 0)
     return { se, median: null, q1: null, q3: null, min: null, max: null };
-  if (!sorting) return { se, median: null, q1: null, q3: null, ...rangeOf(sample.values()) };
+  if (!sorting) return { se, median: null, q1: null, q3: null, ...rangeOf(sample.numbers) };
   const sorted = sample.sorted();
   return {
     se,
@@ -23,12 +25,15 @@ export function groupNumbers(group: Group, sorting: boolean): GroupNumbers {
   };
 }
 
-function rangeOf(values: Float64Array): { readonly min: number; readonly max: number } {
-  let min = Infinity;
-  let max = -Infinity;
-  for (const value of values) {
-    if (value < min) min = value;
-    if (value > max) max = value;
+/** Found on the exact order of the values, so that only two of them need to become doubles. */
+function rangeOf(numbers: Numbers): { readonly min: number; readonly max: number } {
+  const keys = keysOf(numbers);
+  let lowest = 0;
+  let highest = 0;
+  for (let i = 1; i < keys.length; i += 1) {
+    const key = keys[i] ?? 0;
+    if (key < (keys[lowest] ?? 0)) lowest = i;
+    else if (key > (keys[highest] ?? 0)) highest = i;
   }
-  return { min, max };
+  return { min: valueAt(numbers, lowest), max: valueAt(numbers, highest) };
 }

@@ -3,6 +3,7 @@ import type { Reason } from '../core/model/say';
 import type { Settings } from '../core/model/settings';
 import type { Prepared } from './prepared';
 import type { Request } from './request';
+import { countEntries, Entry } from './selection';
 import { outcomesUsed } from './successAsked';
 
 /** What `settle` decided because nothing was said, as far as the person should know. */
@@ -39,7 +40,7 @@ export function notesOf(
     settings.confidence < 0.5 ? { code: 'confidence-low', facts: { confidence: settings.confidence } } : null,
     counted('rows-without-label', selection?.withoutLabel ?? 0),
     settings.layout.kind === 'long' ? counted('groups-not-compared', selection?.otherLabels ?? 0) : null,
-    counted('rows-without-id', selection?.state.reduce((sum, state) => sum + Number(state === 3), 0) ?? 0),
+    counted('rows-without-id', selection === null ? 0 : countEntries(selection, null, Entry.NoId)),
     ...(table === null || settings.layout.kind === 'summary' ? [] : outcomeNotes(table, settings)),
   ];
   return notes.filter(note => note !== null);

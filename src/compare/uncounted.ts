@@ -1,6 +1,6 @@
 import type { Layout } from '../core/model/settings';
 import type { Uncounted } from './groupOf';
-import { Entry, type Selection } from './selection';
+import { countEntries, Entry, type Selection } from './selection';
 
 /**
  * Missing and left-out values of each group. With one column a group the empty cells below a column's last value are not
@@ -8,19 +8,18 @@ import { Entry, type Selection } from './selection';
  */
 export function uncounted(selection: Selection, layout: Layout): readonly Uncounted[] {
   return selection.groups.map((_, group) => {
-    let missing = 0;
-    let trailing = 0;
-    let leftOut = 0;
-    selection.state.forEach((state, at) => {
-      if (selection.group[at] !== group) return;
-      if (state === Entry.LeftOut) leftOut += 1;
-      if (state === Entry.Missing) {
-        missing += 1;
-        trailing += 1;
-      } else {
-        trailing = 0;
-      }
-    });
-    return { missing: layout.kind === 'wide' ? missing - trailing : missing, leftOut };
+    const missing = countEntries(selection, group, Entry.Missing);
+    const trailing = layout.kind === 'wide' && missing > 0 ? trailingMissing(selection, group) : 0;
+    return { missing: missing - trailing, leftOut: countEntries(selection, group, Entry.LeftOut) };
   });
+}
+
+function trailingMissing({ group: groupOf, state }: Selection, group: number): number {
+  let trailing = 0;
+  for (let at = state.length - 1; at >= 0; at -= 1) {
+    if (groupOf[at] !== group) continue;
+    if (state[at] !== Entry.Missing) break;
+    trailing += 1;
+  }
+  return trailing;
 }

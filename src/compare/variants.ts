@@ -21,7 +21,7 @@ export function variantsOf(
   selection: Selection | null,
 ): { readonly data: string; readonly beside: readonly Variant[] } {
   if (table === null || selection === null) return { data: 'all', beside: [] };
-  const rows = leftOutWithValue(selection);
+  const rows = settings.leftOut.length === 0 ? new Set<number>() : leftOutWithValue(selection);
   const leftOut = settings.leftOut.filter(({ file, line }) => !rows.has(table.rowAt(file, line)));
   const censored = hasBelow(selection);
   const { below } = settings.reading;

@@ -76,7 +76,9 @@ function fromMedian({ numbers }: Sample): Float64Array {
   if (numbers.form === 'steps' || numbers.exact === null) {
     const values = numbers.form === 'steps' ? numbers.steps : numbers.offsets;
     const [low, high] = middlePair(values.slice().sort());
-    return Float64Array.from(values, value => Math.abs(2 * value - (low + high)));
+    const distances = new Float64Array(values.length);
+    for (let i = 0; i < values.length; i += 1) distances[i] = Math.abs(2 * (values[i] ?? 0) - (low + high));
+    return distances;
   }
   const [low, high] = middlePair([...numbers.exact].sort((a, b) => (a < b ? -1 : Number(a > b))));
   const unit = 10n ** BigInt(numbers.decimals) * numbers.per;
