@@ -25,6 +25,7 @@ export interface CellText {
 }
 
 const CENSORED = /^([<>\u2264\u2265])=?\s*(.*)$/s;
+const MAY_BE_NUMBER = /^[0-9+\-\u2212.,iI\u221e]/;
 const INFINITE = /^[+\-\u2212]?(inf|infinity|\u221e)$/i;
 const SMALLEST = 2.2250738585072014e-308; // below it doubles lose digits
 
@@ -49,6 +50,7 @@ export function readCellText(written: string, format: CellFormat): CellText {
 }
 
 function readNumber(text: string, format: CellFormat): CellText {
+  if (!MAY_BE_NUMBER.test(text)) return plain(Cell.Text);
   const value = parseDecimal(text, format.decimal);
   if (value !== null) return plain(isUsable(value) ? Cell.Value : UNUSABLE, value);
   if (INFINITE.test(text)) return plain(UNUSABLE);

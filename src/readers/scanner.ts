@@ -41,6 +41,8 @@ export class Scanner {
   /** How many cells of a quoted record that is not all there yet have gone to their sinks; −1: none is under way. */
   private underway = -1;
   private readonly delimiter: number;
+  /** No byte above it ends a cell. */
+  private readonly highest: number;
   private readonly decoder = new TextDecoder('utf-8', { ignoreBOM: true });
   private readonly encoder = new TextEncoder();
 
@@ -52,6 +54,7 @@ export class Scanner {
     private readonly met: Met,
   ) {
     this.delimiter = shape.delimiter.charCodeAt(0);
+    this.highest = Math.max(this.delimiter, CR);
   }
 
   /** How many lines the file has; known at the end. */
@@ -111,7 +114,7 @@ export class Scanner {
 
   /** Takes the record that starts here; gives the start of the next one, or −1 when its end is not there yet. */
   private record(start: number, to: number): number {
-    const { buffer, delimiter, sinks, line } = this;
+    const { buffer, delimiter, highest, sinks, line } = this;
     const width = this.shape.width;
     const first = buffer[start] as number;
     if (first <= SPACE || first === delimiter || first === HASH) {
@@ -134,7 +137,8 @@ export class Scanner {
         if (sink !== null) sink.take(buffer, cell + 1, at, line);
         byte = buffer[++at] as number;
       } else {
-        while (byte !== delimiter && byte !== LF && byte !== CR) byte = buffer[++at] as number;
+        while (byte > highest || (byte !== delimiter && byte !== LF && byte !== CR))
+          byte = buffer[++at] as number;
         if (sink !== null) sink.take(buffer, cell, at, line);
       }
       field++;

@@ -8,6 +8,8 @@ import { PlainNumber } from './numberCell';
 export const MOST_DISTINCT = 1000;
 const LABELS_NAMED = 50;
 const NEARLY = 0.9;
+const MISSING = 'missing';
+const TEXT = 'text';
 
 /** What a column holds, without its values. */
 export interface ColumnSurvey {
@@ -33,14 +35,16 @@ export class SurveySink implements CellSink {
   private readonly number = new PlainNumber();
   private readonly decoder = new TextDecoder();
   private readonly levels = new Levels();
-  private readonly counts = new Int32Array(LABELS_NAMED + 1);
+  /** By level. */
+  private readonly counts = new Int32Array(MOST_DISTINCT + 2);
+  private readonly known: (number | typeof MISSING | typeof TEXT | undefined)[] = [];
   private readonly mark: number;
   private values = 0;
   private missing = 0;
   private texts = 0;
   private min = Infinity;
   private max = -Infinity;
-  /** Filled cells up to the one that was the last different one counted. */
+  /** Filled cells while different ones were counted. */
   private counted = 0;
 
   constructor(private readonly format: CellFormat) {
@@ -50,11 +54,20 @@ export class SurveySink implements CellSink {
   take(bytes: Uint8Array, start: number, end: number): void {
     if (this.number.read(bytes, start, end, this.mark)) {
       this.value(this.number.mantissa / 10 ** this.number.decimals);
-    } else if (!this.takeText(this.decoder.decode(bytes.subarray(start, end)))) return;
-    if (this.levels.size > MOST_DISTINCT) return;
-    const level = this.levels.codeOf(bytes, start, end);
-    this.counted++;
-    if (level <= LABELS_NAMED) this.counts[level] = (this.counts[level] ?? 0) + 1;
+      if (this.levels.size <= MOST_DISTINCT) this.count(this.levels.codeOf(bytes, start, end));
+      return;
+    }
+    const level = this.levels.size <= MOST_DISTINCT ? this.levels.codeOf(bytes, start, end) : 0;
+    const known = level > 0 ? this.known[level] : undefined;
+    const found = known ?? this.classOf(bytes, start, end);
+    if (level > 0) this.known[level] = found;
+    if (found === MISSING) {
+      this.missing++;
+      return;
+    }
+    if (found === TEXT) this.texts++;
+    else this.value(found);
+    if (level > 0) this.count(level);
   }
 
   absent(): void {
@@ -63,28 +76,33 @@ export class SurveySink implements CellSink {
 
   result(): ColumnSurvey {
     const { values, missing, texts } = this;
-    const distinct = this.levels.size - 1;
-    const labels = this.levels.texts().slice(1, LABELS_NAMED + 1);
+    const filled = this.levels.texts().flatMap((label, level) => {
+      const count = this.counts[level] ?? 0;
+      return count > 0 ? [{ label, count }] : []; // words for a missing value stand among the levels
+    });
+    const distinct = filled.length;
     return {
       kind: values > 0 ? (texts > 0 ? 'mixed' : 'number') : texts > 0 ? 'label' : 'empty',
       values,
       missing,
       texts,
       distinct,
-      labels: labels.map((label, i) => ({ label, count: this.counts[i + 1] ?? 0 })),
+      labels: filled.slice(0, LABELS_NAMED),
       min: values > 0 ? this.min : null,
       max: values > 0 ? this.max : null,
       nearlyUnique: distinct > 1 && distinct >= NEARLY * this.counted,
     };
   }
 
-  /** @returns whether the cell is filled */
-  private takeText(text: string): boolean {
-    const { kind, value } = readCellText(text, this.format);
-    if (kind === Cell.Missing) this.missing++;
-    else if (kind === Cell.Text || kind === UNUSABLE || value === null) this.texts++;
-    else this.value(nearestDouble(value));
-    return kind !== Cell.Missing;
+  private classOf(bytes: Uint8Array, start: number, end: number): number | typeof MISSING | typeof TEXT {
+    const { kind, value } = readCellText(this.decoder.decode(bytes.subarray(start, end)), this.format);
+    if (kind === Cell.Missing) return MISSING;
+    return kind === Cell.Text || kind === UNUSABLE || value === null ? TEXT : nearestDouble(value);
+  }
+
+  private count(level: number): void {
+    this.counts[level] = (this.counts[level] ?? 0) + 1;
+    this.counted++;
   }
 
   private value(value: number): void {

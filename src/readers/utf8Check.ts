@@ -64,7 +64,8 @@ function plainUntil(bytes: Uint8Array, at: number): number {
     place++;
   }
   const words = new Int32Array(bytes.buffer, bytes.byteOffset + place, (bytes.length - place) >> 2);
-  for (const word of words) {
+  for (let i = 0; i < words.length; i++) {
+    const word = words[i] as number;
     // the first term is set by a byte above 0x7F, the second by a zero byte
     if (((word | ((word - 0x01010101) & ~word)) & 0x80808080) !== 0) break;
     place += 4;

@@ -1,4 +1,14 @@
+import type { Numbers } from '../model/cells';
 import type { Steps } from './steps';
+
+/** Σ (value − shift), exactly, in units of 1 / (10^decimals · per); null for computed doubles. */
+export function exactSumOfOffsets(numbers: Numbers): bigint | null {
+  if (numbers.form === 'steps') return exactSum(numbers.steps);
+  if (numbers.exact === null) return null;
+  let total = 0n;
+  for (const integer of numbers.exact) total += integer;
+  return total - numbers.shift * BigInt(numbers.exact.length);
+}
 
 /**
  * Σ x[i], exactly, for whole numbers below 2^53 in size. Doubles add whole numbers without error while the sum stays
@@ -59,8 +69,10 @@ function productsOfInt32(x: Int32Array, lag: number): bigint {
     for (let i = start; i < end; i++) {
       const a = x[i] as number;
       const b = x[i + lag] as number;
-      const [aHigh, aLow] = [a >> 16, a & 0xffff];
-      const [bHigh, bLow] = [b >> 16, b & 0xffff];
+      const aHigh = a >> 16;
+      const aLow = a & 0xffff;
+      const bHigh = b >> 16;
+      const bLow = b & 0xffff;
       high += aHigh * bHigh;
       middle += aHigh * bLow + aLow * bHigh;
       low += aLow * bLow;

@@ -1,7 +1,7 @@
 import type { Numbers } from '../model/cells';
 import { decimalText } from './decimal';
 import { numbersFromIntegers } from './fromIntegers';
-import { fractionOf, quotient } from './quotient';
+import { quotient } from './quotient';
 import { EXACT_POWERS, LARGEST_STEP, scaleOf, type Steps } from './steps';
 
 /** How many values there are. */
@@ -138,13 +138,6 @@ export const equalAt = (a: Numbers, i: number, b: Numbers, j: number): boolean =
 
 /** Keys that stand in the order of the exact values and are equal exactly where those are, across lists of one frame. */
 export const keysOf = (numbers: Numbers): Steps => (numbers.form === 'steps' ? numbers.steps : numbers.order);
-
-/** The double nearest to shift / (10^decimals · per) + offset, rounded once. */
-export function shiftedBack(numbers: Numbers, offset: number): number {
-  const scale = scaleOf(numbers.decimals, numbers.per);
-  const { numerator, denominator } = fractionOf(offset);
-  return quotient(numbers.shift * denominator + numerator * scale, scale * denominator);
-}
 
 function isSameFrame(a: Numbers, b: Numbers): boolean {
   if (

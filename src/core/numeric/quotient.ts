@@ -19,14 +19,3 @@ export function quotient(numerator: bigint, denominator: bigint): number {
   const half = Math.trunc(shift / 2); // 2^-shift alone may leave the range of doubles
   return Number(sticky) * 2 ** -half * 2 ** (half - shift);
 }
-
-/** A finite double as the fraction it is: numerator / denominator, the latter a power of two. */
-export function fractionOf(x: number): { readonly numerator: bigint; readonly denominator: bigint } {
-  let whole = x;
-  let bits = 0n;
-  while (!Number.isInteger(whole)) {
-    whole *= 2;
-    bits += 1n;
-  }
-  return { numerator: BigInt(whole), denominator: 1n << bits };
-}
