@@ -6,15 +6,15 @@ import { decimalText } from '../../src/core/numeric/decimal';
 import { alignFrames } from '../../src/core/numeric/numbers';
 import { NumbersBuilder } from '../../src/core/numeric/numbersBuilder';
 import { pairedDifferences } from '../../src/core/numeric/pairedDifferences';
-import { fractionOf } from '../../src/core/numeric/quotient';
 import { makeSample } from '../../src/core/numeric/sample';
 import { groupOf } from '../../src/compare/groupOf';
 
 /** All digits of a double: the decimal that it is exactly. */
 export function exactDecimal(x: number): string {
-  const { numerator, denominator } = fractionOf(x);
-  const bits = denominator.toString(2).length - 1;
-  return decimalText(numerator * 5n ** BigInt(bits), bits);
+  let whole = x;
+  let bits = 0;
+  for (; !Number.isInteger(whole); whole *= 2) bits += 1;
+  return decimalText(BigInt(whole) * 5n ** BigInt(bits), bits);
 }
 
 export function numbersOf(texts: readonly string[]): Numbers {
