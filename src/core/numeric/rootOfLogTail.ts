@@ -1,5 +1,6 @@
 const MOST_STEPS = 200;
 const CLOSE = 4e-16;
+const FARTHEST = 20;
 
 /**
  * The x > 0 at which a decreasing upper tail equals p ≤ ½: Newton steps on ln x for the log of the tail, kept inside a
@@ -22,7 +23,7 @@ export function rootOfLogTail(
     else high = x;
     const slope = (x * density(x)) / tail;
     const move = Math.log(tail / p) / slope;
-    const next = x * Math.exp(Math.max(-2, Math.min(2, move)));
+    const next = x * Math.exp(Math.max(-FARTHEST, Math.min(FARTHEST, move)));
     const inside = next > low && next < high && Number.isFinite(next);
     const settled = Math.abs(move) <= CLOSE || high - low <= CLOSE * x;
     if (settled) return inside ? next : x;
