@@ -2,6 +2,7 @@ import type { ColumnFacts } from './askContext';
 
 const MOST_LABELS = 50;
 const ID_NAME = /(^|[\s_.-])(id|ids|no|nr|num|number|index|idx|row|line|date|day|time|year|week)($|[\s_.-])/i;
+const OUTCOME = /^(yes|no|y|n|true|false|pass(ed)?|fail(ed)?|ok|nok|intact|broken)$/i;
 const REFERENCE_LABEL =
   /^(standard|control|reference|ref|baseline|before|blank|untreated|placebo|old|current|usual|none)\b/i;
 
@@ -32,6 +33,17 @@ export function looksLikeIds(column: ColumnFacts, rows: number): boolean {
   const span = column.min === null || column.max === null ? Infinity : column.max - column.min + 1;
   return span === column.distinct && (column.distinct === rows || column.distinct * 2 <= rows);
 }
+
+/** How a label is spelled but for capitals and spaces: what is spelled alike most often means the same. */
+export const spelling = (label: string): string => label.trim().replace(/\s+/g, ' ').toLowerCase();
+
+/** How many labels there are when those spelled alike count once. */
+export const groupsSpelled = (column: ColumnFacts): number =>
+  new Set(column.labels.map(({ label }) => spelling(label))).size;
+
+/** Yes and no, passed and failed: rather what came out than what was done. */
+export const saysOutcome = (column: ColumnFacts): boolean =>
+  column.labels.every(({ label }) => OUTCOME.test(label.trim()));
 
 /** Whether a label is one that usually names what is compared against. */
 export const soundsLikeReference = (label: string): boolean => REFERENCE_LABEL.test(label.trim());

@@ -27,6 +27,6 @@ export function groupLabels(context: AskContext): readonly GroupLabel[] {
   return [...merged].map(([label, rows]) => ({ label, rows }));
 }
 
-function mergedInto(label: string, request: Partial<Request>): string {
-  return request.same?.find(([from]) => from === label)?.[1] ?? label;
-}
+/** The group a label belongs to: its own, or the one it was declared the same as. */
+export const mergedInto = (label: string, request: Partial<Request>): string =>
+  request.same?.find(([from]) => from === label)?.[1] ?? label;

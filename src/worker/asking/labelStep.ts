@@ -1,4 +1,4 @@
-import { canBeLabels, looksLikeIds } from './columnRoles';
+import { canBeLabels, groupsSpelled, looksLikeIds, saysOutcome } from './columnRoles';
 import { choice, isAnswered, type AskContext, type Asker, type ColumnFacts } from './askContext';
 
 const SHOWN = 4;
@@ -38,7 +38,8 @@ function likelihood(column: ColumnFacts, context: AskContext): number {
   let score = 0;
   if (context.picked?.includes(column.name) === true) score += 8;
   if (column.kind === 'label') score += 4;
-  if (column.distinct === 2) score += 4;
+  if (groupsSpelled(column) === 2) score += 4;
+  if (saysOutcome(column)) score -= 3;
   if (looksLikeIds(column, context.rows)) score -= 4;
   return score - column.distinct / 100;
 }

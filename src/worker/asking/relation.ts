@@ -14,9 +14,18 @@ export interface IdFacts {
   readonly shared: number;
 }
 
-/** Counts rows by id and group; rows whose id or group is missing, or whose group is not compared, are passed over. */
-export function idFacts(groups: LabelColumn, ids: LabelColumn, compared: readonly string[]): IdFacts {
-  const wanted = groups.levels.map(level => compared.indexOf(level));
+/**
+ * Counts rows by id and group; rows whose id or group is missing, or whose group is not compared, are passed over.
+ * @param compared the groups by name
+ * @param named the name of the group that a label belongs to
+ */
+export function idFacts(
+  groups: LabelColumn,
+  ids: LabelColumn,
+  compared: readonly string[],
+  named: (label: string) => string = label => label,
+): IdFacts {
+  const wanted = groups.levels.map(level => compared.indexOf(named(level)));
   const width = Math.max(1, compared.length);
   const counts = new Int32Array(ids.levels.length * width);
   for (let row = 0; row < groups.codes.length; row++) {

@@ -1,4 +1,5 @@
 import { choice, isAnswered, type Asker } from './askContext';
+import { spelling } from './columnRoles';
 import { groupLabels, type GroupLabel } from './groupLabels';
 
 /** Whether labels that differ only in capitals or spaces mean the same group. */
@@ -34,7 +35,7 @@ function variants(groups: readonly GroupLabel[]): readonly (readonly [from: stri
   const known = new Map<string, string>();
   const found: [string, string][] = [];
   for (const { label } of byCount) {
-    const spelled = label.trim().replace(/\s+/g, ' ').toLowerCase();
+    const spelled = spelling(label);
     const to = known.get(spelled);
     if (to === undefined) known.set(spelled, label);
     else found.push([label, to]);

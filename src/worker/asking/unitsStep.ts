@@ -2,7 +2,7 @@ import type { LabelColumn } from '../../core/model/cells';
 import type { StepItem } from '../../protocol/asking';
 import { choice, isAnswered, type AskContext, type Asker } from './askContext';
 import { canBeIds, hasTwoOutcomes } from './columnRoles';
-import { groupLabels } from './groupLabels';
+import { groupLabels, mergedInto } from './groupLabels';
 import { idFacts, nestIds, type IdFacts } from './relation';
 
 interface Candidate {
@@ -16,24 +16,24 @@ export const unitsStep: Asker = context => {
   if (isAnswered(context, 'units', 'per', 'pair')) return null;
   const items: StepItem[] = [eachRow(context)];
   let guess = 0;
-  for (const candidate of candidates(context)) {
-    const { facts, column } = candidate;
+  for (const found of candidates(context)) {
+    const { facts } = found;
     if (facts.pairs) {
       guess ||= items.length;
-      items.push(pairItem(context, candidate));
+      items.push(pairItem(context, found));
       continue;
     }
     if (facts.most < 2) continue;
     if (facts.withinGroups) {
-      const inner = innerColumn(context, column);
+      const inner = innerColumn(context, found);
       if (inner !== null) {
         guess ||= items.length;
-        items.push(nestedItem(context, candidate, inner));
+        items.push(nestedItem(context, found, inner));
       }
       guess ||= items.length;
-      items.push(unitItem(context, candidate));
+      items.push(unitItem(context, found));
     } else {
-      items.push(restartingItem(context, candidate));
+      items.push(restartingItem(context, found));
     }
   }
   if (items.length === 1) return request.columns === undefined ? null : { plain: {} };
@@ -48,35 +48,35 @@ export const unitsStep: Asker = context => {
   );
 };
 
-/** Columns that could hold ids, with how their ids stand to the groups; only for one column of labels. */
+/** Columns that could hold ids, with how their ids stand to the groups; only where one column holds the labels. */
 function candidates(context: AskContext): readonly Candidate[] {
   const { request, columns } = context;
-  const label = request.label === undefined ? null : context.labelsOf(request.label);
-  if (label === null) return [];
-  const compared =
-    request.test === undefined || request.reference === undefined
-      ? groupLabels(context).map(group => group.label)
-      : [request.test, request.reference];
   const used = [...(request.measured ?? []), request.label];
   return columns
     .filter(column => canBeIds(column) && !hasTwoOutcomes(column) && !used.includes(column.name))
-    .flatMap(({ name }) => {
-      const column = context.labelsOf(name);
-      return column === null ? [] : [{ column, facts: idFacts(label, column, compared) }];
-    })
+    .flatMap(({ name }) => candidate(context, context.labelsOf(name)))
     .filter(({ facts }) => facts.ids >= 2);
 }
 
+function candidate(context: AskContext, column: LabelColumn | null): readonly Candidate[] {
+  const { request } = context;
+  const groups = request.label === undefined ? null : context.labelsOf(request.label);
+  if (groups === null || column === null) return [];
+  const { test, reference } = request;
+  const compared =
+    test === undefined || reference === undefined
+      ? groupLabels(context).map(({ label }) => label)
+      : [test, reference];
+  return [{ column, facts: idFacts(groups, column, compared, label => mergedInto(label, request)) }];
+}
+
 /** A second column under which readings come again within each id: a tile of a firing read several times. */
-function innerColumn(context: AskContext, outer: LabelColumn): LabelColumn | null {
-  const label = context.request.label === undefined ? null : context.labelsOf(context.request.label);
-  if (label === null) return null;
-  const compared = groupLabels(context).map(group => group.label);
-  for (const { column, facts } of candidates(context)) {
-    if (column.name === outer.name || facts.most < 2) continue;
-    const nested = idFacts(label, nestIds(outer, column), compared);
-    const alone = idFacts(label, outer, compared);
-    if (nested.most >= 2 && nested.ids > alone.ids) return column;
+function innerColumn(context: AskContext, outer: Candidate): LabelColumn | null {
+  for (const inner of candidates(context)) {
+    if (inner.column.name === outer.column.name || inner.facts.most < 2) continue;
+    const [nested] = candidate(context, nestIds(outer.column, inner.column));
+    if (nested !== undefined && nested.facts.most >= 2 && nested.facts.ids > outer.facts.ids)
+      return inner.column;
   }
   return null;
 }
@@ -86,45 +86,36 @@ const eachRow = ({ t, request }: AskContext): StepItem => ({
   description: '',
   detail:
     request.columns === undefined
-      ? t('Claims that every row received the treatment on its own')
-      : t('Claims that every value received the treatment on its own'),
+      ? t('Claims that every row received it on its own')
+      : t('Claims that every value received it on its own'),
   adds: { per: 'none' },
 });
 
 const unitItem = ({ t }: AskContext, { column, facts }: Candidate): StepItem => ({
   label: t('Each {0}', column.name),
   description: counted(t, facts),
-  detail: t(
-    'Claims that the rows of one {0} received it together: they are averaged and count once',
-    column.name,
-  ),
+  detail: t('Claims that the rows of one {0} received it together; they count once', column.name),
   adds: { per: [column.name] },
 });
 
 const nestedItem = ({ t }: AskContext, { column, facts }: Candidate, inner: LabelColumn): StepItem => ({
-  label: t('Each {0}, with several readings of each {1}', column.name, inner.name),
+  label: t('Each {0}, each {1} in it read several times', column.name, inner.name),
   description: counted(t, facts),
-  detail: t('Readings are averaged by {0} first, then by {1}; each {1} counts once', inner.name, column.name),
+  detail: t('Readings are averaged by {0}, then by {1}; each {1} counts once', inner.name, column.name),
   adds: { per: [column.name, inner.name] },
 });
 
 const restartingItem = ({ t }: AskContext, { column, facts }: Candidate): StepItem => ({
   label: t('Each {0} of each group', column.name),
   description: counted(t, facts),
-  detail: t(
-    'Claims that the numbering of {0} starts again in each group; rows of one id are averaged',
-    column.name,
-  ),
+  detail: t('Claims that {0} is numbered anew in each group; rows of one id count once', column.name),
   adds: { per: [column.name], pair: 'none' },
 });
 
 const pairItem = ({ t }: AskContext, { column, facts }: Candidate): StepItem => ({
   label: t('Pairs by {0}', column.name),
   description: t('{0} pairs', facts.ids),
-  detail: t(
-    'Claims that the two values of one {0} belong together: their differences are compared',
-    column.name,
-  ),
+  detail: t('Claims that the two values of one {0} belong together', column.name),
   adds: { pair: column.name },
 });
 

@@ -3,12 +3,10 @@ import type { Selected } from './selected';
 
 const NAMED = 4;
 
-/** What was taken, in a few words: "lines 2–41, 3 columns", "whole table, 72 rows, 6 columns". */
+/** What was taken, in a few words: "lines 2–41, 3 columns", "all 72 rows, 6 columns". */
 export function sayTaken(taken: Selected, fields: readonly string[], t: Say): string {
   const rows =
-    taken.rows === null
-      ? t('whole table, {0} rows', taken.rowCount)
-      : t('lines {0}', lineList(taken.rows, t));
+    taken.rows === null ? t('all {0} rows', taken.rowCount) : t('lines {0}', lineList(taken.rows, t));
   return `${rows}, ${columnWords(taken, fields, t)}`;
 }
 

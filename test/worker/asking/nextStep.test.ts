@@ -266,3 +266,12 @@ describe('one question put again', () => {
     ).toBeNull();
   });
 });
+
+describe('the question about the label column', () => {
+  it('rather takes what was done than what came out, and counts labels spelled alike once', () => {
+    const schedule = [...(firings['schedule'] ?? [])];
+    schedule[2] = 'Slow cool';
+    const cells = { ...firings, crazed: repeat(['no', 'yes', 'no'], 6), schedule };
+    expect(goThrough(about(cells)).request).toMatchObject({ label: 'schedule', test: 'slow cool' });
+  });
+});

@@ -106,12 +106,12 @@ describe('what was taken, in words', () => {
   const say = (...spans: TextSpan[]): string => sayTaken(taken(...spans), fields, sayFrom(null));
 
   it('names lines and counts columns', () => {
-    expect(say()).toBe('whole table, 5 rows, 3 columns');
+    expect(say()).toBe('all 5 rows, 3 columns');
     expect(say(span(3, 1, 4, 5))).toBe('lines 3–4, 3 columns');
   });
 
   it('names the columns where some were singled out', () => {
-    expect(say(span(2, 5, 2, 22))).toBe('whole table, 5 rows, columns schedule, hardness');
+    expect(say(span(2, 5, 2, 22))).toBe('all 5 rows, columns schedule, hardness');
     expect(say(span(3, 3, 3, 5), span(7, 3, 7, 5))).toBe('lines 3, 7, column schedule');
   });
 });
