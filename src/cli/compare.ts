@@ -1,6 +1,5 @@
 import { version } from '../../package.json';
 import { answer, type Answered } from '../compare/answer';
-import type { Request } from '../compare/request';
 import type { Provenance } from '../core/model/settings';
 import { figureSvg } from '../report/figure/figureSvg';
 import { htmlPage } from '../report/html';
@@ -12,6 +11,7 @@ import { blockFrom } from '../settings/block';
 import { printBlock } from '../settings/printBlock';
 import { provenanceOf, saidBy, wishOf } from './compareRequest';
 import { diskSource } from './diskSource';
+import { untied, withFlags } from './answerFlags';
 import { english } from './english';
 import { compareFlags, formats } from './compareFlags';
 import { createHasher } from './hasher';
@@ -39,20 +39,14 @@ export const compareHelp = (): string =>
     example,
   );
 
-async function requestOf(options: Options, names: readonly string[], cwd: string): Promise<Request> {
-  const said = saidBy(options, names);
-  const wish = wishOf(options);
-  const like = options.text('like');
-  return like === undefined
-    ? { files: names, wish, ...said }
-    : laidOver(await recipeOf(like, cwd), said, names, wish);
-}
-
 const viewWith = (
   { comparison, table, files }: Answered,
   provenance: Provenance,
   blockText: string | null,
 ): View => viewOf(comparison, { t: english, table, files, version, provenance, blockText });
+
+/** Stands for a block that is not printed; null where none could be made, so that the view says why. */
+const unprinted = ({ comparison }: Answered): string | null => (comparison.open.length === 0 ? '' : null);
 
 /** The answer in one format. A record is only made for the formats that hold one: its digests read every row again. */
 function writtenAs(
@@ -62,7 +56,10 @@ function writtenAs(
   written: string,
 ): string {
   if (format === 'json') return `${JSON.stringify(jsonReport(answered.comparison, english), null, 2)}\n`;
-  if (format === 'text') return textReport(viewWith(answered, provenance, null));
+  if (format === 'text')
+    return untied(
+      textReport(withFlags(viewWith(answered, provenance, unprinted(answered)), answered.comparison)),
+    );
   const block = printBlock(blockFrom(answered, provenance, { version, written, createHasher }));
   if (format === 'block') return block;
   const view = viewWith(answered, provenance, block);
@@ -73,15 +70,19 @@ async function compareFiles(options: Options, named: readonly NamedFile[], io: I
   const names = named.map(({ name }) => name);
   const format = options.choice('format', formats) ?? 'text';
   const sources = await Promise.all(named.map(({ file, name }) => diskSource(file, name)));
-  const provenance = provenanceOf(options);
-  const answered = await answer(sources, await requestOf(options, names, io.cwd), platform);
+  const like = options.text('like');
+  const recipe = like === undefined ? null : await recipeOf(like, io.cwd);
+  const [said, wish] = [saidBy(options, names), wishOf(options)];
+  const request =
+    recipe === null ? { files: names, wish, ...said } : laidOver(recipe.request, said, names, wish);
+  const provenance = provenanceOf(options, recipe?.purpose);
+  const answered = await answer(sources, request, platform);
   const written = writtenAs(format, answered, provenance, offsetTime(io.now()));
 
-  const like = options.text('like');
   const read = [...options.words, ...(like === undefined ? [] : [placeOf(like).note])];
   const figure = options.text('figure');
   if (figure !== undefined) {
-    const drawn = figureSvg(viewWith(answered, provenance, null));
+    const drawn = figureSvg(viewWith(answered, provenance, unprinted(answered)));
     await writeOut('figure', figure, drawn, { cwd: io.cwd, read, keepsRecords: false });
   }
   const out = options.text('out');

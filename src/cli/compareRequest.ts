@@ -1,6 +1,6 @@
 import type { Request } from '../compare/request';
 import type { LeftOut, OptionValue, Provenance } from '../core/model/settings';
-import type { ReadingWish } from '../readers/readingWish';
+import { MISSING_WORDS, type ReadingWish } from '../readers/readingWish';
 import { around, namesOf, numberOf, rangesOf, twoNumbersOf, wholeNumberOf } from './flagValues';
 import { declaredFlags } from './compareFlags';
 import type { Options } from './options';
@@ -51,8 +51,8 @@ export function wishOf(options: Options): ReadingWish {
     encoding: options.text('encoding'),
     delimiter: character,
     decimal: mark,
-    header: header === undefined ? undefined : wholeNumberOf('header', header, 1),
-    missing: missing.length === 0 ? undefined : missing,
+    header: header === undefined ? undefined : wholeNumberOf('header', header, 0),
+    missing: missing.length === 0 ? undefined : [...MISSING_WORDS, ...missing],
     below: options.choice('below', ['refuse', 'zero', 'half', 'limit']),
   });
 }
@@ -162,10 +162,10 @@ export function saidBy(options: Options, files: readonly string[]): Said {
   });
 }
 
-/** What the record shall say beside the numbers. */
-export function provenanceOf(options: Options): Provenance {
+/** What the record shall say beside the numbers; `purpose` is that of a recipe. */
+export function provenanceOf(options: Options, purpose = ''): Provenance {
   return {
-    questionInWords: options.text('purpose') ?? '',
+    questionInWords: options.text('purpose') ?? purpose,
     sampling: options.text('sampling') ?? '',
     analyst: options.text('analyst') ?? '',
     reasons: Object.fromEntries(

@@ -31,13 +31,12 @@ export function explainCommand(argv: readonly string[], io: Io): ExitCode {
   if (id === undefined || more.length > 0) {
     throw new UsageError('explain takes one id', 'Write weighbeam explain ID; weighbeam methods lists them.');
   }
-  if (!ids().includes(id)) {
+  const text = explainText(id, english);
+  if (text === null) {
     const meant = nearest(id, ids());
-    throw new UsageError(
-      `There is no method ${id}`,
-      meant === null ? 'See weighbeam methods.' : `Did you mean ${meant}?`,
-    );
+    const fix = meant === null ? 'See weighbeam methods.' : `Did you mean ${meant}?`;
+    throw new UsageError(`There is no method ${id}`, fix);
   }
-  io.write(explainText(id, english));
+  io.write(text);
   return Exit.Done;
 }

@@ -11,7 +11,12 @@ export const readingFlags: readonly Flag[] = [
     about: 'reading the file',
   },
   { name: 'decimal', value: 'C', says: 'the decimal mark: point or comma', about: 'reading the file' },
-  { name: 'header', value: 'N', says: 'the line that holds the column names', about: 'reading the file' },
+  {
+    name: 'header',
+    value: 'N',
+    says: 'the line that holds the column names; 0: none does',
+    about: 'reading the file',
+  },
   { name: 'encoding', value: 'E', says: 'as utf-8, windows-1252, utf-16le', about: 'reading the file' },
   {
     name: 'missing',

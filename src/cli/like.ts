@@ -14,11 +14,17 @@ export function placeOf(like: string): { readonly note: string; readonly line: n
   return found === null ? { note: like, line: null } : { note: found[1] ?? like, line: Number(found[2]) };
 }
 
+/** What a block says to do, and the question it was done for. */
+export interface Recipe {
+  readonly request: Request;
+  readonly purpose: string;
+}
+
 /**
- * The request of a block in a notebook. A notebook with several blocks needs the line. Throws a UsageError for a
+ * The recipe of a block in a notebook. A notebook with several blocks needs the line. Throws a UsageError for a
  * notebook or line without a block, a Refusal for a block that cannot be read.
  */
-export async function recipeOf(like: string, cwd: string): Promise<Request> {
+export async function recipeOf(like: string, cwd: string): Promise<Recipe> {
   const { note, line } = placeOf(like);
   const text = await readFile(path.resolve(cwd, note), 'utf8').catch(() => {
     throw new Refusal('file-not-found', { name: note }, note);
@@ -41,7 +47,8 @@ export async function recipeOf(like: string, cwd: string): Promise<Request> {
       `Its blocks start at lines ${lines}.`,
     );
   }
-  return requestFrom(parseBlock(block.text, block.firstLine).block);
+  const parsed = parseBlock(block.text, block.firstLine).block;
+  return { request: requestFrom(parsed), purpose: parsed.purpose['question-in-words'] };
 }
 
 /** Keys that cannot stand together: a word on the command line drops what the recipe said in another way. */

@@ -36,9 +36,20 @@ describe('a file that cannot be compared gets a problem that says where and what
       'text where numbers should be',
       good.replace('1.4', 'about 1'),
       'text-in-measured',
-      ['3', 'mass', 'about 1'],
+      ['line 3, column 2', 'about 1'],
     ],
-    ['one value in a group', 'site,mass\nNorth,1.2\nSouth,2.1\nSouth,2.4\n', 'values-too-few', ['North']],
+    [
+      'a group with one value',
+      'site,mass\nNorth,1.2\nSouth,2.1\nSouth,2.4\n',
+      'label-single-value',
+      ['North', 'occurs once', '--same'],
+    ],
+    [
+      'a group with one value and rows without any',
+      'site,mass\nNorth,1.2\nNorth,\nSouth,2.1\nSouth,2.4\n',
+      'values-too-few',
+      ['North', '1'],
+    ],
     ['all values of all groups equal', good.replace(/\d\.\d/g, '5'), 'values-all-equal', ['5']],
   ];
   it.each(cases)('%s', async (_, text, code, words) => {

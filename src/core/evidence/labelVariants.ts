@@ -25,10 +25,14 @@ function labelField({ fields }: Table, column: string): number {
   return trimmed >= 0 || place === null ? trimmed : Number(place[1]) - 1;
 }
 
-/** Labels that are alike and count as different groups, at least one of them a group that is compared. */
+/**
+ * Labels that are alike and count as different groups, at least one of them a group that is compared. A label declared the
+ * same as itself is declared a group of its own.
+ */
 function openSets({ levels }: LabelColumn, { groups, settings }: Seen): readonly (readonly string[])[] {
   const compared = new Set(groups.map(({ label }) => label));
-  return alikeLabels(levels).filter(set => {
+  const own = new Set(settings.same.filter(([from, to]) => from === to).map(([from]) => from));
+  return alikeLabels(levels.filter(label => !own.has(label))).filter(set => {
     const counted = new Set(set.map(label => merged(label, settings.same)));
     return counted.size > 1 && [...counted].some(label => compared.has(label));
   });
@@ -58,7 +62,9 @@ function findingOf(set: readonly string[], field: number, table: Table, { groups
       .flatMap(([, rows]) => rows)
       .slice(0, CELLS)
       .map(row => ({ file: table.file(row), line: table.line(row), field })),
-    answers: [{ same: [...settings.same, ...rare.map(([label]): [string, string] => [label, usual])] }],
+    answers: [usual, null].map(into => ({
+      same: [...settings.same, ...rare.map(([label]): [string, string] => [label, into ?? label])],
+    })),
   };
 }
 

@@ -6,7 +6,7 @@ export interface Told {
   readonly t: Say;
   readonly text: (name: string) => string | null;
   readonly number: (name: string) => number | null;
-  /** Names joined by commas, the first 20 of them. */
+  /** Names joined by commas, the first 20 of them; labels with their number of rows where that is known. */
   readonly list: (name: string) => string | null;
   /** The names as they are. */
   readonly names: (name: string) => readonly string[];
@@ -41,8 +41,15 @@ export function toldBy(facts: Facts, t: Say): Told {
     list: name => {
       const fact = facts[name];
       if (!Array.isArray(fact) || fact.length === 0) return null;
-      const names = fact.slice(0, MOST_NAMED).map(one => showLabel(String(one)));
+      const names = fact
+        .slice(0, MOST_NAMED)
+        .map((one, at) => `${showLabel(String(one))}${name === 'labels' ? rowsOf(facts, at) : ''}`);
       return fact.length > MOST_NAMED ? `${names.join(', ')}, …` : names.join(', ');
     },
   };
+}
+
+function rowsOf({ counts }: Facts, at: number): string {
+  const count = Array.isArray(counts) ? (counts as readonly (string | number)[])[at] : undefined;
+  return count === undefined ? '' : ` (${count})`;
 }

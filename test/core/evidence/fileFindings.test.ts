@@ -37,7 +37,7 @@ describe('labels that are spelt in two ways', () => {
       id: 'label-variants',
       level: 'ask',
       count: 1,
-      answers: [{ same: [['North', 'north']] }],
+      answers: [{ same: [['North', 'north']] }, { same: [['North', 'North']] }],
     });
     expect(found?.cells).toEqual([{ file: 0, line: 4, field: 0 }]);
     expect(saidOf(found)).toBe(
@@ -45,8 +45,9 @@ describe('labels that are spelt in two ways', () => {
     );
   });
 
-  it('are settled once they are declared the same', async () => {
+  it('are settled once they are declared the same, or one of them a label of its own', async () => {
     expect(await findings(file, { ...two, same: [['North', 'north']] })).toEqual([]);
+    expect(await findings(file, { ...two, same: [['North', 'North']] })).toEqual([]);
   });
 
   it('are two groups where both are named, and then only a warning', async () => {
