@@ -18,8 +18,8 @@ export function rulesOf(comparison: Comparison, scale: Scale, t: Say): readonly 
           ? [margin[1]]
           : margin;
   return [
-    ...(against === 0 ? [] : [{ at: 0, label: '0', kind: 'zero' as const }]),
-    { at: against, label: scale.typedNumber(against), kind: 'against' },
+    ...(against === 0 ? [] : [{ at: 0, label: '', kind: 'zero' as const }]),
+    { at: against, label: against === 0 ? '' : scale.typedNumber(against), kind: 'against' },
     ...mattersOf(comparison).map(at => ({
       at,
       label: t('{0} matters', scale.typedNumber(at)),
