@@ -2,7 +2,7 @@ import { bothTailsConfidence } from '../core/methods/confidence';
 import { methodById } from '../core/methods/index';
 import type { MethodDescriptor } from '../core/model/methods';
 import { Refusal } from '../core/model/problem';
-import type { Measure, Question, Relation } from '../core/model/settings';
+import type { Layout, Measure, Question, Relation } from '../core/model/settings';
 import type { Request } from './request';
 
 interface Chosen {
@@ -10,17 +10,21 @@ interface Chosen {
   readonly measure: Measure;
   readonly question: Question;
   readonly relation: Relation;
-  readonly confidence: number;
+  readonly layout: Layout;
 }
 
 /** Refuses a method that is not known, is for another measure or other data, or does not answer the question. */
 export function checkMethod(chosen: Chosen, list: readonly MethodDescriptor[]): MethodDescriptor {
-  const { method, measure, question, relation } = chosen;
+  const { method, measure, question, relation, layout } = chosen;
   const descriptor = methodById(method, list);
   if (descriptor === undefined)
     throw new Refusal('method-unknown', { method, methods: list.map(({ id }) => id) });
   const forPairs = descriptor.design === 'pairs' || descriptor.design === 'pairedCounts';
   if (descriptor.measure !== measure) throw new Refusal('method-not-for-this', { method, measure });
+  const summarised = layout.kind === 'summary' || layout.kind === 'typed';
+  if (summarised && (relation.kind === 'pairs' || relation.kind === 'units')) {
+    throw new Refusal('method-not-for-this', { method, needs: 'values' });
+  }
   if (forPairs && relation.kind !== 'pairs')
     throw new Refusal('method-not-for-this', { method, needs: 'pair' });
   if (relation.kind === 'pairs' && descriptor.design === 'counts') {

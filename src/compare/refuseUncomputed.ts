@@ -1,7 +1,10 @@
 import type { Table } from '../core/model/cells';
 import type { Row } from '../core/model/comparison';
+import type { Group } from '../core/model/groups';
 import { Refusal, type CellRef } from '../core/model/problem';
+import { groupAt } from './groupAt';
 import type { Prepared } from './prepared';
+import type { Selection } from './selection';
 
 /**
  * A chosen row that cannot be computed because there is too little or nothing to compare is a problem, not a row:
@@ -15,18 +18,12 @@ export function refuseUncomputed(
 ): void {
   if (chosen.applies || chosen.reason === null) return;
   const { code, facts } = chosen.reason;
-  const short = groups.find(({ n }) => n < 2);
-  if (code === 'one-value' && short !== undefined) {
-    const met = selection?.group.filter(group => selection.groups[group] === short.label).length ?? short.n;
-    const where = placeOf(table, short.sample?.rows[0], selection?.measured[0]?.field);
-    const { label, n, missing, leftOut } = short;
-    const about = { label, n, missing, leftOut, lines: where === null ? [] : [where.line] };
-    throw new Refusal(met === 1 ? 'label-single-value' : 'values-too-few', about, where);
-  }
+  const labels = groups.map(({ label }) => label);
+  const short = groups.findIndex(({ n }) => n < 2);
+  if (code === 'one-value') refuseOneValue(table, groupAt(groups, short), selection, short, labels);
   if (code === 'one-pair') throw new Refusal('values-too-few', { n: pairs?.complete ?? 0, what: 'pairs' });
   if (code === 'zero-spread' && facts['difference'] === 0) {
     const [test, reference] = groups;
-    const labels = groups.map(({ label }) => label);
     throw new Refusal('values-all-equal', {
       labels,
       value: test?.mean ?? null,
@@ -34,6 +31,19 @@ export function refuseUncomputed(
     });
   }
   if (code === 'sigma-absent') throw new Refusal('sigma-needed', { method: chosen.id });
+}
+
+function refuseOneValue(
+  table: Table | null,
+  { label, n, missing, leftOut, sample }: Group,
+  selection: Selection | null,
+  group: number,
+  labels: readonly string[],
+): never {
+  const where = placeOf(table, sample?.rows[0], selection?.measured[group]?.field);
+  const facts = { label, n, missing, leftOut, lines: where === null ? [] : [where.line], labels };
+  const isOnlyRow = selection?.group.filter(own => own === group).length === 1;
+  throw new Refusal(isOnlyRow ? 'label-single-value' : 'values-too-few', facts, where);
 }
 
 function placeOf(table: Table | null, row: number | undefined, field: number | undefined): CellRef | null {

@@ -39,7 +39,7 @@ export function settle(
   const question = request.question ?? 'differs';
   const measure = measureAsked(request, fields, list);
   const { method, curve } = methodAsked(request, measure);
-  checkMethod({ method, measure, question, relation, confidence }, list);
+  checkMethod({ method, measure, question, relation, layout }, list);
   checkMargin(question, request.margin, confidence);
   checkSigma(method, request.sigma ?? pairOf(request.options?.['sigma']));
   checkNumbers(request);

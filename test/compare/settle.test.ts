@@ -113,6 +113,19 @@ describe('what is asked wrongly is refused', () => {
     expect(refusal(() => settled({ confidence: 99.9 })).facts).toEqual({ confidence: 99.9, meant: 0.999 });
   });
 
+  it('pairs and units need values, not summaries', () => {
+    const typed = [
+      { label: 'a', n: 3, mean: 1, sd: 1 },
+      { label: 'b', n: 3, mean: 1, sd: 1 },
+    ];
+    for (const part of [{ pair: 'x' }, { per: ['x'] }]) {
+      expect(refusal(() => settle({ files: [], wish: {}, typed, ...part }, null))).toMatchObject({
+        code: 'method-not-for-this',
+        facts: { needs: 'values' },
+      });
+    }
+  });
+
   it('a label column that was not named is asked for, with the columns there are', () => {
     expect(refusal(() => settle({ ...base, measured: ['x'] }, table))).toMatchObject({
       code: 'column-needed',
