@@ -8,6 +8,3 @@ declare class TextEncoder {
   encode(input?: string): Uint8Array;
   encodeInto(source: string, destination: Uint8Array): { read: number; written: number };
 }
-interface String {
-  toWellFormed(): string;
-}

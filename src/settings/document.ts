@@ -22,16 +22,19 @@ const optionValue = v.union([text, number, v.boolean(), v.array(number)]);
 
 const purpose = v.looseObject({ 'question-in-words': text, plan: text });
 
+/** What a plan cannot know of a file that is not there yet; a block with a result holds all of it. */
+export const READ_KEYS = ['bytes', 'sha256', 'cells', 'encoding', 'delimiter', 'decimal', 'header'] as const;
+
 const data = v.looseObject({
   file: text,
-  bytes: line,
-  sha256: digest,
-  cells: digest,
-  encoding: text,
-  delimiter: text,
-  decimal: decimalMark,
+  bytes: v.exactOptional(line),
+  sha256: v.exactOptional(digest),
+  cells: v.exactOptional(digest),
+  encoding: v.exactOptional(text),
+  delimiter: v.exactOptional(text),
+  decimal: v.exactOptional(decimalMark),
   thousands: v.exactOptional(text),
-  header: line,
+  header: v.exactOptional(line),
   'units-row': v.exactOptional(line),
   'footer-left': v.exactOptional(texts),
   'missing-words': v.exactOptional(texts),

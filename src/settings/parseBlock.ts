@@ -4,7 +4,7 @@ import { evidenceChecks } from '../core/evidence/index';
 import { methods } from '../core/methods/index';
 import type { MethodDescriptor } from '../core/model/methods';
 import { Refusal } from '../core/model/problem';
-import { blockSchema, KEY_ORDER, type Block } from './document';
+import { blockSchema, KEY_ORDER, READ_KEYS, type Block } from './document';
 import { keyLines, type LineOf } from './keyLines';
 import { optionKeys } from './optionKeys';
 import { FORMAT, LAST_LINE } from './printBlock';
@@ -59,7 +59,17 @@ export function parseBlock(
   if (block.data === undefined && block.summary === undefined) {
     throw unreadable(firstLine, '[[data]] or [[summary]]', 'neither');
   }
+  if (block.result !== undefined) holdRead(block, lineOf);
   return { block, lineOf, unknownKeys: unknownKeys(block, list), text };
+}
+
+/** A result follows from bytes that were read: without what is known of them it cannot be held against anything. */
+function holdRead({ data = [] }: Block, lineOf: LineOf): void {
+  data.forEach((file, index) => {
+    const absent = READ_KEYS.find(key => file[key] === undefined);
+    if (absent !== undefined)
+      throw unreadable(lineOf(`data.${index}`), absent, 'nothing', `data.${index}.${absent}`);
+  });
 }
 
 function tables(text: string, firstLine: number): unknown {

@@ -56,10 +56,10 @@ function wishOf(data: BlockData | undefined): ReadingWish {
   const { encoding, delimiter, decimal, thousands, header, below } = data;
   const missing = data['missing-words'];
   return {
-    encoding,
-    delimiter,
-    decimal,
-    header,
+    ...(encoding === undefined ? {} : { encoding }),
+    ...(delimiter === undefined ? {} : { delimiter }),
+    ...(decimal === undefined ? {} : { decimal }),
+    ...(header === undefined ? {} : { header }),
     ...(thousands === undefined ? {} : { thousands }),
     ...(missing === undefined ? {} : { missing }),
     ...(below === undefined ? {} : { below }),

@@ -47,7 +47,7 @@ function numberText(value: number): string {
 
 function quoted(value: string): string {
   // A lone surrogate cannot stand in UTF-8 text; it is replaced as every encoder would.
-  const escaped = value.toWellFormed().replace(/["\\\p{Cc}]/gu, escape);
+  const escaped = value.replace(/\p{Cs}/gu, '\ufffd').replace(/["\\\p{Cc}]/gu, escape);
   return `"${escaped}"`;
 }
 

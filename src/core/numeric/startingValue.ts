@@ -1,3 +1,5 @@
+// eslint-disable-next-line @typescript-eslint/triple-slash-reference -- jstat brings no types; every program that reaches this file needs ours.
+/// <reference path="./jstat.d.ts" />
 import jStat from 'jstat';
 
 /**
