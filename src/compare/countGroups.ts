@@ -5,7 +5,7 @@ import type { Settings } from '../core/model/settings';
 import { usedRows, type Selection } from './selection';
 
 /** The outcomes of one group. */
-export interface CountedGroup {
+interface CountedGroup {
   readonly count: Count;
   /** Used rows; equals n unless units were named. */
   readonly readings: number;

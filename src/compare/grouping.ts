@@ -5,7 +5,7 @@ import type { Roles } from './roles';
 type Grouped = Pick<Settings, 'files' | 'layout' | 'same'>;
 
 /** The labels that groups can be made from, before any is chosen. */
-export interface Grouping {
+interface Grouping {
   /** After merging; in the order of the file's levels, the columns or the files. */
   readonly labels: readonly string[];
   /** Values that one row can hold: one a column in the wide layout, else one. */
@@ -35,7 +35,7 @@ export function groupingOf(table: Table, settings: Grouped, roles: Roles): Group
 }
 
 /** What a label counts as after the declared merges, followed one after another; a circle of merges ends where it began. */
-export function mergedLabel(label: string, same: Settings['same']): string {
+function mergedLabel(label: string, same: Settings['same']): string {
   const seen = new Set<string>();
   let now = label;
   while (!seen.has(now)) {
@@ -46,7 +46,7 @@ export function mergedLabel(label: string, same: Settings['same']): string {
 }
 
 /** One group a file: its name without the folders, or the whole path where two names are alike. */
-export function fileLabels(files: readonly string[]): readonly string[] {
+function fileLabels(files: readonly string[]): readonly string[] {
   const names = files.map(path => path.split('/').at(-1) ?? path);
   return new Set(names).size === names.length ? names : files;
 }

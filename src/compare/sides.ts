@@ -1,7 +1,7 @@
 import { Refusal } from '../core/model/problem';
 import type { LabelCount } from './labelCounts';
 
-export interface Sides {
+interface Sides {
   readonly test: string;
   readonly reference: string;
 }

@@ -3,7 +3,7 @@ import type { Measure } from '../core/model/settings';
 import type { Curve, DfRule, Request, Variance } from './request';
 
 /** The three words of a variance assumption; they only choose a method. */
-export interface VarianceWords {
+interface VarianceWords {
   readonly variance: Variance;
   readonly df: DfRule | null;
   readonly curve: Curve;

@@ -4,7 +4,7 @@ import { cellState } from './measuredValues';
 import { Entry, type Selection } from './selection';
 
 /** The same comparison on other data: left-out rows put back, or values below a limit taken otherwise. */
-export interface Variant {
+interface Variant {
   readonly data: string;
   readonly settings: Settings;
 }

@@ -3,7 +3,7 @@ import type { Say } from '../model/say';
 import type { Settings } from '../model/settings';
 
 /** A number above or below which a check speaks up: visible, changeable, and part of the settings block. */
-export interface Threshold extends OptionSpec {
+interface Threshold extends OptionSpec {
   readonly kind: 'number';
   readonly default: number;
 }

@@ -6,7 +6,7 @@ import { meanPivot, type Precision } from './meanPivot';
 import { allQuestions } from './questions';
 import { commonWhy } from './reasons';
 
-export const sigmaOption: OptionSpec = {
+const sigmaOption: OptionSpec = {
   key: 'sigma',
   flag: 'sigma',
   kind: 'numbers',

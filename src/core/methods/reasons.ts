@@ -5,13 +5,13 @@ import { meanDifference } from '../numeric/meanDifference';
 type Two = Designs['two'];
 
 /** A group with fewer than two values has no SD. */
-export function oneValue({ test, reference }: Two): Reason | null {
+function oneValue({ test, reference }: Two): Reason | null {
   const short = [test, reference].find(group => group.n < 2);
   return short === undefined ? null : { code: 'one-value', facts: { label: short.label, n: short.n } };
 }
 
 /** Neither group scatters: there is nothing to hold the difference against. */
-export function noSpread({ test, reference }: Two): Reason | null {
+function noSpread({ test, reference }: Two): Reason | null {
   if (test.sd !== 0 || reference.sd !== 0) return null;
   const decimals = test.sample?.numbers.decimals;
   const resolution = decimals === undefined ? null : Number(`1e-${decimals}`);

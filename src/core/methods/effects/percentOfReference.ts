@@ -3,7 +3,7 @@ import { alphaOf } from '../confidence';
 import { curveOf } from '../curve';
 
 /** A percent of the reference mean with its limits; null: open end, or no finite interval (reference mean near 0). */
-export interface Percent {
+interface Percent {
   readonly value: number;
   readonly lower: number | null;
   readonly upper: number | null;
