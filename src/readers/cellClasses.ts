@@ -1,5 +1,5 @@
 import { Cell } from '../core/model/cells';
-import { readCellText, UNUSABLE } from './cellText';
+import { makeCellFormat, readCellText, UNUSABLE, type CellFormat } from './cellText';
 import type { HeadRecord } from './headRecords';
 import { readGrouped } from './thousands';
 import { unitOfCell } from './unitText';
@@ -13,19 +13,20 @@ export type Classes = readonly (readonly CellClass[])[];
 export function classify(
   records: readonly HeadRecord[],
   decimal: '.' | ',',
-  missing: ReadonlySet<string>,
+  missing: readonly string[],
 ): Classes {
+  const format = makeCellFormat(decimal, '', missing);
   const known = new Map<string, CellClass>();
   const classOf = (cell: string): CellClass => {
     let found = known.get(cell);
-    if (found === undefined) known.set(cell, (found = classOfCell(cell, decimal, missing)));
+    if (found === undefined) known.set(cell, (found = classOfCell(cell, format)));
     return found;
   };
   return records.map(record => record.cells.map(classOf));
 }
 
-function classOfCell(cell: string, decimal: '.' | ',', missing: ReadonlySet<string>): CellClass {
-  const { kind, unclear } = readCellText(cell, { decimal, thousands: '', missing });
+function classOfCell(cell: string, format: CellFormat): CellClass {
+  const { kind, unclear } = readCellText(cell, format);
   if (kind === Cell.Missing) return 'empty';
   if (unclear) return 'perhaps';
   if (kind !== Cell.Text && kind !== UNUSABLE) return 'number';

@@ -7,7 +7,22 @@ export interface CellFormat {
   readonly decimal: '.' | ',';
   /** A mark that stands between groups of three digits even where that alone does not prove it; '' for none. */
   readonly thousands: string;
+  /** Words that stand for a missing value. */
   readonly missing: ReadonlySet<string>;
+  /** Numbers that do, however they are written. */
+  readonly missingNumbers: readonly number[];
+}
+
+export function makeCellFormat(
+  decimal: '.' | ',',
+  thousands: string,
+  missing: readonly string[],
+): CellFormat {
+  const numbers = missing.flatMap(word => {
+    const value = parseDecimal(word.trim(), decimal) ?? parseDecimal(word.trim(), '.');
+    return value === null ? [] : [nearestDouble(value)];
+  });
+  return { decimal, thousands, missing: new Set(missing), missingNumbers: numbers };
 }
 
 /** A number that no double can hold: infinite, or so large or small that it would become infinite or 0. */
@@ -52,7 +67,10 @@ export function readCellText(written: string, format: CellFormat): CellText {
 function readNumber(text: string, format: CellFormat): CellText {
   if (!MAY_BE_NUMBER.test(text)) return plain(Cell.Text);
   const value = parseDecimal(text, format.decimal);
-  if (value !== null) return plain(isUsable(value) ? Cell.Value : UNUSABLE, value);
+  if (value !== null) {
+    if (format.missingNumbers.includes(nearestDouble(value))) return plain(Cell.Missing);
+    return plain(isUsable(value) ? Cell.Value : UNUSABLE, value);
+  }
   if (INFINITE.test(text)) return plain(UNUSABLE);
   const grouped = readGrouped(text, format.decimal);
   if (grouped === null) return plain(Cell.Text);

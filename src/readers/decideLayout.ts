@@ -37,7 +37,7 @@ export function decideLayout(head: HeadBytes, wish: ReadingWish, name: string, f
           head: records,
           delimiter,
           decimal,
-          missing: new Set(missing),
+          missing,
           headerLine: wish.header,
         }) ?? [],
     );
@@ -66,7 +66,9 @@ function delimitersToTry(head: HeadBytes, wish: ReadingWish): readonly string[] 
   const named = NAMED_DELIMITER.exec(firstLine)?.[1];
   if (named !== undefined) return [named];
   const present = DELIMITERS.filter(delimiter => head.bytes.includes(delimiter.charCodeAt(0)));
-  return present.length > 0 ? present : [','];
+  if (present.length === 0) return [','];
+  // a comma alone may be a decimal mark: then there is one column, and any other delimiter says so
+  return present.length === 1 && present[0] === ',' ? [';', ','] : present;
 }
 
 function firstOpenQuote(head: HeadBytes, delimiters: readonly string[]): Head['openQuote'] {

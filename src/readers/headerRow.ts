@@ -12,9 +12,11 @@ export interface HeaderRow {
   readonly numeric: readonly number[];
 }
 
-/** Rows that may stand above a header and look like data all the same. */
+/** A record that stands this far below the first data row is none of a header any more. */
 const MOST_ROWS_ABOVE = 3;
 const FILLED = 0.8;
+/** Fewest records that say what a column holds, when only the end of the head is looked at. */
+const SHORTEST_END = 3;
 
 /**
  * Finds the header of a table of this width: the record over the numbers whose cells are words and stand in no row below.
@@ -26,91 +28,111 @@ export function findHeader(
   width: number,
   fixed: number | null,
 ): HeaderRow {
-  const numeric = numericColumns(classes, width, (fixed ?? -1) + 1);
-  if (fixed !== null) return withUnits(classes, numeric, fixed, width);
-  const isData = (row: Classes[number] | undefined): boolean => looksLikeData(row, numeric, width);
-  const first = classes.findIndex(isData);
+  const header = fixed ?? headerIndex(records, classes, width);
+  const units = hasUnitsBelow(classes, header, width) ? header + 1 : null;
+  const first = classes.findIndex(row => looksLikeData(row, numericColumns(classes, width, 0), width));
+  const data = header >= 0 ? (units ?? header) + 1 : fixed === null ? Math.max(0, first) : 0;
+  return { header, units, data, numeric: numericColumns(classes.slice(data), width, Infinity) };
+}
+
+function headerIndex(records: readonly HeadRecord[], classes: Classes, width: number): number {
+  const numeric = numericColumns(classes, width, SHORTEST_END);
+  const first = classes.findIndex(row => looksLikeData(row, numeric, width));
   if (numeric.length === 0 || first < 0) {
-    const header = records.findIndex(
-      (record, i) => record.cells.length === width && !recurs(records, i, width),
+    return records.findIndex(
+      (record, i) => record.cells.length === width && !isLikeBelow(records, i, width, numeric),
     );
-    return withUnits(classes, numeric, header, width);
   }
-  let found = -1;
-  let dataAbove = 0;
-  for (let i = 0; i < records.length; i++) {
-    if (isData(classes[i])) dataAbove++;
-    if (dataAbove > MOST_ROWS_ABOVE) break;
-    if (isHeader(records[i], classes[i], numeric, width) && !recurs(records, i, width)) {
-      const again = found >= 0 && records[found]?.text === records[i]?.text;
-      if (!again) found = i;
-    }
+  const filled = columnsFilled(classes, width);
+  let above = -1;
+  for (let i = 0; i < Math.min(records.length, first + MOST_ROWS_ABOVE + 1); i++) {
+    if (i > first && above >= 0) break;
+    const row = classes[i];
+    if (
+      row === undefined ||
+      !isHeader(row, numeric, width, filled) ||
+      isLikeBelow(records, i, width, numeric)
+    )
+      continue;
+    const isUnits = above >= 0 && !row.includes('text');
+    if (!isUnits) above = i;
   }
-  return found < 0
-    ? { header: -1, units: null, data: first, numeric }
-    : withUnits(classes, numeric, found, width);
+  return above;
 }
 
-function numericColumns(classes: Classes, width: number, from: number): readonly number[] {
-  const numeric: number[] = [];
+/**
+ * Columns of numbers, at least as many as words, over all records of this width or, where a preamble of the same width
+ * stands above, over the end of them.
+ */
+function numericColumns(classes: Classes, width: number, shortestEnd: number): readonly number[] {
+  const rows = classes.filter(row => row.length === width);
+  return Array.from({ length: width }, (_, column) => column).filter(column => {
+    for (let end = rows.length; end === rows.length || end >= shortestEnd; end = Math.floor(end / 2)) {
+      const found = rows.slice(rows.length - end).map(row => row[column]);
+      const numbers = found.filter(isNumber).length;
+      if (numbers > 0 && numbers >= found.filter(one => one === 'text').length) return true;
+      if (end === 0) return false;
+    }
+    return false;
+  });
+}
+
+/** How many columns have something in them. */
+function columnsFilled(classes: Classes, width: number): number {
+  let filled = 0;
   for (let column = 0; column < width; column++) {
-    let numbers = 0;
-    let texts = 0;
-    for (const row of classes.slice(from)) {
-      if (row.length !== width) continue;
-      if (isNumber(row[column])) numbers++;
-      else if (row[column] === 'text') texts++;
-    }
-    if (numbers > 0 && numbers >= texts) numeric.push(column);
+    if (classes.some(row => row.length === width && row[column] !== 'empty')) filled++;
   }
-  return numeric;
+  return filled;
 }
 
-/** Long enough, numbers where the numbers are, and more of them than words. */
-function looksLikeData(row: Classes[number] | undefined, numeric: readonly number[], width: number): boolean {
-  if (row === undefined || row.length > width || row.length * 2 < width) return false;
+/** Long enough, with more numbers than words where the numbers are. */
+function looksLikeData(row: Classes[number], numeric: readonly number[], width: number): boolean {
+  if (row.length > width || row.length * 2 < width) return false;
   const numbers = numeric.filter(column => isNumber(row[column])).length;
-  const words = numeric.filter(column => row[column] === 'text' || row[column] === 'unit').length;
-  return numbers > 0 && numbers >= words;
+  return numbers > numeric.filter(column => row[column] === 'text' || row[column] === 'unit').length;
 }
 
-function isHeader(
-  record: HeadRecord | undefined,
-  row: Classes[number] | undefined,
-  numeric: readonly number[],
+/** Words over the numbers, no number among them, and hardly a gap. */
+function isHeader(row: Classes[number], numeric: readonly number[], width: number, filled: number): boolean {
+  if (row.length !== width || numeric.some(column => isNumber(row[column]))) return false;
+  const words = numeric.filter(column => row[column] === 'text' || row[column] === 'unit').length;
+  const own = row.filter(found => found !== 'empty').length;
+  return words >= FILLED * numeric.length && own >= FILLED * filled - 1;
+}
+
+/**
+ * Whether this record is a row of labels like those below: one of its words stands below in the same column, or a column
+ * of ids (T01, T02, …) is written alike from here on down.
+ */
+function isLikeBelow(
+  records: readonly HeadRecord[],
+  index: number,
   width: number,
+  numeric: readonly number[],
 ): boolean {
-  if (record === undefined || row === undefined || row.length !== width) return false;
-  const words = numeric.filter(column => row[column] === 'text' || row[column] === 'unit').length;
-  const onlyUnits = numeric.every(column => row[column] !== 'text') && row.every(found => found !== 'text');
-  const filled = record.cells.filter(cell => cell.trim() !== '').length;
-  if (onlyUnits && filled < width) return false;
-  return (
-    words >= FILLED * numeric.length &&
-    filled >= FILLED * width - 1 &&
-    !numeric.some(column => isNumber(row[column]))
-  );
-}
-
-/** Whether a word of this record stands in the same column of a later one: then it is a label, and this is a row of data. */
-function recurs(records: readonly HeadRecord[], index: number, width: number): boolean {
   const own = records[index];
   if (own === undefined) return false;
   const below = records
     .slice(index + 1)
     .filter(record => record.cells.length === width && record.text !== own.text);
-  return own.cells.some(
-    (cell, column) => cell.trim() !== '' && below.some(record => record.cells[column] === cell),
-  );
+  return own.cells.some((cell, column) => {
+    const word = cell.trim();
+    if (word === '') return false;
+    if (below.some(record => record.cells[column]?.trim() === word)) return true;
+    if (numeric.includes(column) || !/\d/.test(word) || below.length < 2) return false;
+    return below.every(record => patternOf(record.cells[column] ?? '') === patternOf(word));
+  });
 }
 
-function withUnits(classes: Classes, numeric: readonly number[], header: number, width: number): HeaderRow {
-  const below = classes[header + 1];
-  const isUnits =
-    header >= 0 &&
-    below !== undefined &&
-    below.length <= width &&
-    below.every(found => found === 'unit' || found === 'empty') &&
-    numeric.some(column => below[column] === 'unit');
-  return { header, units: isUnits ? header + 1 : null, data: header + (isUnits ? 2 : 1), numeric };
+const patternOf = (text: string): string => text.trim().replace(/\d/g, '0').replace(/\p{L}/gu, 'a');
+
+/** Nothing but units and gaps under the header, a unit over numbers (or over nothing at all) among them. */
+function hasUnitsBelow(classes: Classes, header: number, width: number): boolean {
+  const row = classes[header + 1];
+  if (header < 0 || row === undefined || row.length > width) return false;
+  const numeric = numericColumns(classes.slice(header + 2), width, Infinity);
+  const isLast = header + 2 === classes.length;
+  const only = row.every(found => found === 'unit' || found === 'empty');
+  return only && row.some((found, column) => found === 'unit' && (isLast || numeric.includes(column)));
 }

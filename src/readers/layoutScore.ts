@@ -27,7 +27,7 @@ export interface Trial {
   readonly head: Head;
   readonly delimiter: string;
   readonly decimal: '.' | ',';
-  readonly missing: ReadonlySet<string>;
+  readonly missing: readonly string[];
   /** Line of the header if a person named it; 0: none. */
   readonly headerLine: number | undefined;
 }

@@ -43,4 +43,9 @@ export class PlainNumber {
     this.decimals = decimals;
     return true;
   }
+
+  /** Whether it is one of these numbers. */
+  isAmong(numbers: readonly number[]): boolean {
+    return numbers.length > 0 && numbers.includes(this.mantissa / 10 ** this.decimals);
+  }
 }

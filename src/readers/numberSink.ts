@@ -24,6 +24,7 @@ export class NumberSink implements CellSink {
   private readonly number = new PlainNumber();
   private readonly decoder = new TextDecoder();
   private mark = 0;
+  private missingNumbers: readonly number[] = [];
   private origin: CellOrigin | null = null;
 
   constructor(expectedRows: number) {
@@ -33,12 +34,14 @@ export class NumberSink implements CellSink {
   /** The next cells come from here. */
   from(origin: CellOrigin): void {
     this.origin = origin;
+    this.missingNumbers = origin.format.missingNumbers;
     this.mark = origin.format.decimal.charCodeAt(0);
   }
 
   take(bytes: Uint8Array, start: number, end: number, line: number): void {
-    if (this.number.read(bytes, start, end, this.mark))
-      this.builder.add(this.number.mantissa, this.number.decimals);
+    const { number } = this;
+    const isPlain = number.read(bytes, start, end, this.mark) && !number.isAmong(this.missingNumbers);
+    if (isPlain) this.builder.add(number.mantissa, number.decimals);
     else this.takeText(this.decoder.decode(bytes.subarray(start, end)), line);
     this.rows++;
   }

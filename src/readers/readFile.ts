@@ -2,7 +2,7 @@ import type { Reading } from '../core/model/cells';
 import { Refusal } from '../core/model/problem';
 import type { ByteSource } from './byteSource';
 import type { CellSink } from './cellSink';
-import type { CellFormat } from './cellText';
+import { makeCellFormat, type CellFormat } from './cellText';
 import { Met } from './met';
 import { readGrouped } from './thousands';
 import { Scanner, type RowSink } from './scanner';
@@ -32,7 +32,7 @@ export async function readFile(
   const met = new Met(file);
   met.noteAll(reading.met);
   const { decimal, thousands, missingWords } = reading;
-  const sinks = pass.sinks({ decimal, thousands, missing: new Set(missingWords) }, met);
+  const sinks = pass.sinks(makeCellFormat(decimal, thousands, missingWords), met);
   const scanner = new Scanner(shape, sinks, pass.rows, met);
   let bytes = 0;
   const onBytes = (chunk: Uint8Array): void => {

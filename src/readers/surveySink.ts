@@ -52,7 +52,8 @@ export class SurveySink implements CellSink {
   }
 
   take(bytes: Uint8Array, start: number, end: number): void {
-    if (this.number.read(bytes, start, end, this.mark)) {
+    const plain = this.number.read(bytes, start, end, this.mark);
+    if (plain && !this.number.isAmong(this.format.missingNumbers)) {
       this.value(this.number.mantissa / 10 ** this.number.decimals);
       if (this.levels.size <= MOST_DISTINCT) this.count(this.levels.codeOf(bytes, start, end));
       return;

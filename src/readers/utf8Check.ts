@@ -63,6 +63,7 @@ function plainUntil(bytes: Uint8Array, at: number): number {
     if (!isPlain(bytes[place] as number)) return place;
     place++;
   }
+  if (place === bytes.length) return place;
   const words = new Int32Array(bytes.buffer, bytes.byteOffset + place, (bytes.length - place) >> 2);
   for (let i = 0; i < words.length; i++) {
     const word = words[i] as number;
