@@ -32,7 +32,7 @@ function kindSentence(outcome: Outcome, t: Say): string {
     case 'reworked':
       return t('data and settings are the same; this version computes the method otherwise{0}', changes);
     case 'planned':
-      return t('planned; no result yet');
+      return t('no result yet');
     case 'blocked': {
       if (outcome.reason === null) return t('cannot be computed');
       const { message, where, fix } = problemWords(outcome.reason, t, outcome.now?.settings.files ?? []);
