@@ -1,6 +1,10 @@
-/** First words of rows that sum up the rows above. */
+/** What rows are called that sum up the rows above. */
 const SUMMING =
-  /^(grand |overall |sub)?(means?|averages?|avg|totals?|sums?|s\.?d\.?|std\.?( ?dev\.?)?|stdev|standard deviation|st\.? ?abw\.?|mittel(wert)?|durchschnitt|summe|gesamt|standardabweichung|moyenne|somme|[ée]cart[- ]type|media|promedio|suma|r\.?s\.?d\.?( ?%)?|%? ?rsd|cv|c\.v\.|cv ?%|%? ?cv|median|min(imum)?|max(imum)?|count|n|anzahl|variance|var|s\.?e\.?m?\.?|range)( ?\([^)]*\))?\s*[:=]?$/i;
+  /^(?:(?:grand|overall|sub)[ -]?)?(?:means?|averages?|avg|totals?|sums?|std\.? ?dev\.?|stdev|standard deviation|st\. ?abw\.?|mittel(?:wert)?|durchschnitt|summe|gesamt|standardabweichung|moyenne|somme|[ée]cart[- ]type|promedio|suma)(?: ?\([^)]*\))?\s*[:=]?$/i;
+
+/** Shorter names that are labels as well: they count only beside one of those above. */
+const SUMMING_BESIDE =
+  /^(?:s\.?d\.?|s\.?e\.?m?\.?|r\.?s\.?d\.?|c\.?v\.?|std\.?|n|median|min(?:imum)?|max(?:imum)?|count|anzahl|var(?:iance)?|range|media)(?: ?%| ?\([^)]*\))?\s*[:=]?$/i;
 
 /** One record at the foot of a file. */
 export interface FootRecord {
@@ -19,16 +23,21 @@ export function footLength(
   sample: readonly (readonly string[])[],
   width: number,
 ): number {
-  let length = 0;
-  for (let taken = 1; taken <= records.length; taken++) {
-    const record = records[records.length - taken];
-    if (record === undefined) break;
-    if (isBlank(record.cells)) continue;
-    const above = records.slice(0, records.length - taken);
-    if (!isNote(record.cells, width) && !sumsUp(record.cells, above, sample)) break;
-    length = taken;
-  }
-  return length;
+  const within = (names: readonly RegExp[]): { length: number; sumsUp: boolean } => {
+    const found = { length: 0, sumsUp: false };
+    for (let taken = 1; taken <= records.length; taken++) {
+      const cells = records[records.length - taken]?.cells ?? [];
+      if (isBlank(cells)) continue;
+      const above = records.slice(0, records.length - taken);
+      const named = names.findIndex(name => isCalled(cells, name, above, sample));
+      if (named < 0 && !isNote(cells, width)) break;
+      found.length = taken;
+      found.sumsUp ||= named === 0;
+    }
+    return found;
+  };
+  const both = within([SUMMING, SUMMING_BESIDE]);
+  return both.sumsUp ? both.length : within([SUMMING]).length;
 }
 
 export const isBlank = (cells: readonly string[]): boolean => cells.every(cell => cell.trim() === '');
@@ -38,14 +47,16 @@ function isNote(cells: readonly string[], width: number): boolean {
   return cells.length === 1 && width >= 3 && /\p{L}/u.test(cells[0] ?? '');
 }
 
-function sumsUp(
+/** Whether a cell bears such a name, as no other cell of its column does. */
+function isCalled(
   cells: readonly string[],
+  name: RegExp,
   above: readonly FootRecord[],
   sample: readonly (readonly string[])[],
 ): boolean {
   return cells.some((cell, column) => {
     const word = cell.trim();
-    if (!SUMMING.test(word)) return false;
+    if (!name.test(word)) return false;
     const stands = (row: readonly string[]): boolean =>
       row[column]?.trim().toLowerCase() === word.toLowerCase();
     return !above.some(record => stands(record.cells)) && !sample.some(stands);

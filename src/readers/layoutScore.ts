@@ -22,6 +22,8 @@ const WITHOUT_HEADER = 0.3;
 const ONE_COLUMN = 0.5;
 /** A table of words alone is one too. */
 const FLOOR = 0.2;
+const REGULAR_OTHER = 0.1;
+const SCATTERED_OTHER = 0.3;
 
 export interface Trial {
   readonly head: Head;
@@ -61,7 +63,7 @@ function widths(records: readonly HeadRecord[], fixed: number | null): readonly 
     .map(([width]) => width);
 }
 
-/** Constant width × share of numbers × a header that fits × cells without other delimiters in them. */
+/** Constant width × share of numbers × a header that fits × no other delimiter that parts as well. */
 function fit(
   records: readonly HeadRecord[],
   classes: Classes,
@@ -85,7 +87,14 @@ function fit(
   const share = FLOOR + (1 - FLOOR) * (filled === 0 ? 0 : numbers / filled);
   const header = place.header >= 0 || fixed === -1 ? 1 : WITHOUT_HEADER;
   const reach = 0.9 + (0.1 * rows.length) / records.length;
-  return regular * share * header * reach * tidiness(records, delimiter) * (width === 1 ? ONE_COLUMN : 1);
+  return (
+    regular *
+    share *
+    header *
+    reach *
+    tidiness(records, place.header, delimiter) *
+    (width === 1 ? ONE_COLUMN : 1)
+  );
 }
 
 function regularity(cells: number, width: number): number {
@@ -93,11 +102,17 @@ function regularity(cells: number, width: number): number {
   return cells < width && cells * 2 > width ? 0.5 : 0;
 }
 
-/** Share of records in which no cell holds a delimiter that comes before the one on trial. */
-function tidiness(records: readonly HeadRecord[], delimiter: string): number {
-  const stronger = DELIMITERS.slice(0, Math.max(0, DELIMITERS.indexOf(delimiter)));
-  const untidy = records.filter(({ quoted, cells }) => {
-    return !quoted && cells.some(cell => stronger.some(other => cell.includes(other)));
-  });
-  return 1 - (0.9 * untidy.length) / Math.max(1, records.length);
+/**
+ * 1 where no cell holds a delimiter that comes before the one on trial; little where one stands in the header and in every
+ * row equally often: then that is what parts the cells.
+ */
+function tidiness(records: readonly HeadRecord[], header: number, delimiter: string): number {
+  const bare = records.slice(Math.max(0, header)).filter(({ quoted }) => !quoted);
+  let tidy = 1;
+  for (const other of DELIMITERS.slice(0, Math.max(0, DELIMITERS.indexOf(delimiter)))) {
+    const counts = bare.map(({ text }) => text.split(other).length - 1);
+    const untidy = counts.filter(count => count > 0).length / Math.max(1, bare.length);
+    tidy *= untidy === 1 && new Set(counts).size === 1 ? REGULAR_OTHER : 1 - SCATTERED_OTHER * untidy;
+  }
+  return tidy;
 }
