@@ -127,6 +127,16 @@ describe('a block rechecked', () => {
     expect([said.code, outcomeOf(said)]).toEqual([0, 'planned']);
   });
 
+  it('is planned also when its file is not there yet and nothing of it is known', async () => {
+    await using note = await notebookWith();
+    const known = /^(?:bytes|sha256|cells|encoding|delimiter|decimal|header) = .*\n/gm;
+    const plan = note.text.replace(/^\[result\][\s\S]*?(?=^\[by\])/m, '').replace(known, '');
+    await note.write('note.md', plan.replace('file = "data.csv"', 'file = "june.csv"'));
+    expect(outcomeOf(await recheck(note.folder))).toBe('planned');
+    await note.write('note.md', note.text.replace(known, ''));
+    expect(outcomeOf(await recheck(note.folder))).toBe('blocked');
+  });
+
   it('is blocked, not passed over, when it cannot be read', async () => {
     await using note = await notebookWith();
     await note.write('note.md', note.text.replace('question = "differs"', 'question = differs'));

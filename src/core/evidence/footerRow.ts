@@ -12,11 +12,12 @@ function filledCells(
     .filter(({ cell }) => cell !== '');
 }
 
-/** What one reading passed over at its foot; `fields` are the columns of that file. */
+/** What one reading passed over at its foot; `fields` are the columns of that file, `name` its name where there are two. */
 export const footerFindings = (
   reading: Reading,
   file: number,
   fields: readonly Field[],
+  name: string | null = null,
 ): readonly Finding[] =>
   reading.footer.map(({ line, text }) => {
     const [first, ...more] = filledCells(text, reading.delimiter);
@@ -27,6 +28,7 @@ export const footerFindings = (
       facts: {
         what: more.length > 0 ? 'totals' : 'note',
         line,
+        file: name,
         cell: first?.cell ?? '',
         column: fields[field]?.name ?? '',
       },
@@ -42,23 +44,28 @@ export const footerRow: EvidenceDescriptor<'footer-row'> = {
   id: 'footer-row',
   thresholds: [],
   references: [],
-  look: ({ table }) =>
+  look: ({ table, settings: { files } }) =>
     table === null
       ? []
-      : table.readings.flatMap((reading, file) => footerFindings(reading, file, table.fields)),
+      : table.readings.flatMap((reading, file) =>
+          footerFindings(reading, file, table.fields, files.length > 1 ? (files[file] ?? null) : null),
+        ),
   canTell: () => true,
   title: t => t('totals rows at the foot'),
-  say: ({ facts }, t) =>
-    facts['what'] === 'note'
-      ? t(
-          'Line {0} reads "{1}": taken as a note below the table, not as data.',
-          Number(facts['line']),
-          String(facts['cell']),
-        )
+  say({ facts }, t) {
+    const { file } = facts;
+    const place =
+      typeof file === 'string'
+        ? t('{0}, line {1}', file, Number(facts['line']))
+        : t('Line {0}', Number(facts['line']));
+    const cell = String(facts['cell']);
+    return facts['what'] === 'note'
+      ? t('{0} reads "{1}": taken as a note below the table, not as data.', place, cell)
       : t(
-          'Line {0} reads "{1}" under {2}: taken as a totals row, not as data.',
-          Number(facts['line']),
-          String(facts['cell']),
+          '{0} reads "{1}" under {2}: taken as a totals row, not as data.',
+          place,
+          cell,
           String(facts['column']),
-        ),
+        );
+  },
 };

@@ -13,7 +13,7 @@ export function noteWords({ code, facts }: Reason, words: Say): string {
   switch (code) {
     case 'first-is-test':
       return t(
-        'No group was named: {0}, met first in the file, is the test group, {1} the reference.',
+        'No group was named: {0}, which comes first, is the test group, {1} the reference.',
         text('test'),
         text('reference'),
       );
