@@ -5,5 +5,6 @@ export const SPACE = 32;
 export const QUOTE = 34;
 export const HASH = 35;
 export const PLUS = 43;
+export const COMMA = 44;
 export const MINUS = 45;
 export const ZERO = 48;

@@ -1,7 +1,8 @@
 import { Refusal } from '../core/model/problem';
+import { COMMA, QUOTE } from './byteCodes';
 import { isNumber, provenThousands } from './cellClasses';
 import { isBlank } from './foot';
-import { headRecords, type Head } from './headRecords';
+import { headRecords } from './headRecords';
 import { bestCandidate, DELIMITERS, type Candidate } from './layoutScore';
 import type { HeadBytes } from './readHead';
 import { MISSING_WORDS, type ReadingWish } from './readingWish';
@@ -28,10 +29,10 @@ const NAMED_DELIMITER = /^\uFEFF?"?sep=(.)"?\s*$/i;
 export function decideLayout(head: HeadBytes, wish: ReadingWish, name: string, file: number): Layout {
   const missing = wish.missing ?? MISSING_WORDS;
   const delimiters = delimitersToTry(head, wish);
-  const decimals: readonly ('.' | ',')[] = wish.decimal === undefined ? ['.', ','] : [wish.decimal];
-  const candidates = delimiters.flatMap(delimiter => {
-    const records = headRecords(head.bytes, delimiter, head.whole);
-    return decimals.flatMap(
+  const heads = delimiters.map(delimiter => headRecords(head.bytes, delimiter, head.whole));
+  const candidates = delimiters.flatMap((delimiter, index) => {
+    const records = heads[index] ?? { records: [], openQuote: null };
+    return decimalsToTry(head, wish, delimiter).flatMap(
       decimal =>
         bestCandidate({
           head: records,
@@ -46,9 +47,9 @@ export function decideLayout(head: HeadBytes, wish: ReadingWish, name: string, f
     (a, b) => (a === null || b.score > a.score + 1e-9 ? b : a),
     null,
   );
-  const openQuote = firstOpenQuote(head, delimiters);
+  const openQuote = heads.flatMap(records => records.openQuote ?? []).sort((a, b) => a.line - b.line)[0];
   if (best === null || best.head.openQuote !== null) {
-    if (openQuote === null) throw new Refusal('file-empty', { name }, name);
+    if (openQuote === undefined) throw new Refusal('file-empty', { name }, name);
     throw new Refusal('quote-unclosed', { name, line: openQuote.line }, { file, ...openQuote });
   }
   refuseWithoutRows(best, head.whole, wish, name, file);
@@ -71,11 +72,11 @@ function delimitersToTry(head: HeadBytes, wish: ReadingWish): readonly string[] 
   return present.length === 1 && present[0] === ',' ? [';', ','] : present;
 }
 
-function firstOpenQuote(head: HeadBytes, delimiters: readonly string[]): Head['openQuote'] {
-  const open = delimiters.flatMap(
-    delimiter => headRecords(head.bytes, delimiter, head.whole).openQuote ?? [],
-  );
-  return open.sort((a, b) => a.line - b.line)[0] ?? null;
+/** No cell holds a comma where commas part the cells and none is in quotes. */
+function decimalsToTry(head: HeadBytes, wish: ReadingWish, delimiter: string): readonly ('.' | ',')[] {
+  if (wish.decimal !== undefined) return [wish.decimal];
+  const commas = head.bytes.includes(delimiter === ',' ? QUOTE : COMMA);
+  return commas ? ['.', ','] : ['.'];
 }
 
 function refuseWithoutRows(

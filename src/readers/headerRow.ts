@@ -30,9 +30,16 @@ export function findHeader(
 ): HeaderRow {
   const header = fixed ?? headerIndex(records, classes, width);
   const units = hasUnitsBelow(classes, header, width) ? header + 1 : null;
-  const first = classes.findIndex(row => looksLikeData(row, numericColumns(classes, width, 0), width));
-  const data = header >= 0 ? (units ?? header) + 1 : fixed === null ? Math.max(0, first) : 0;
+  const data = header >= 0 ? (units ?? header) + 1 : fixed === null ? firstData(classes, width) : 0;
   return { header, units, data, numeric: numericColumns(classes.slice(data), width, Infinity) };
+}
+
+function firstData(classes: Classes, width: number): number {
+  const numeric = numericColumns(classes, width, Infinity);
+  return Math.max(
+    0,
+    classes.findIndex(row => looksLikeData(row, numeric, width)),
+  );
 }
 
 function headerIndex(records: readonly HeadRecord[], classes: Classes, width: number): number {
@@ -62,19 +69,27 @@ function headerIndex(records: readonly HeadRecord[], classes: Classes, width: nu
 
 /**
  * Columns of numbers, at least as many as words, over all records of this width or, where a preamble of the same width
- * stands above, over the end of them.
+ * stands above, over the end of them: half, a quarter, … down to `shortestEnd`.
  */
 function numericColumns(classes: Classes, width: number, shortestEnd: number): readonly number[] {
   const rows = classes.filter(row => row.length === width);
-  return Array.from({ length: width }, (_, column) => column).filter(column => {
-    for (let end = rows.length; end === rows.length || end >= shortestEnd; end = Math.floor(end / 2)) {
-      const found = rows.slice(rows.length - end).map(row => row[column]);
-      const numbers = found.filter(isNumber).length;
-      if (numbers > 0 && numbers >= found.filter(one => one === 'text').length) return true;
-      if (end === 0) return false;
+  const ends = new Set([rows.length]);
+  for (let end = rows.length >> 1; end >= shortestEnd && end > 0; end >>= 1) ends.add(end);
+  const numeric: number[] = [];
+  for (let column = 0; column < width; column++) {
+    let numbers = 0;
+    let texts = 0;
+    for (let end = 1; end <= rows.length; end++) {
+      const found = rows[rows.length - end]?.[column];
+      if (isNumber(found)) numbers++;
+      else if (found === 'text') texts++;
+      if (numbers > 0 && numbers >= texts && ends.has(end)) {
+        numeric.push(column);
+        break;
+      }
     }
-    return false;
-  });
+  }
+  return numeric;
 }
 
 /** How many columns have something in them. */

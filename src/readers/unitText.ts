@@ -7,6 +7,7 @@ const UNIT = new RegExp(`^${ONE}(?:(?: ?[/·*⋅×] ?| )${ONE})*$`);
 const BRACKETED = /^(?:\(([^()]{1,24})\)|\[([^[\]]{1,24})\])$/;
 const IN_HEADER = /^(.*\S)\s*(?:\(([^()]{1,24})\)|\[([^[\]]{1,24})\])\s*$/s;
 const QUOTIENT = /^(.*\S)\s+\/\s+(\S.{0,23})$/s;
+const LONGEST = 24;
 const UNITLESS = /^(?:-|–|—|1|\(-\)|\[-\]|n\/?a|none|units?:?|einheit(?:en)?:?)$/i;
 
 /** The unit a cell of a units row names: (MPa), [mg/L], °C; '' for a cell that says there is none; null: no unit. */
@@ -15,7 +16,7 @@ export function unitOfCell(text: string): string | null {
   if (cell === '' || UNITLESS.test(cell)) return '';
   const bracketed = BRACKETED.exec(cell);
   if (bracketed !== null) return (bracketed[1] ?? bracketed[2] ?? '').trim();
-  return UNIT.test(cell) ? cell : null;
+  return cell.length <= LONGEST && UNIT.test(cell) ? cell : null;
 }
 
 /** The unit at the end of a header: Mass (mg), Mass [mg], Mass / mg; null: none. */

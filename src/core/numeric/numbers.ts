@@ -24,28 +24,29 @@ export function valueAt(numbers: Numbers, i: number): number {
 /** The doubles nearest to all values, in order. */
 export function nearestDoubles(numbers: Numbers): Float64Array {
   if (numbers.form === 'wide' && numbers.exact === null) return numbers.offsets;
-  if (numbers.form === 'steps') {
-    const { steps, shift } = numbers;
-    const scale = exactScale(numbers.decimals, numbers.per);
-    if (
-      scale !== null &&
-      isBelow(shift, LARGEST_STEP) &&
-      steps.every(step => isExactSum(Number(shift), step))
-    ) {
-      const base = Number(shift);
-      return Float64Array.from(steps, step => (base + step) / scale);
-    }
+  const doubles = new Float64Array(countOf(numbers));
+  const scale = exactScale(numbers.decimals, numbers.per);
+  const base = Number(numbers.shift);
+  const canAdd = numbers.form === 'steps' && scale !== null && Math.abs(base) < LARGEST_STEP;
+  for (let i = 0; i < doubles.length; i++) {
+    const sum = canAdd ? base + (numbers.steps[i] as number) : Infinity;
+    doubles[i] = canAdd && Math.abs(sum) < LARGEST_STEP ? sum / scale : valueAt(numbers, i);
   }
-  return Float64Array.from({ length: countOf(numbers) }, (_, i) => valueAt(numbers, i));
+  return doubles;
 }
 
 /** value[i] − shift / (10^decimals · per) of all values, each rounded once, in units of the values. */
 export function offsetsOf(numbers: Numbers): Float64Array {
   if (numbers.form === 'wide') return numbers.offsets;
+  const { steps } = numbers;
+  const offsets = new Float64Array(steps.length);
   const scale = exactScale(numbers.decimals, numbers.per);
-  if (scale !== null) return Float64Array.from(numbers.steps, step => step / scale);
   const divisor = scaleOf(numbers.decimals, numbers.per);
-  return Float64Array.from(numbers.steps, step => quotient(BigInt(step), divisor));
+  for (let i = 0; i < steps.length; i++) {
+    const step = steps[i] as number;
+    offsets[i] = scale === null ? quotient(BigInt(step), divisor) : step / scale;
+  }
+  return offsets;
 }
 
 /**
@@ -165,7 +166,3 @@ function exactScale(decimals: number, per: number | bigint): number | null {
   const scale = power * Number(per);
   return scale < LARGEST_STEP ? scale : null;
 }
-
-const isBelow = (value: bigint, limit: number): boolean => value < BigInt(limit) && value > -BigInt(limit);
-
-const isExactSum = (base: number, step: number): boolean => Math.abs(base + step) < LARGEST_STEP;

@@ -91,7 +91,7 @@ export class NumbersBuilder {
   }
 
   private push(step: number): void {
-    if (this.steps instanceof Int32Array && (step | 0) !== step) this.steps = Float64Array.from(this.steps);
+    if (this.steps instanceof Int32Array && (step | 0) !== step) this.steps = new Float64Array(this.steps);
     if (this.count === this.steps.length) {
       const grown = new (this.steps.constructor as new (length: number) => Steps)(this.count * 2);
       grown.set(this.steps);

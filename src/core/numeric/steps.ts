@@ -16,5 +16,5 @@ export const scaleOf = (decimals: number, per: number | bigint): bigint =>
 /** The same steps in four bytes each where they fit, else as they are. */
 export function compactSteps(steps: Float64Array): Steps {
   for (const step of steps) if (step >= INT32_LIMIT || step < -INT32_LIMIT) return steps;
-  return Int32Array.from(steps);
+  return new Int32Array(steps);
 }
