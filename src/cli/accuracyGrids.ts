@@ -1,8 +1,16 @@
 import { betaQuantile } from '../core/numeric/betaQuantile';
+import { chiSquareLowerTail, chiSquareUpperTail } from '../core/numeric/chiSquare';
 import { fLowerTail, fUpperTail } from '../core/numeric/fisherF';
+import { hypergeometricTails } from '../core/numeric/hypergeometric';
 import { incompleteBeta } from '../core/numeric/incompleteBeta';
 import { logGamma } from '../core/numeric/logGamma';
+import { noncentralTLowerTail, noncentralTUpperTail } from '../core/numeric/noncentralT';
 import { normalLowerTail, normalQuantile, normalUpperTail } from '../core/numeric/normal';
+import {
+  studentizedRangeLowerQuantile,
+  studentizedRangeLowerTail,
+  studentizedRangeUpperTail,
+} from '../core/numeric/studentizedRange';
 import { tLowerTail, tUpperQuantile, tUpperTail } from '../core/numeric/studentT';
 
 /** A grid of truth: `cols` names the arguments, then what was computed of them to many digits; one row a point. */
@@ -17,6 +25,9 @@ type Of = (...values: number[]) => number;
 
 /** t with lower tail p, through the tail that is the smaller one. */
 const tQuantile: Of = (p = NaN, df = NaN) => (p <= 0.5 ? -tUpperQuantile(p, df) : tUpperQuantile(1 - p, df));
+
+const fisher = ([a = NaN, b = NaN, c = NaN, d = NaN]: readonly number[]) =>
+  hypergeometricTails(a, a + b + c + d, a + b, a + c);
 
 /** What is computed of the arguments for each column of truth; named by the columns of the grid files. */
 const functions: Readonly<Record<string, Readonly<Record<string, Of>>>> = {
@@ -36,6 +47,28 @@ const functions: Readonly<Record<string, Readonly<Record<string, Of>>>> = {
     upper: (x = NaN, a = NaN, b = NaN) => incompleteBeta(x, 1 - x, a, b).upper,
   },
   'p,a,b': { x: (p = NaN, a = NaN, b = NaN) => betaQuantile(p, a, b) },
+  'x,k': {
+    sf: (x = NaN, df = NaN) => chiSquareUpperTail(x, df),
+    cdf: (x = NaN, df = NaN) => chiSquareLowerTail(x, df),
+  },
+  't,df,ncp': {
+    cdf: (t = NaN, df = NaN, ncp = NaN) => noncentralTLowerTail(t, df, ncp),
+    sf: (t = NaN, df = NaN, ncp = NaN) => noncentralTUpperTail(t, df, ncp),
+  },
+  'q,k,df': {
+    sf: (q = NaN, k = NaN, df = NaN) => studentizedRangeUpperTail(q, k, df),
+    cdf: (q = NaN, k = NaN, df = NaN) => studentizedRangeLowerTail(q, k, df),
+  },
+  'p,k,df': { q: (p = NaN, k = NaN, df = NaN) => studentizedRangeLowerQuantile(p, k, df) },
+  'x,N,K,n': {
+    lower: (x = NaN, N = NaN, K = NaN, n = NaN) => hypergeometricTails(x, N, K, n).lower,
+    upper: (x = NaN, N = NaN, K = NaN, n = NaN) => hypergeometricTails(x, N, K, n).upper,
+  },
+  'a,b,c,d': {
+    two: (...table: number[]) => fisher(table).twoSided,
+    less: (...table: number[]) => fisher(table).lower,
+    greater: (...table: number[]) => fisher(table).upper,
+  },
   x: { v: (x = NaN) => logGamma(x) },
 };
 

@@ -1,7 +1,6 @@
-import { devianceTerm, logBend } from './devianceTerm';
+import { deviancePower } from './deviance';
 import { stirlingError } from './stirlingError';
 
-const SADDLE_WITHIN = 0.3;
 const MOST_TERMS = 100_000;
 const CONVERGED = 1.2e-16;
 
@@ -33,16 +32,9 @@ export function incompleteBeta(x: number, y: number, a: number, b: number, lambd
  */
 export function betaPrefactor(x: number, y: number, a: number, b: number, lambda = a * y - b * x): number {
   const n = a + b;
-  const ofA = devianceFrom(lambda / a, a, n * x);
-  const ofB = devianceFrom(-lambda / b, b, n * y);
-  const stirling = stirlingError(n) - stirlingError(a) - stirlingError(b);
-  // One exponential each: a sum of large exponents would be rounded once more.
-  return Math.sqrt(((a / n) * b) / (2 * Math.PI)) * Math.exp(stirling) * Math.exp(-ofA) * Math.exp(-ofB);
-}
-
-function devianceFrom(e: number, count: number, expected: number): number {
-  // As e nears 1 the tangent form loses 1 − e; the quotient keeps it.
-  return e < SADDLE_WITHIN ? count * logBend(e) : devianceTerm(count, expected);
+  const stirling = Math.exp(stirlingError(n) - stirlingError(a) - stirlingError(b));
+  const powers = deviancePower(a, n * x, lambda) * deviancePower(b, n * y, -lambda);
+  return Math.sqrt(((a / n) * b) / (2 * Math.PI)) * stirling * powers;
 }
 
 /** BFRAC of TOMS 708: the fraction that times the prefactor gives the tail below x. λ = a·y − b·x must be ≥ 0. */
