@@ -14,8 +14,9 @@ export function deviancePower(count: number, expected: number, offset: number): 
   if (u > SERIES_WITHIN) return Math.exp(offset - count * Math.log(count / expected));
   if (u < -SERIES_WITHIN) return Math.exp(-count * bend(offset / count));
   const lead = (offset * offset) / sum;
-  const rest = productRest(offset, offset, lead, sum) / sum;
-  return Math.exp(-lead) * Math.exp(-(rest + 2 * count * cubicOn(u)));
+  const rest = productRest(offset, offset, lead, sum) / sum + 2 * count * cubicOn(u);
+  // One exponential each keeps the digits of both; where the first would be 0 there are none to keep.
+  return lead > 600 ? Math.exp(-(lead + rest)) : Math.exp(-lead) * Math.exp(-rest);
 }
 
 /** −ln(1 − e) − e for e < −⅔, where the two parts no longer cancel. */

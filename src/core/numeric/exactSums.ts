@@ -5,9 +5,10 @@ import type { Steps } from './steps';
 export function exactSumOfOffsets(numbers: Numbers): bigint | null {
   if (numbers.form === 'steps') return exactSum(numbers.steps);
   if (numbers.exact === null) return null;
+  const { exact } = numbers;
   let total = 0n;
-  for (const integer of numbers.exact) total += integer;
-  return total - numbers.shift * BigInt(numbers.exact.length);
+  for (let i = 0; i < exact.length; i++) total += exact[i] as bigint;
+  return total - numbers.shift * BigInt(exact.length);
 }
 
 /**

@@ -1,6 +1,7 @@
 import type { Numbers } from '../model/cells';
+import { orderOf, type Integers } from './integerOrder';
 import { quotient } from './quotient';
-import { compactSteps, LARGEST_STEP, scaleOf } from './steps';
+import { compactSteps, LARGEST_STEP, powerOfTen, scaleOf } from './steps';
 
 const LARGEST = BigInt(LARGEST_STEP);
 
@@ -15,56 +16,56 @@ export interface Frame {
  * Numbers from whole numbers of 1 / (10^decimals · per), several lists in one frame: as steps from the shift when all of
  * them fit 53 bits, else every list in wide form with one common order.
  */
-export function numbersFromIntegers(lists: readonly (readonly bigint[])[], frame: Frame): Numbers[] {
+export function numbersFromIntegers(lists: readonly Integers[], frame: Frame): Numbers[] {
   const { decimals, per, shift } = frame;
-  const fits = per < LARGEST && lists.every(list => list.every(value => isSmall(value - shift)));
-  if (!fits) return wideNumbers(lists, frame);
-  return lists.map(list => ({
+  const steps = per < LARGEST ? lists.map(list => stepsOf(list, shift)) : [];
+  const fitting = steps.flatMap(list => list ?? []);
+  if (fitting.length < lists.length) return wideNumbers(lists, frame);
+  return fitting.map(list => ({
     form: 'steps',
     decimals,
     per: Number(per),
     shift,
-    steps: compactSteps(Float64Array.from(list, value => Number(value - shift))),
+    steps: compactSteps(list),
   }));
 }
 
-function wideNumbers(lists: readonly (readonly bigint[])[], { decimals, per, shift }: Frame): Numbers[] {
+/** The integers less the shift; null when one of them needs more than 53 bits. */
+function stepsOf(integers: Integers, shift: bigint): Float64Array | null {
+  const steps = new Float64Array(integers.length);
+  for (let i = 0; i < steps.length; i++) {
+    const step = (integers[i] as bigint) - shift;
+    if (step >= LARGEST || step <= -LARGEST) return null;
+    steps[i] = Number(step);
+  }
+  return steps;
+}
+
+function wideNumbers(lists: readonly Integers[], frame: Frame): Numbers[] {
+  const offsets = lists.map(list => offsetsOf(list, frame));
+  let orders: readonly Float64Array[] | null = null;
+  return lists.map((exact, index) => ({
+    form: 'wide',
+    ...frame,
+    offsets: offsets[index] ?? new Float64Array(),
+    exact,
+    // ranks are seldom asked for, and cost a sort
+    get order(): Float64Array {
+      orders ??= orderOf(lists, offsets);
+      return orders[index] ?? new Float64Array();
+    },
+  }));
+}
+
+/** (integer − shift) / (10^decimals · per), each rounded once. */
+function offsetsOf(integers: Integers, { decimals, per, shift }: Frame): Float64Array {
+  const offsets = new Float64Array(integers.length);
   const scale = scaleOf(decimals, per);
-  const all = lists.flat();
-  const offsets = Float64Array.from(all, value => quotient(value - shift, scale));
-  const order = denseRanks(all, offsets);
-  let end = 0;
-  return lists.map(exact => {
-    const start = end;
-    end += exact.length;
-    return {
-      form: 'wide',
-      decimals,
-      per,
-      shift,
-      offsets: offsets.slice(start, end),
-      order: order.slice(start, end),
-      exact,
-    };
-  });
+  const isDecimal = scale === powerOfTen(decimals);
+  for (let i = 0; i < offsets.length; i++) {
+    const step = (integers[i] as bigint) - shift;
+    // the language reads a decimal to the nearest double, quicker than big integers divide
+    offsets[i] = isDecimal ? Number(`${step.toString()}e-${decimals}`) : quotient(step, scale);
+  }
+  return offsets;
 }
-
-/** Rounding keeps the order, so the exact values need to be looked at only where their doubles are equal. */
-function denseRanks(exact: readonly bigint[], offsets: Float64Array): Int32Array {
-  const at = (index: number): bigint => exact[index] ?? 0n;
-  const sorted = Int32Array.from(exact, (_, index) => index).sort((a, b) => {
-    const difference = (offsets[a] ?? 0) - (offsets[b] ?? 0);
-    if (difference !== 0) return difference;
-    return at(a) < at(b) ? -1 : Number(at(a) > at(b));
-  });
-  const ranks = new Int32Array(exact.length);
-  let rank = 0;
-  sorted.forEach((index, place) => {
-    const before = sorted[place - 1];
-    if (before !== undefined && at(before) !== at(index)) rank++;
-    ranks[index] = rank;
-  });
-  return ranks;
-}
-
-const isSmall = (value: bigint): boolean => value < LARGEST && value > -LARGEST;

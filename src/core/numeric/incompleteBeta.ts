@@ -19,11 +19,17 @@ export function incompleteBeta(x: number, y: number, a: number, b: number, lambd
   if (!(x > 0)) return { lower: 0, upper: 1 };
   if (!(y > 0)) return { lower: 1, upper: 0 };
   if (lambda >= 0) {
-    const lower = betaPrefactor(x, y, a, b, lambda) * continuedFraction(x, y, a, b, lambda);
+    const lower = smallerTail(x, y, a, b, lambda);
     return { lower, upper: 1 - lower };
   }
-  const upper = betaPrefactor(y, x, b, a, -lambda) * continuedFraction(y, x, b, a, -lambda);
+  const upper = smallerTail(y, x, b, a, -lambda);
   return { lower: 1 - upper, upper };
+}
+
+/** Below the smallest double the tail is 0, whatever the fraction would say. */
+function smallerTail(x: number, y: number, a: number, b: number, lambda: number): number {
+  const prefactor = betaPrefactor(x, y, a, b, lambda);
+  return prefactor === 0 ? 0 : prefactor * continuedFraction(x, y, a, b, lambda);
 }
 
 /**

@@ -1,6 +1,7 @@
 import type { Numbers } from '../model/cells';
 import { decimalText } from './decimal';
 import { numbersFromIntegers } from './fromIntegers';
+import type { Integers } from './integerOrder';
 import { quotient } from './quotient';
 import { EXACT_POWERS, LARGEST_STEP, scaleOf, type Steps } from './steps';
 
@@ -76,13 +77,26 @@ function decimalsToDivide(per: bigint): number | null {
 /** The values at these indices, in their order and in the same frame. */
 export function gather(numbers: Numbers, rows: Int32Array): Numbers {
   if (numbers.form === 'steps') return { ...numbers, steps: pick(numbers.steps, rows) };
-  const { exact } = numbers;
+  const { decimals, per, shift, offsets, exact } = numbers;
+  let order: Steps | null = null;
   return {
-    ...numbers,
-    offsets: pick(numbers.offsets, rows),
-    order: pick(numbers.order, rows),
-    exact: exact === null ? null : Array.from(rows, row => exact[row] ?? 0n),
+    form: 'wide',
+    decimals,
+    per,
+    shift,
+    offsets: pick(offsets, rows),
+    exact: exact === null ? null : pickIntegers(exact, rows),
+    get order(): Steps {
+      return (order ??= pick(numbers.order, rows));
+    },
   };
+}
+
+function pickIntegers(integers: Integers, rows: Int32Array): Integers {
+  if (!(integers instanceof BigInt64Array)) return Array.from(rows, row => integers[row] ?? 0n);
+  const picked = new BigInt64Array(rows.length);
+  for (let i = 0; i < rows.length; i++) picked[i] = integers[rows[i] ?? 0] ?? 0n;
+  return picked;
 }
 
 function pick<T extends Steps>(values: T, rows: Int32Array): T {

@@ -1,7 +1,8 @@
 import type { Numbers } from '../model/cells';
 import { parseDecimal } from './decimal';
 import { numbersFromIntegers } from './fromIntegers';
-import { EXACT_POWERS, LARGEST_STEP, type Steps } from './steps';
+import { IntegersBuilder } from './integersBuilder';
+import { EXACT_POWERS, LARGEST_STEP, powerOfTen, type Steps } from './steps';
 
 const FIRST_CAPACITY = 1024;
 
@@ -15,7 +16,7 @@ export class NumbersBuilder {
   private shiftDouble = NaN;
   private steps: Steps;
   private count = 0;
-  private integers: bigint[] | null = null;
+  private integers: IntegersBuilder | null = null;
 
   /** @param expected how many values will come, if that is known roughly */
   constructor(expected = FIRST_CAPACITY) {
@@ -23,7 +24,7 @@ export class NumbersBuilder {
   }
 
   get length(): number {
-    return this.count;
+    return this.integers?.length ?? this.count;
   }
 
   /** Adds mantissa / 10^decimals, the mantissa a whole number below 2^53 in size. */
@@ -51,21 +52,23 @@ export class NumbersBuilder {
   /** Adds digits / 10^decimals. */
   addInteger(digits: bigint, decimals: number): void {
     if (decimals > this.decimals) this.refine(decimals);
-    const integer = digits * 10n ** BigInt(this.decimals - decimals);
-    if (this.shift === null) {
-      this.shift = integer;
-      this.shiftDouble = isSafe(integer) ? Number(integer) : NaN;
+    const integer = decimals === this.decimals ? digits : digits * powerOfTen(this.decimals - decimals);
+    this.shift ??= this.takeShift(integer);
+    if (this.integers === null) {
+      const step = integer - this.shift;
+      if (isSafe(step)) {
+        this.push(Number(step));
+        return;
+      }
+      this.widen();
     }
-    const step = integer - this.shift;
-    if (this.integers === null && isSafe(step)) this.push(Number(step));
-    else this.widened().push(step);
-    if (this.integers !== null) this.count = this.integers.length;
+    this.integers?.push(integer);
   }
 
   /** Adds a place that holds no value. */
   addNothing(): void {
     if (this.integers === null) this.push(0);
-    else this.count = this.integers.push(0n);
+    else this.integers.push(this.shift ?? 0n);
   }
 
   /** The numbers gathered; the builder must not be used afterwards. */
@@ -73,21 +76,12 @@ export class NumbersBuilder {
     const shift = this.shift ?? 0n;
     const { decimals, integers, count, steps } = this;
     if (integers !== null) {
-      const [numbers] = numbersFromIntegers([integers.map(step => step + shift)], {
-        decimals,
-        per: 1n,
-        shift,
-      });
+      const [numbers] = numbersFromIntegers([integers.build()], { decimals, per: 1n, shift });
       if (numbers !== undefined) return numbers;
     }
-    const roomy = steps.length > count * 1.125 + FIRST_CAPACITY;
-    return {
-      form: 'steps',
-      decimals,
-      per: 1,
-      shift,
-      steps: roomy ? steps.slice(0, count) : steps.subarray(0, count),
-    };
+    const isRoomy = steps.length > count * 1.125 + FIRST_CAPACITY;
+    const own = isRoomy ? steps.slice(0, count) : steps.subarray(0, count);
+    return { form: 'steps', decimals, per: 1, shift, steps: own };
   }
 
   private push(step: number): void {
@@ -100,40 +94,43 @@ export class NumbersBuilder {
     this.steps[this.count++] = step;
   }
 
+  private takeShift(integer: bigint): bigint {
+    this.shiftDouble = isSafe(integer) ? Number(integer) : NaN;
+    return integer;
+  }
+
   /** Makes the step of the column smaller. */
   private refine(decimals: number): void {
     const by = decimals - this.decimals;
     this.decimals = decimals;
-    const factor = 10n ** BigInt(by);
-    if (this.shift !== null) {
-      this.shift *= factor;
-      this.shiftDouble = isSafe(this.shift) ? Number(this.shift) : NaN;
-    }
+    if (this.shift !== null) this.shift = this.takeShift(this.shift * powerOfTen(by));
     if (this.integers !== null) {
-      this.integers = this.integers.map(step => step * factor);
+      this.integers.multiply(powerOfTen(by));
       return;
     }
+    const { steps, count } = this;
     const power = EXACT_POWERS[by] ?? Infinity;
-    const finer = Float64Array.from(this.steps.subarray(0, this.count), step =>
-      step === 0 ? 0 : step * power,
-    );
-    if (finer.some(step => !(Math.abs(step) < LARGEST_STEP))) {
-      this.integers = Array.from(this.steps.subarray(0, this.count), step => BigInt(step) * factor);
-      return;
+    const finer = new Float64Array(steps.length);
+    let largest = 0;
+    for (let i = 0; i < count; i++) {
+      const step = steps[i] as number;
+      finer[i] = step === 0 ? 0 : step * power;
+      largest = Math.max(largest, Math.abs(finer[i] as number));
     }
-    const fitsInt32 = this.steps instanceof Int32Array && finer.every(step => (step | 0) === step);
-    const Steps = fitsInt32 ? Int32Array : Float64Array;
-    const refined = new Steps(Math.max(this.steps.length, FIRST_CAPACITY));
-    refined.set(finer);
-    this.steps = refined;
+    if (largest >= LARGEST_STEP) this.widen(powerOfTen(by));
+    else this.steps = steps instanceof Int32Array && largest < INT32_LIMIT ? new Int32Array(finer) : finer;
   }
 
-  private widened(): bigint[] {
-    this.integers ??= Array.from(this.steps.subarray(0, this.count), step => BigInt(step));
-    return this.integers;
+  /** Goes over to big integers; the steps so far are `factor` of the smallest step each. */
+  private widen(factor = 1n): void {
+    const shift = this.shift ?? 0n;
+    this.integers = new IntegersBuilder(this.steps.length);
+    for (let i = 0; i < this.count; i++) this.integers.push(shift + BigInt(this.steps[i] as number) * factor);
+    this.steps = new Int32Array();
   }
 }
 
 const SAFE = BigInt(LARGEST_STEP);
+const INT32_LIMIT = 2 ** 31;
 
 const isSafe = (integer: bigint): boolean => integer < SAFE && integer > -SAFE;

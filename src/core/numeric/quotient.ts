@@ -1,7 +1,11 @@
 const SAFE = 9007199254740992n; // 2^53
 const KEPT_BITS = 66; // 53 of the result, and enough behind them that one sticky bit decides the rounding
 
-const bitLength = (n: bigint): number => n.toString(2).length;
+/** Number of bits, to within three. */
+function bitLength(n: bigint): number {
+  const size = Number(n);
+  return size === Infinity ? n.toString(16).length * 4 : Math.ceil(Math.log2(size));
+}
 
 /**
  * The double nearest to numerator / denominator (ties to even), rounded once.
