@@ -3,9 +3,9 @@ import type { CellRef } from './problem';
 /**
  * Decimals as written. value[i] = (shift + steps[i]) / (10^decimals · per), exactly: ties, equality, sums and
  * permutations are integer arithmetic. `per` is 1, but for unit means the least common multiple of the counts.
- * 'wide' only when a value needs more than 53 bits after the shift: offsets[i] is (exact[i] − shift) / (10^decimals ·
- * per) rounded once (in units of the value), `order` ranks the exact values (comparable across samples of one frame), so
- * ties and ranks stay exact. `exact` is null for computed doubles such as logs: there shift is 0 and offsets the values.
+ * 'wide' only when a value needs more than 53 bits after the shift: exact[i] is value[i] · 10^decimals · per, offsets[i]
+ * is value[i] − shift / (10^decimals · per) rounded once, and `order` stands in the order of the exact values, equal
+ * exactly where they are, across samples of one frame: ties and ranks stay exact. `exact` is null for computed doubles such as logs: there shift is 0 and offsets the values.
  */
 export type Numbers =
   | {
@@ -22,7 +22,7 @@ export type Numbers =
       readonly shift: bigint;
       readonly offsets: Float64Array;
       readonly order: Int32Array | Float64Array;
-      readonly exact: readonly bigint[] | null;
+      readonly exact: readonly bigint[] | BigInt64Array | null;
     };
 
 /** What one cell of a number column holds. Below and Above are censored readings such as <0.02 (the limit is the value). */
