@@ -1,7 +1,9 @@
+import { powerOfTen } from '../core/numeric/steps';
 import { MINUS, PLUS, SPACE, ZERO } from './byteCodes';
 
 const MOST_DIGITS = 16;
 const LARGEST = 2 ** 53;
+const HALF_OF_LONG = 15;
 
 /** The number a cell held: mantissa / 10^decimals. */
 export class PlainNumber {
@@ -42,6 +44,34 @@ export class PlainNumber {
     this.mantissa = sign === MINUS ? -mantissa : mantissa;
     this.decimals = decimals;
     return true;
+  }
+
+  /**
+   * Reads what `read` could not because it has more digits than a double holds, up to 30.
+   * @returns the digits as a whole number, with `decimals` set; null for everything else
+   */
+  readLong(bytes: Uint8Array, start: number, end: number, mark: number): bigint | null {
+    const isNegative = bytes[start] === MINUS;
+    let high = 0;
+    let low = 0;
+    let digits = 0;
+    let decimals = -1;
+    for (let at = start + (isNegative ? 1 : 0); at < end; at++) {
+      const byte = bytes[at] as number;
+      const digit = byte - ZERO;
+      if (digit >= 0 && digit <= 9) {
+        if (digits < HALF_OF_LONG) high = high * 10 + digit;
+        else low = low * 10 + digit;
+        digits++;
+        if (decimals >= 0) decimals++;
+      } else if (byte === mark && decimals < 0) decimals = 0;
+      else return null;
+    }
+    const behind = digits - HALF_OF_LONG;
+    if (behind <= 0 || behind > HALF_OF_LONG) return null;
+    this.decimals = Math.max(0, decimals);
+    const integer = BigInt(high) * powerOfTen(behind) + BigInt(low);
+    return isNegative ? -integer : integer;
   }
 
   /** Whether it is one of these numbers. */

@@ -40,10 +40,16 @@ export class NumberSink implements CellSink {
 
   take(bytes: Uint8Array, start: number, end: number, line: number): void {
     const { number } = this;
-    const isPlain = number.read(bytes, start, end, this.mark) && !number.isAmong(this.missingNumbers);
-    if (isPlain) this.builder.add(number.mantissa, number.decimals);
-    else this.takeText(this.decoder.decode(bytes.subarray(start, end)), line);
+    if (number.read(bytes, start, end, this.mark) && !number.isAmong(this.missingNumbers)) {
+      this.builder.add(number.mantissa, number.decimals);
+    } else this.takeUnusual(bytes, start, end, line);
     this.rows++;
+  }
+
+  private takeUnusual(bytes: Uint8Array, start: number, end: number, line: number): void {
+    const long = this.missingNumbers.length > 0 ? null : this.number.readLong(bytes, start, end, this.mark);
+    if (long !== null) this.builder.addInteger(long, this.number.decimals);
+    else this.takeText(this.decoder.decode(bytes.subarray(start, end)), line);
   }
 
   absent(): void {
