@@ -5,7 +5,7 @@ import { readCellText, UNUSABLE, type CellFormat } from './cellText';
 import { Levels } from './levels';
 import { PlainNumber } from './numberCell';
 
-export const MOST_DISTINCT = 1000;
+const MOST_DISTINCT = 1000;
 const LABELS_NAMED = 50;
 const NEARLY = 0.9;
 const MISSING = 'missing';
