@@ -19,7 +19,7 @@ export async function flow(
   await picture('question');
   await answerAll();
   await picture('panel');
-  assert.ok(await panel.locator('svg[role=img]').first().isVisible(), 'the figure is drawn');
+  assert.ok(await panel.getByRole('img').first().isVisible(), 'the figure is drawn');
   assert.ok((await panel.locator('table').count()) > 0, 'the numbers stand in a table');
   assert.deepEqual(refusals, [], 'the security policy of the panel refuses nothing');
 

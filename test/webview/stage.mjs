@@ -2,13 +2,14 @@
 import { cp, mkdtemp, readdir, rm } from 'node:fs/promises';
 import { tmpdir } from 'node:os';
 import path from 'node:path';
+import { setTimeout } from 'node:timers/promises';
 import { root } from '../../.config/command.mjs';
 import { openWorkbench } from './workbench.mjs';
 
 /** A flow file exports `promise` (what is shown to hold), `flow(workbench)`, and where needed `options` of openWorkbench. */
-export default async function stage() {
+export default async function stage(only = '') {
   const count = { passed: 0, failed: 0 };
-  for (const name of (await readdir(import.meta.dirname)).filter(file => file.endsWith('.flow.mjs'))) {
+  for (const name of (await readdir(import.meta.dirname)).filter(file => file.endsWith(`${only}.flow.mjs`))) {
     const { promise, flow, options } = await import(`./${name}`);
     const error = await once(flow, name.replace('.flow.mjs', ''), options);
     count[error === undefined ? 'passed' : 'failed']++;
@@ -24,7 +25,7 @@ async function once(flow, name, options) {
   try {
     await cp(path.join(root, 'media', 'demo'), workspace, { recursive: true });
     workbench = await openWorkbench(workspace, options);
-    await flow(workbench, workspace);
+    await Promise.race([flow(workbench, workspace), tooLate()]);
     return undefined;
   } catch (error) {
     await workbench?.picture(`${name}-failed`).catch(() => undefined);
@@ -33,4 +34,9 @@ async function once(flow, name, options) {
     await workbench?.close();
     await rm(folder, { recursive: true, force: true, maxRetries: 5 });
   }
+}
+
+async function tooLate() {
+  await setTimeout(120_000, undefined, { ref: false });
+  throw new Error('the flow did not come to its end within two minutes');
 }
