@@ -52,6 +52,7 @@ const buttonWords = (t: Say): ButtonWords => ({
   takeBack: t('Take back'),
   copyBlock: t('Copy block'),
   full: t('Every number in full'),
+  values: t('Every value with its line: go there, or leave the row out'),
   ask: t('ask'),
   theFile: t('the file:'),
   leftOut: t('left out:'),

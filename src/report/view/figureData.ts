@@ -3,6 +3,7 @@ import type { Comparison } from '../../core/model/comparison';
 import type { Sample } from '../../core/model/groups';
 import type { CellRef } from '../../core/model/problem';
 import type { Say } from '../../core/model/say';
+import { withMinus } from '../numbersPrinted';
 import { shareWords } from '../words/count';
 import { differenceName, groupLabel } from '../words/groupLabels';
 import { showLabel } from '../words/label';
@@ -60,7 +61,13 @@ function groupFigure(
       const cell = cellOf(sample.rows[at] ?? 0);
       const unit = isUnit ? group.units?.[at]?.path.map(showLabel).join(', ') : undefined;
       const place = unit ?? (cell === null ? '' : placeWords(cell, settings.files, t));
-      return { value, label: place, at: isUnit ? null : cell, far: isFar(value, group) };
+      return {
+        value,
+        text: withMinus(String(value)),
+        label: place,
+        at: isUnit ? null : cell,
+        far: isFar(value, group),
+      };
     });
   };
   const averaged = group.units !== null;
@@ -71,7 +78,7 @@ function groupFigure(
     points:
       density === null
         ? pointsOf(group.sample, averaged)
-        : density.outside.map(value => ({ value, label: '', at: null, far: true })),
+        : density.outside.map(value => ({ value, text: '', label: '', at: null, far: true })),
     small: crowded || !averaged ? [] : pointsOf(group.readingSample, false),
     density: density?.bins ?? null,
     mean: meanInterval(group, settings.confidence),

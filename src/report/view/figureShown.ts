@@ -18,6 +18,8 @@ export interface IntervalShown {
 /** One value drawn as a point. `at` is its cell, null where there is none (unit means, summaries). */
 export interface PointShown {
   readonly value: number;
+  /** As it stands in the list of values. */
+  readonly text: string;
   readonly label: string;
   readonly at: CellRef | null;
   /** Outside the fences of its group (quartiles less and plus 1.5 times their distance): drawn open. */

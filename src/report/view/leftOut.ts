@@ -20,6 +20,7 @@ export function leftOutOf(comparison: Comparison, table: Table | null, scale: Sc
       return {
         sentence: leftOutSentence(row, place, scale, t),
         short: t('{0}, {1}: {2}', place, showLabel(row.value), visible(row.reason)),
+        place,
         file: row.file,
         line: row.line,
         at: { file: row.file, line: row.line, field: field ?? 0 },

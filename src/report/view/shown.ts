@@ -149,6 +149,8 @@ export interface LeftOutShown {
     readonly sentence: string;
     /** "line 31, 731: tile cracked on the saw". */
     readonly short: string;
+    /** "line 31". */
+    readonly place: string;
     readonly file: number;
     readonly line: number;
     readonly at: CellRef;
@@ -206,6 +208,7 @@ export interface ButtonWords {
   readonly takeBack: string;
   readonly copyBlock: string;
   readonly full: string;
+  readonly values: string;
   readonly ask: string;
   readonly theFile: string;
   readonly leftOut: string;
