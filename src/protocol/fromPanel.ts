@@ -2,7 +2,7 @@ import * as v from 'valibot';
 import { checked } from './checked';
 import type { PanelAction } from '../report/panel/action';
 import { cellRefSchema, countSchema, lineSchema } from './places';
-import { noticeActions } from './toPanel';
+import { noticeActions, tools } from './toPanel';
 
 /** The page has loaded and listens. */
 export interface Ready {
@@ -22,12 +22,18 @@ export interface NoticeAct {
   readonly id: (typeof noticeActions)[number];
 }
 
+/** A button of the page's own was pressed. */
+export interface ToolUse {
+  readonly type: 'tool';
+  readonly id: (typeof tools)[number];
+}
+
 /** The place of the problem is to be shown. */
 export interface ShowProblem {
   readonly type: 'showProblem';
 }
 
-export type FromPanel = Ready | Act | NoticeAct | ShowProblem;
+export type FromPanel = Ready | Act | NoticeAct | ToolUse | ShowProblem;
 
 const actionSchema: v.GenericSchema<unknown, PanelAction> = v.variant('kind', [
   v.strictObject({
@@ -45,6 +51,7 @@ const fromPanelSchema: v.GenericSchema<unknown, FromPanel> = v.variant('type', [
   v.strictObject({ type: v.literal('ready') }),
   v.strictObject({ type: v.literal('act'), revision: countSchema, action: actionSchema }),
   v.strictObject({ type: v.literal('notice'), id: v.picklist(noticeActions) }),
+  v.strictObject({ type: v.literal('tool'), id: v.picklist(tools) }),
   v.strictObject({ type: v.literal('showProblem') }),
 ]);
 

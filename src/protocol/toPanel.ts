@@ -13,6 +13,14 @@ export interface Notice {
   readonly action: { readonly id: (typeof noticeActions)[number]; readonly label: string } | null;
 }
 
+export const tools = ['undo', 'redo', 'addToNotebook'] as const;
+
+/** A button of the page's own; it is there only while it can do something. */
+export interface Tool {
+  readonly id: (typeof tools)[number];
+  readonly label: string;
+}
+
 /** The whole of what a panel shows. A panel that is new, or comes back into sight, gets it anew. */
 export interface Show {
   readonly type: 'show';
@@ -22,6 +30,7 @@ export interface Show {
   readonly view: View | null;
   readonly problem: ShownProblem | null;
   readonly notices: readonly Notice[];
+  readonly tools: readonly Tool[];
   /** Words of the page's own: headings and labels that no view holds. */
   readonly words: { readonly problem: string; readonly showCell: string; readonly ready: string };
 }
@@ -50,6 +59,7 @@ const toPanelSchema: v.GenericSchema<unknown, ToPanel> = v.variant('type', [
         action: v.nullable(v.strictObject({ id: v.picklist(noticeActions), label: v.string() })),
       }),
     ),
+    tools: v.array(v.strictObject({ id: v.picklist(tools), label: v.string() })),
     words: v.strictObject({ problem: v.string(), showCell: v.string(), ready: v.string() }),
   }),
   v.strictObject({

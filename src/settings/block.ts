@@ -71,8 +71,21 @@ export function blockFrom(
   return { ...block, record: { id, replaces: replaces ?? 'none' } };
 }
 
-function dataOf({ comparison, table, files }: Answered, { createHasher }: Stamp): BlockData[] {
+/** The digest of the cells used of each file. */
+export function cellsOf(
+  { comparison, table, files }: Answered,
+  createHasher: () => Hasher,
+): readonly string[] {
+  if (table === null) return [];
+  return files.map((_, index) =>
+    cellsDigest(table, comparison.settings, createHasher, files.length > 1 ? index : null),
+  );
+}
+
+function dataOf(answered: Answered, { createHasher }: Stamp): BlockData[] {
+  const { comparison, files } = answered;
   const { settings, readings } = comparison;
+  const cells = cellsOf(answered, createHasher);
   const { reading } = settings;
   return files.map(({ path, bytes, sha256 }, index) => {
     const read = readings[index];
@@ -81,8 +94,7 @@ function dataOf({ comparison, table, files }: Answered, { createHasher }: Stamp)
       file: path,
       bytes,
       sha256,
-      cells:
-        table === null ? '' : cellsDigest(table, settings, createHasher, files.length > 1 ? index : null),
+      cells: cells[index] ?? '',
       encoding: read?.encoding ?? reading.encoding,
       delimiter: read?.delimiter ?? reading.delimiter,
       decimal: read?.decimal ?? reading.decimal,
@@ -139,7 +151,8 @@ function leftOutOf({ comparison, table, files }: Answered, { createHasher }: Sta
 
 function comparisonOf(settings: Settings, { sampling, reasons }: Provenance): BlockComparison {
   const thresholds = thresholdKeys(evidenceChecks);
-  const options = Object.entries(settings.options).map(([key, value]) => [key, plain(value)] as const);
+  const { 'ruled-out': ruledOut, ...others } = settings.options;
+  const options = Object.entries(others).map(([key, value]) => [key, plain(value)] as const);
   const set = options.filter(([key]) => thresholds.includes(key));
   return {
     measure: settings.measure,
@@ -150,6 +163,7 @@ function comparisonOf(settings: Settings, { sampling, reasons }: Provenance): Bl
     ...(settings.margin === null ? {} : { margin: [...settings.margin] }),
     ...(settings.matters === null ? {} : { matters: settings.matters }),
     ...Object.fromEntries(options.filter(([key]) => !thresholds.includes(key))),
+    ...(typeof ruledOut === 'string' ? { 'ruled-out': idsOf(ruledOut) } : {}),
     ...(set.length === 0 ? {} : { thresholds: Object.fromEntries(set) }),
     ...(Object.keys(reasons).length === 0 ? {} : { reasons: { ...reasons } }),
     sampling: sampling === '' ? 'not stated' : sampling,
@@ -219,6 +233,13 @@ const summaryOf = (
 /** Arrays of settings are readonly; those of a block are its own. */
 const plain = (value: string | number | boolean | readonly number[]): string | number | boolean | number[] =>
   typeof value === 'object' ? [...value] : value;
+
+/** Settings hold the ids as one text, a block one by one. */
+const idsOf = (text: string): string[] =>
+  text
+    .split(',')
+    .map(id => id.trim())
+    .filter(id => id !== '');
 
 const sameWords = (a: readonly string[], b: readonly string[]): boolean =>
   a.length === b.length && a.every((word, index) => word === b[index]);

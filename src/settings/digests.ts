@@ -5,6 +5,7 @@ import type { Hasher } from '../core/model/hasher';
 import type { Settings } from '../core/model/settings';
 import { Cell } from '../core/model/cells';
 import { cellState } from '../compare/measuredValues';
+import { rolesOf } from '../compare/roles';
 import { exactText } from '../core/numeric/numbers';
 
 type CreateHasher = () => Hasher;
@@ -14,7 +15,8 @@ const LINES_AT_ONCE = 4096;
 /**
  * SHA-256 of the cells used: for each used row in file order `label TAB value [TAB unit ids…] LF` in UTF-8; values as the
  * shortest exact decimals with a point, labels after merging, missing as empty, censored readings with their mark,
- * left-out rows absent. `file`: only the rows of that file. Anyone can repeat it with common tools.
+ * left-out rows absent. A row that is a summary has `n TAB mean TAB SD` (or `x TAB n`) for its value. `file`: only the rows
+ * of that file. Anyone can repeat it with common tools.
  */
 export function cellsDigest(
   table: Table,
@@ -23,13 +25,18 @@ export function cellsDigest(
   file: number | null = null,
 ): string {
   const { rows, group, state, groups, measured, ids } = selectRows(table, settings);
+  const summary = summaryColumns(table, settings);
   const hasher = createHasher();
   let lines: string[] = [];
   for (let at = 0; at < rows.length; at += 1) {
     const row = rows[at] ?? 0;
     if (state[at] === Entry.LeftOut || (file !== null && table.file(row) !== file)) continue;
     const index = group[at] ?? 0;
-    lines.push(cellLine(groups[index] ?? '', valueText(measured[index], row), ids, row));
+    const value =
+      summary === null
+        ? valueText(measured[index], row)
+        : summary.map(column => valueText(column, row)).join('\t');
+    lines.push(cellLine(groups[index] ?? '', value, ids, row));
     if (lines.length === LINES_AT_ONCE) {
       hasher.update(lines.join(''));
       lines = [];
@@ -61,6 +68,16 @@ export function recordId(text: string, createHasher: CreateHasher): string {
       .join(''),
   );
   return hasher.hex();
+}
+
+/** The columns that make up a summary, in the order in which they are digested; null where rows are values. */
+function summaryColumns(table: Table, settings: Settings): readonly Measured[] | null {
+  const { summary } = rolesOf(settings, table.fields);
+  if (summary === null) return null;
+  const fields = summary.x === null ? [summary.n, summary.mean, summary.sd] : [summary.x, summary.n];
+  return fields
+    .filter(field => field !== null)
+    .map(field => ({ kind: 'numbers', field, column: table.numbers(field) }));
 }
 
 function cellLine(label: string, value: string, ids: readonly LabelColumn[], row: number): string {

@@ -1,4 +1,4 @@
-import { TomlDate } from 'smol-toml';
+import type { TomlDate } from 'smol-toml';
 import * as v from 'valibot';
 
 /**
@@ -12,13 +12,12 @@ const number = v.number();
 const pair = v.tuple([number, number]);
 const line = v.pipe(number, v.integer(), v.minValue(0));
 const digest = v.pipe(text, v.regex(/^[0-9a-f]{64}$/));
-/** An offset date and time; TOML writes it bare. */
-const moment = v.pipe(
-  v.union([v.instance(TomlDate), text]),
-  v.transform(value => (typeof value === 'string' ? value : momentText(value))),
-);
+/** An offset date and time; TOML writes it bare, a block holds its text. */
+const moment = text;
+const ranges = v.pipe(text, v.regex(/^(?:all|\d+\s*-\s*\d+(?:\s*,\s*\d+\s*-\s*\d+)*)$/u));
 const decimalMark = v.picklist(['.', ',']);
-const optionValue = v.union([text, number, v.boolean(), v.array(number)]);
+/** What an option of a method or an evidence check may hold. */
+export const optionValue = v.union([text, number, v.boolean(), v.array(number)]);
 
 const purpose = v.looseObject({ 'question-in-words': text, plan: text });
 
@@ -39,7 +38,7 @@ const data = v.looseObject({
   'footer-left': v.exactOptional(texts),
   'missing-words': v.exactOptional(texts),
   below: v.exactOptional(v.picklist(['zero', 'half', 'limit'])),
-  rows: text,
+  rows: ranges,
   where: v.exactOptional(v.array(v.tuple([text, text]))),
 });
 
@@ -142,7 +141,7 @@ export const blockSchema = v.looseObject({
 });
 
 /** Keys of each table in the order in which they are printed. */
-export const KEY_ORDER: Readonly<Record<string, readonly string[]>> = Object.fromEntries(
+export const KEY_ORDER: ReadonlyMap<string, readonly string[]> = new Map(
   Object.entries({
     purpose,
     data,
@@ -154,8 +153,11 @@ export const KEY_ORDER: Readonly<Record<string, readonly string[]>> = Object.fro
     result,
     record,
     by,
-  }).map(([table, schema]) => [table, Object.keys(schema.entries)]),
+  }).map(([table, schema]) => [table, Object.keys(schema.entries)] as const),
 );
+
+/** Options of a comparison that keep their key whatever methods there are. */
+export const FIXED_OPTIONS = ['sigma', 'success', 'curve', 'primary', 'seed', 'draws', 'ruled-out'] as const;
 
 /** Keys whose values are printed as bare dates and times. */
 export const MOMENT_KEYS: ReadonlySet<string> = new Set(['when', 'written']);

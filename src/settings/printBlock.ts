@@ -13,7 +13,7 @@ export function printBlock(block: Block): string {
 }
 
 function tableLines(block: Table): readonly string[] {
-  const known = Object.keys(KEY_ORDER);
+  const known = [...KEY_ORDER.keys()];
   const unknown = Object.keys(block).filter(key => !known.includes(key));
   return [
     ...loose(block, unknown),
@@ -36,7 +36,7 @@ function tablesOf(name: string, value: unknown): readonly string[] {
 }
 
 function keyLines(table: string, values: Table): readonly string[] {
-  const order = KEY_ORDER[table] ?? [];
+  const order = KEY_ORDER.get(table) ?? [];
   const keys = [
     ...order.filter(key => values[key] !== undefined),
     ...Object.keys(values).filter(key => !order.includes(key)),

@@ -5,7 +5,7 @@ import type { Count, Summary } from '../core/model/groups';
 import type { LeftOut, OptionValue, Provenance } from '../core/model/settings';
 import type { Request } from '../compare/request';
 import type { ReadingWish } from '../readers/readingWish';
-import type { Block, BlockData, BlockSummary } from './document';
+import { FIXED_OPTIONS, type Block, type BlockData, type BlockSummary } from './document';
 import { optionKeys } from './optionKeys';
 import { rangesOf } from './ranges';
 
@@ -16,7 +16,7 @@ export function requestFrom(block: Block, list: readonly MethodDescriptor[] = me
   const rows = rangesOf(data[0]?.rows ?? 'all');
   return {
     files: data.map(({ file }) => file),
-    wish: wishOf(data[0]),
+    wish: wishOf(data),
     ...(summary === undefined ? {} : { typed: summary.map(typedGroup) }),
     ...layoutPart(block),
     ...(rows === 'all' ? {} : { rows }),
@@ -51,20 +51,40 @@ export function provenanceFrom(block: Block): Provenance {
   };
 }
 
-function wishOf(data: BlockData | undefined): ReadingWish {
-  if (data === undefined) return {};
+/**
+ * How all files are read. Where two files were read in different ways, each showed its own: nobody had said how, so it is
+ * left to the files again.
+ */
+function wishOf(data: readonly BlockData[]): ReadingWish {
+  const [first, ...others] = data.map(wishOfFile);
+  if (first === undefined) return {};
+  const agreed = (key: keyof ReadingWish): boolean =>
+    others.every(other => sameValue(other[key], first[key]));
+  return Object.fromEntries(Object.entries(first).filter(([key]) => agreed(key as keyof ReadingWish)));
+}
+
+function wishOfFile(data: BlockData): ReadingWish {
   const { encoding, delimiter, decimal, thousands, header, below } = data;
   const missing = data['missing-words'];
   return {
     ...(encoding === undefined ? {} : { encoding }),
     ...(delimiter === undefined ? {} : { delimiter }),
-    ...(decimal === undefined ? {} : { decimal }),
+    // A file that was read names its decimal mark, and a thousands mark if it has one.
+    ...(decimal === undefined ? {} : { decimal, thousands: thousands ?? '' }),
     ...(header === undefined ? {} : { header }),
-    ...(thousands === undefined ? {} : { thousands }),
     ...(missing === undefined ? {} : { missing }),
     ...(below === undefined ? {} : { below }),
   };
 }
+
+type WishValue = ReadingWish[keyof ReadingWish];
+
+const sameValue = (a: WishValue, b: WishValue): boolean =>
+  a === b ||
+  (typeof a === 'object' &&
+    typeof b === 'object' &&
+    a.length === b.length &&
+    a.every((word, index) => word === b[index]));
 
 function layoutPart({ groups }: Block): Partial<Request> {
   const { layout, measured, columns, label, test, reference, merged, per, pair } = groups;
@@ -95,9 +115,14 @@ function optionsOf(
   { comparison }: Block,
   list: readonly MethodDescriptor[],
 ): Readonly<Record<string, OptionValue>> {
-  const keys = optionKeys(list, evidenceChecks);
+  const keys = new Set<string>([...FIXED_OPTIONS, ...optionKeys(list, evidenceChecks)]);
   const named = Object.entries(comparison).filter(([key]) => keys.has(key)) as [string, OptionValue][];
-  return { ...Object.fromEntries(named), ...comparison.thresholds };
+  const ruledOut = comparison['ruled-out'];
+  return {
+    ...Object.fromEntries(named),
+    ...(ruledOut === undefined ? {} : { 'ruled-out': ruledOut.join(',') }),
+    ...comparison.thresholds,
+  };
 }
 
 function typedGroup({ label, n, mean, sd, x }: BlockSummary): Summary | Count {

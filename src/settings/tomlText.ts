@@ -46,8 +46,11 @@ function numberText(value: number): string {
 }
 
 function quoted(value: string): string {
-  // A lone surrogate cannot stand in UTF-8 text; it is replaced as every encoder would.
-  const escaped = value.replace(/\p{Cs}/gu, '\ufffd').replace(/["\\\p{Cc}]/gu, escape);
+  // A lone surrogate cannot stand in UTF-8 text; it is replaced as every encoder would. What other programs take for the
+  // end of a line, or what turns the direction of a line and so could hide a part of it, is written as its code.
+  const escaped = value
+    .replace(/\p{Cs}/gu, '\ufffd')
+    .replace(/["\\\p{Cc}\p{Zl}\p{Zp}\p{Bidi_Control}]/gu, escape);
   return `"${escaped}"`;
 }
 

@@ -1,7 +1,7 @@
 import { Panel } from '../report/panel/panel';
 import type { FromPanel } from '../protocol/fromPanel';
 import type { ShownProblem } from '../protocol/places';
-import type { Busy, Notice, Show } from '../protocol/toPanel';
+import type { Busy, Notice, Show, Tool } from '../protocol/toPanel';
 
 interface PageProps {
   readonly show: Show | null;
@@ -11,15 +11,18 @@ interface PageProps {
 
 /** The whole page: what is going on, what must be known, then the comparison or why there is none. */
 export function Page({ show, busy, send }: PageProps) {
-  const { view, problem, revision } = show ?? { view: null, problem: null, revision: 0 };
+  const { view, problem, revision, tools } = show ?? { view: null, problem: null, revision: 0, tools: [] };
+  const isNotebook = ({ id }: Tool): boolean => id === 'addToNotebook';
   return (
     <>
       <Status show={show} busy={busy} />
       {show?.notices.map(notice => (
         <NoticeLine notice={notice} send={send} />
       ))}
+      <Tools tools={tools.filter(tool => !isNotebook(tool))} send={send} />
       {problem !== null && show !== null && <ProblemPart problem={problem} words={show.words} send={send} />}
       {view !== null && <Panel view={view} send={action => send({ type: 'act', revision, action })} />}
+      <Tools tools={tools.filter(isNotebook)} send={send} />
     </>
   );
 }
@@ -32,6 +35,19 @@ function Status({ show, busy }: Pick<PageProps, 'show' | 'busy'>) {
       {busy === null ? <span class="page-unseen">{show?.words.ready}</span> : busy.says}
       {known && <progress value={busy.done} max={busy.total} aria-label={busy.says} />}
     </div>
+  );
+}
+
+function Tools({ tools, send }: { readonly tools: readonly Tool[] } & Pick<PageProps, 'send'>) {
+  if (tools.length === 0) return null;
+  return (
+    <p class="page-tools">
+      {tools.map(({ id, label }) => (
+        <button key={id} type="button" onClick={() => send({ type: 'tool', id })}>
+          {label}
+        </button>
+      ))}
+    </p>
   );
 }
 

@@ -109,6 +109,7 @@ describe('messages from a panel', () => {
     { type: 'act', revision: 2, action: { kind: 'point', at: { file: 0, line: 31, field: 3 } } },
     { type: 'act', revision: 2, action: { kind: 'change', key: 'question' } },
     { type: 'notice', id: 'saveAndRunAgain' },
+    { type: 'tool', id: 'addToNotebook' },
   ])('pass when they are as agreed: %j', message => {
     expect(readFromPanel(message)).toEqual(message);
   });
@@ -139,6 +140,7 @@ describe('messages to a panel', () => {
       at: null,
     },
     notices: [{ text: 'Not saved.', action: { id: 'saveAndRunAgain', label: 'Save and run again' } }],
+    tools: [{ id: 'undo', label: 'Undo' }],
     words: { problem: 'Why there is no number', showCell: 'Show', ready: 'Computed' },
   };
 

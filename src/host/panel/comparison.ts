@@ -1,6 +1,6 @@
 import { CancellationError, CancellationTokenSource, EventEmitter, type Disposable } from 'vscode';
 import type { Request } from '../../compare/request';
-import { reduce, requestOf, type Action, type Session } from '../../compare/session';
+import { canRedo, canUndo, reduce, requestOf, type Action, type Session } from '../../compare/session';
 import type { Provenance } from '../../core/model/settings';
 import { OtherSideGone } from '../../protocol/calls';
 import type { FileInput } from '../../protocol/files';
@@ -50,6 +50,14 @@ export class Comparison implements Disposable {
 
   get stated(): Provenance {
     return this.provenance;
+  }
+
+  get canUndo(): boolean {
+    return canUndo(this.session);
+  }
+
+  get canRedo(): boolean {
+    return canRedo(this.session);
   }
 
   /** Whether a result was seen: what is changed from then on is marked in the record. */

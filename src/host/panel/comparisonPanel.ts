@@ -1,6 +1,15 @@
-import { EventEmitter, l10n, Uri, ViewColumn, window, type Disposable, type WebviewPanel } from 'vscode';
+import {
+  commands,
+  EventEmitter,
+  l10n,
+  Uri,
+  ViewColumn,
+  window,
+  type Disposable,
+  type WebviewPanel,
+} from 'vscode';
 import { readFromPanel, type FromPanel } from '../../protocol/fromPanel';
-import type { Busy, Notice, Show } from '../../protocol/toPanel';
+import type { Busy, Notice, Show, Tool } from '../../protocol/toPanel';
 import { documentOf } from '../files/openedFile';
 import { lastPart, recordName, rootOf } from '../files/root';
 import { chooseFile } from '../selecting/chooseFile';
@@ -89,6 +98,9 @@ export class ComparisonPanel implements Disposable {
       case 'notice':
         await this.onNotice(message.id);
         return;
+      case 'tool':
+        await commands.executeCommand(`weighbeam.${message.id}`);
+        return;
       case 'showProblem':
         await showProblemCell(this.services, this.comparison);
     }
@@ -155,6 +167,7 @@ export class ComparisonPanel implements Disposable {
         view: shown.view,
         problem: shown.problem,
         notices: noticesFor(shown, this.fileState, subject),
+        tools: toolsFor(this.comparison),
         words: {
           problem: l10n.t('Why there is no number'),
           showCell: l10n.t('Show'),
@@ -171,6 +184,16 @@ export class ComparisonPanel implements Disposable {
     this.busy = { type: 'busy', revision, says: l10n.t('Computing…'), done, total };
     if (this.listening && this.panel.visible) void this.panel.webview.postMessage(this.busy);
   }
+}
+
+/** The buttons that can do something now. */
+function toolsFor({ canUndo, canRedo, shown }: Comparison): readonly Tool[] {
+  const possible: readonly (readonly [boolean, Tool])[] = [
+    [canUndo, { id: 'undo', label: l10n.t('Undo') }],
+    [canRedo, { id: 'redo', label: l10n.t('Redo') }],
+    [shown !== null && shown.blockText !== null, { id: 'addToNotebook', label: l10n.t('Add to notebook…') }],
+  ];
+  return possible.flatMap(([isPossible, tool]) => (isPossible ? [tool] : []));
 }
 
 /** A new, empty panel beside the editor in front; the focus stays where it is. */
