@@ -6,10 +6,10 @@ import type { Block, BlockResult } from '../settings/document';
  */
 export function conclusionOf(result: BlockResult, { comparison }: Block): string {
   const { decision, difference = NaN, interval } = result;
-  const settled = decision !== 'not settled' && decision !== 'not shown';
   return [
     decision,
-    settled ? Math.sign(difference - comparison.against) : 'open',
+    // Every other decision says its direction, or has none.
+    decision === 'differs' ? Math.sign(difference - comparison.against) : '',
     mattersAnswer(interval, comparison.matters),
     result['depends-on-choice'],
   ].join(', ');

@@ -9,6 +9,8 @@ import { scout } from '../readers/scout';
 import { rowDigest } from '../settings/digests';
 import type { BlockLeftOut } from '../settings/document';
 
+const TICK_EVERY = 0x1000;
+
 /**
  * The lines on which the left-out rows of a block stand now: each is found by the digest of its cells, first on its old
  * line, else anywhere in its file. Throws Refusal 'left-out-row-gone' where none or more than one row has that digest.
@@ -36,13 +38,15 @@ export async function findLeftOut(
   if (onOldLine) return asked;
 
   const table = await tableOf('all');
-  const lines = new Map<string, number[]>();
+  const keyOf = (file: number, digest: string): string => `${file} ${digest}`;
+  const keys = asked.map(({ file }, index) => keyOf(file, rows[index]?.['row-sha256'] ?? ''));
+  const lines = new Map(keys.map((key): [string, number[]] => [key, []]));
   for (let row = 0; row < table.rows; row += 1) {
-    const key = `${table.file(row)} ${digestAt(table, row)}`;
-    lines.set(key, [...(lines.get(key) ?? []), table.line(row)]);
+    if (row % TICK_EVERY === 0) platform.tick(row, table.rows);
+    lines.get(keyOf(table.file(row), digestAt(table, row)))?.push(table.line(row));
   }
   return asked.map((leftOut, index) => {
-    const found = lines.get(`${leftOut.file} ${rows[index]?.['row-sha256'] ?? ''}`) ?? [];
+    const found = lines.get(keys[index] ?? '') ?? [];
     const [line] = found.includes(leftOut.line) ? [leftOut.line] : found;
     if (line === undefined || (found.length > 1 && line !== leftOut.line)) {
       const { value = '' } = rows[index] ?? {};

@@ -6,7 +6,7 @@ export type OutcomeKind = 'same' | 'moved' | 'turned' | 'altered' | 'reworked' |
 
 /** A number or word of the record that is not what it was. `change` is is − was, for numbers. */
 export interface OutcomeChange {
-  /** Key of the block: 'result.p', 'result.mean[0]'. */
+  /** Key of the block: 'result.p', 'result.mean[0]', 'data.0.cells'. */
   readonly key: string;
   readonly was: string | number;
   readonly is: string | number;
@@ -20,7 +20,7 @@ export interface Outcome {
   readonly line: number;
   readonly firstLine: number;
   readonly changes: readonly OutcomeChange[];
-  /** 'lines-moved', 'file-changed', 'text-edited', 'unknown-keys', 'header-moved', each with its facts. */
+  /** 'lines-moved', 'file-changed', 'text-edited', 'questions-open' {ids of findings}, 'unknown-keys' {keys}. */
   readonly notes: readonly Reason[];
   /** Why it is blocked. */
   readonly reason: Refusal | null;

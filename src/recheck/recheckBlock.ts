@@ -1,19 +1,19 @@
-import { answer, type Answered, type AnswerPlatform } from '../compare/answer';
-import type { Request } from '../compare/request';
+import type { AnswerPlatform } from '../compare/answer';
 import { methodById, methods } from '../core/methods/index';
+import type { Comparison } from '../core/model/comparison';
 import type { MethodDescriptor } from '../core/model/methods';
 import { Refusal } from '../core/model/problem';
 import type { Reason } from '../core/model/say';
 import type { ByteSource } from '../readers/byteSource';
-import { blockFrom, resultOf } from '../settings/block';
+import { cellsOf } from '../settings/block';
 import { recordId } from '../settings/digests';
-import type { Block, BlockResult } from '../settings/document';
+import type { Block, BlockData, BlockResult } from '../settings/document';
 import type { FoundBlock } from '../settings/findBlocks';
 import { parseBlock, type ParsedBlock } from '../settings/parseBlock';
-import { provenanceFrom, requestFrom } from '../settings/requestFrom';
+import { resultOf } from '../settings/resultOf';
+import { answerAgain } from './answerAgain';
 import { conclusionOf } from './conclusion';
-import { findLeftOut } from './findLeftOut';
-import type { Outcome, OutcomeKind } from './outcome';
+import type { Outcome, OutcomeChange, OutcomeKind } from './outcome';
 import { resultChanges } from './resultChanges';
 
 /** Gives the file a block names, or null where there is none; refuses a path outside the root. */
@@ -62,44 +62,55 @@ async function recomputed(
   list: readonly MethodDescriptor[],
 ): Promise<Recomputed> {
   const { block, text, lineOf } = parsed;
-  const sources = await openAll(block, open);
-  const { answered, notes } = await answerAgain(block, was, sources, platform, list);
-  const is = resultOf(answered.comparison, list);
-  const changes = resultChanges(was, is);
-  const now = blockFrom(answered, provenanceFrom(block), stampOf(block, platform), list);
-  const sameData = (block.data ?? []).every(({ cells }, index) => cells === now.data?.[index]?.cells);
-  const sameFiles = (block.data ?? []).every(({ sha256 }, index) => sha256 === now.data?.[index]?.sha256);
-  const textHolds = block.record !== undefined && block.record.id === recordId(text, platform.createHasher);
-  const kind = sameData
-    ? kindOnSameData(changes.length === 0, textHolds, methodMoved(block, answered, list))
-    : conclusionOf(was, block) === conclusionOf(is, block)
-      ? 'moved'
-      : 'turned';
+  const { data = [] } = block;
+  const sources = await openAll(data, open);
+  const { answered, linesMoved } = await answerAgain(block, was, sources, platform, list);
+  const { comparison, files } = answered;
+  const is = resultOf(comparison, list);
+  const textHolds = block.record?.id === recordId(text, platform.createHasher);
+  const cells = cellsChanges(data, cellsOf(answered, platform.createHasher));
+  const sameFiles = data.every(({ sha256 }, index) => sha256 === files[index]?.sha256);
+  // The same bytes are the same data: other cells then come from an edited block, not from an edited file.
+  const sameData = cells.length === 0 || sameFiles;
+  const changes = [...resultChanges(was, is), ...(sameData && !textHolds ? cells : [])];
   return {
-    kind,
-    line: changes[0] === undefined ? parsed.lineOf('') : lineOf(changes[0].key.replace(/\[\d+\]$/u, '')),
+    kind: sameData
+      ? kindOnSameData(changes.length === 0, textHolds, methodMoved(block, comparison, list))
+      : conclusionOf(was, block) === conclusionOf(is, block)
+        ? 'moved'
+        : 'turned',
+    line: lineOf((changes[0] ?? cells[0])?.key.replace(/\[\d+\]$/u, '') ?? ''),
     changes,
     notes: [
-      ...notes,
-      ...(textHolds ? [] : [{ code: 'text-edited', facts: {} }]),
-      ...(sameData && !sameFiles ? [{ code: 'file-changed', facts: {} }] : []),
+      ...noteIf(linesMoved, 'lines-moved'),
+      ...noteIf(!textHolds, 'text-edited'),
+      ...noteIf(sameData && !sameFiles, 'file-changed'),
+      // Checks come and go with versions; on the data of the record its questions were answered.
+      ...noteIf(!sameData && comparison.open.length > 0, 'questions-open', { ids: comparison.open }),
       ...unknownNote(parsed),
     ],
-    now: answered.comparison,
+    now: comparison,
   };
 }
+
+/** The digests of the cells used that are not what the block says. */
+const cellsChanges = (data: readonly BlockData[], cells: readonly string[]): readonly OutcomeChange[] =>
+  data.flatMap(({ cells: was = '' }, index) => {
+    const is = cells[index] ?? '';
+    return was === is ? [] : [{ key: `data.${index}.cells`, was, is, change: null }];
+  });
 
 function kindOnSameData(sameNumbers: boolean, textHolds: boolean, methodIsNewer: boolean): OutcomeKind {
   if (sameNumbers) return 'same';
   return textHolds && methodIsNewer ? 'reworked' : 'altered';
 }
 
-const methodMoved = (block: Block, { comparison }: Answered, list: readonly MethodDescriptor[]): boolean =>
-  methodById(comparison.chosen.id, list)?.version !== block.by['method-version'];
+const methodMoved = (block: Block, { chosen }: Comparison, list: readonly MethodDescriptor[]): boolean =>
+  methodById(chosen.id, list)?.version !== block.by['method-version'];
 
-async function openAll(block: Block, open: Open): Promise<readonly ByteSource[]> {
+async function openAll(data: readonly BlockData[], open: Open): Promise<readonly ByteSource[]> {
   const sources: ByteSource[] = [];
-  for (const { file } of block.data ?? []) {
+  for (const { file } of data) {
     const source = await open(file);
     if (source === null) throw new Refusal('file-not-found', { name: file }, file);
     sources.push(source);
@@ -107,51 +118,8 @@ async function openAll(block: Block, open: Open): Promise<readonly ByteSource[]>
   return sources;
 }
 
-/** Asks the recipe of the block again: on its header line, else on the header line that the file itself shows. */
-async function answerAgain(
-  block: Block,
-  was: BlockResult,
-  sources: readonly ByteSource[],
-  platform: AnswerPlatform,
-  list: readonly MethodDescriptor[],
-): Promise<{ readonly answered: Answered; readonly notes: readonly Reason[] }> {
-  const request = requestFrom(block, list);
-  const { header, ...wish } = request.wish;
-  const ask = async (asked: Request) => {
-    const leaveOut = await findLeftOut(
-      block['left-out'] ?? [],
-      asked.leaveOut ?? [],
-      sources,
-      asked.wish,
-      platform,
-    );
-    const answered = await answer(sources, { ...asked, leaveOut }, platform, {
-      counted: was.counted,
-      methods: list,
-    });
-    const moved = leaveOut.some(({ line }, index) => line !== asked.leaveOut?.[index]?.line);
-    return { answered, moved };
-  };
-  let tried;
-  try {
-    tried = await ask(request);
-  } catch (error) {
-    if (!(error instanceof Refusal) || header === undefined) throw error;
-    tried = await ask({ ...request, wish }).catch(() => {
-      throw error; // what is wrong under the recorded header says more than what is wrong under another
-    });
-  }
-  const { answered, moved } = tried;
-  const headerNow = answered.comparison.readings[0]?.headerLine;
-  const headerMoved = header !== undefined && headerNow !== undefined && headerNow !== header;
-  return { answered, notes: moved || headerMoved ? [{ code: 'lines-moved', facts: {} }] : [] };
-}
-
-const stampOf = (block: Block, { createHasher }: AnswerPlatform) => ({
-  version: block.by.weighbeam,
-  written: block.by.written,
-  createHasher,
-});
+const noteIf = (holds: boolean, code: string, facts: Reason['facts'] = {}): readonly Reason[] =>
+  holds ? [{ code, facts }] : [];
 
 const unknownNote = ({ unknownKeys }: ParsedBlock): readonly Reason[] =>
-  unknownKeys.length === 0 ? [] : [{ code: 'unknown-keys', facts: { keys: unknownKeys } }];
+  noteIf(unknownKeys.length > 0, 'unknown-keys', { keys: unknownKeys });

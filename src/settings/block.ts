@@ -2,24 +2,17 @@ import { methodById, methods } from '../core/methods/index';
 import { evidenceChecks } from '../core/evidence/index';
 import type { Answered } from '../compare/answer';
 import type { Reading } from '../core/model/cells';
-import type { Comparison, Row } from '../core/model/comparison';
+import type { Comparison } from '../core/model/comparison';
 import type { Hasher } from '../core/model/hasher';
-import type { MethodDescriptor, MethodResult } from '../core/model/methods';
+import type { MethodDescriptor } from '../core/model/methods';
 import { Refusal } from '../core/model/problem';
 import type { Provenance, Settings } from '../core/model/settings';
 import { MISSING_WORDS } from '../readers/readingWish';
 import { cellsDigest, recordId, rowDigest } from './digests';
-import type {
-  Block,
-  BlockComparison,
-  BlockData,
-  BlockGroups,
-  BlockLeftOut,
-  BlockResult,
-  BlockSummary,
-} from './document';
+import type { Block, BlockComparison, BlockData, BlockGroups, BlockLeftOut, BlockSummary } from './document';
 import { printBlock } from './printBlock';
 import { rangesText } from './ranges';
+import { resultOf } from './resultOf';
 import { thresholdKeys } from './optionKeys';
 
 export type { Block } from './document';
@@ -167,57 +160,6 @@ function comparisonOf(settings: Settings, { sampling, reasons }: Provenance): Bl
     ...(set.length === 0 ? {} : { thresholds: Object.fromEntries(set) }),
     ...(Object.keys(reasons).length === 0 ? {} : { reasons: { ...reasons } }),
     sampling: sampling === '' ? 'not stated' : sampling,
-  };
-}
-
-/** The numbers of the chosen row: what a recheck holds a later computation against. */
-export function resultOf(comparison: Comparison, list: readonly MethodDescriptor[] = methods): BlockResult {
-  const { chosen, groups, whatIf } = comparison;
-  const result = chosen.result;
-  const counts = groups.flatMap(({ count }) => (count === null ? [] : [count.x]));
-  const counted = whatIf.counted.flatMap(index => whatIf.rows[index] ?? []);
-  const kept = keptOf(whatIf.rows, chosen);
-  return {
-    n: groups.map(({ n }) => n),
-    ...(groups.some(({ n, readings }) => n !== readings)
-      ? { readings: groups.map(({ readings }) => readings) }
-      : {}),
-    ...(counts.length > 0 ? { x: counts } : { mean: groups.map(({ mean }) => mean) }),
-    ...(counts.length > 0 || groups.some(({ sd }) => !Number.isFinite(sd))
-      ? {}
-      : { sd: groups.map(({ sd }) => sd) }),
-    ...(result === null ? {} : numbersOf(result, methodById(chosen.id, list)?.statistic ?? '')),
-    decision: chosen.decision ?? 'not settled',
-    'depends-on-choice': whatIf.depends,
-    counted: [...new Set(counted.filter(({ data }) => data === chosen.data).map(({ id }) => id))],
-    ...(kept === null ? {} : { 'with-left-out-kept': kept }),
-  };
-}
-
-function numbersOf(
-  result: MethodResult,
-  statisticName: string,
-): Pick<BlockResult, 'difference' | 'interval' | 'statistic-name' | 'statistic' | 'df' | 'p'> {
-  const { estimate, statistic, df, p, lower, upper } = result;
-  return {
-    ...(estimate === null ? {} : { difference: estimate }),
-    ...(lower === null && upper === null ? {} : { interval: [lower ?? -Infinity, upper ?? Infinity] }),
-    ...(statistic === null ? {} : { 'statistic-name': statisticName, statistic }),
-    ...(df === null ? {} : { df: typeof df === 'number' ? df : [df[0], df[1]] }),
-    ...(p === null ? {} : { p }),
-  };
-}
-
-function keptOf(rows: readonly Row[], chosen: Row): NonNullable<BlockResult['with-left-out-kept']> | null {
-  if (chosen.data === 'all') return null;
-  const kept = rows.find(({ id, data }) => id === chosen.id && data === 'all');
-  const result = kept?.result;
-  if (result === undefined || result === null || result.estimate === null) return null;
-  const { estimate, lower, upper } = result;
-  return {
-    difference: estimate,
-    ...(lower === null && upper === null ? {} : { interval: [lower ?? -Infinity, upper ?? Infinity] }),
-    decision: kept?.decision ?? 'not settled',
   };
 }
 

@@ -35,12 +35,12 @@ function lastLineOf(lines: readonly string[], first: number): number {
   return lines.length - 1;
 }
 
-/** Editors trim the prefix of empty lines and people re-indent: what is left of the prefix goes too. */
+/** Mark by mark, as far as a line has them: editors trim the prefix of empty lines, and people indent again. */
 function withoutPrefix(line: string, prefix: string): string {
-  const bare = line.startsWith(prefix)
-    ? line.slice(prefix.length)
-    : line.startsWith(prefix.trim())
-      ? line.slice(prefix.trim().length)
-      : line;
-  return bare.trim();
+  let bare = line.trimStart();
+  for (const mark of prefix.replace(/\s/gu, '')) {
+    if (!bare.startsWith(mark)) break;
+    bare = bare.slice(mark.length).trimStart();
+  }
+  return bare.trimEnd();
 }

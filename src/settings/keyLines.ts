@@ -1,7 +1,7 @@
 export type LineOf = (path: string) => number;
 
 const TABLE = /^\[(?<array>\[)?\s*(?<name>[^\]]+?)\s*\]/u;
-const KEY = /^(?<key>[A-Za-z0-9_-]+|"[^"]*")\s*=/u;
+const KEY = /^(?<key>[A-Za-z0-9_-]+|"(?:[^"\\]|\\.)*")\s*=/u;
 
 /**
  * Finds the line of a key by its path: 'result.p', 'left-out.0.line' for the first [[left-out]]. Every key of a block

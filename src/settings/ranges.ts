@@ -4,7 +4,7 @@ type Ranges = 'all' | readonly (readonly [number, number])[];
 export const rangesText = (rows: Ranges): string =>
   rows === 'all' ? 'all' : rows.map(([first, last]) => `${first}-${last}`).join(', ');
 
-/** The inverse of rangesText; what is no range is passed over, so that a block without one takes all rows. */
+/** The inverse of rangesText. The schema of a block lets no other text through. */
 export function rangesOf(text: string): Ranges {
   const found = [...text.matchAll(/(\d+)\s*-\s*(\d+)/gu)].map(
     ([, first, last]) => [Number(first), Number(last)] as const,

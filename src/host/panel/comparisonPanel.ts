@@ -8,7 +8,7 @@ import {
   type Disposable,
   type WebviewPanel,
 } from 'vscode';
-import { readFromPanel, type FromPanel } from '../../protocol/fromPanel';
+import { readFromPanel } from '../../protocol/fromPanel';
 import type { Busy, Notice, Show, Tool } from '../../protocol/toPanel';
 import { documentOf } from '../files/openedFile';
 import { lastPart, recordName, rootOf } from '../files/root';
@@ -27,7 +27,10 @@ export const viewType = 'weighbeam.comparison';
 export class ComparisonPanel implements Disposable {
   private readonly disposables: Disposable[] = [];
   private readonly closed = new EventEmitter<void>();
+  private readonly used = new EventEmitter<void>();
   readonly onDidClose = this.closed.event;
+  /** The person did something in this panel: commands are about it from now on. */
+  readonly onDidUse = this.used.event;
   private watch: Disposable | null = null;
   private fileState: FileState = 'as computed';
   private busy: Busy | null = null;
@@ -72,11 +75,12 @@ export class ComparisonPanel implements Disposable {
     this.comparison.dispose();
     this.closed.fire();
     this.closed.dispose();
+    this.used.dispose();
     this.panel.dispose();
   }
 
   private receive(message: unknown): void {
-    this.handle(readFromPanel(message)).catch((error: unknown) => {
+    this.handle(message).catch((error: unknown) => {
       this.services.log.failed(
         'panel',
         error instanceof Error ? (error.stack ?? error.message) : String(error),
@@ -84,7 +88,9 @@ export class ComparisonPanel implements Disposable {
     });
   }
 
-  private async handle(message: FromPanel): Promise<void> {
+  private async handle(received: unknown): Promise<void> {
+    const message = readFromPanel(received);
+    if (message.type !== 'ready') this.used.fire();
     switch (message.type) {
       case 'ready':
         this.listening = true;

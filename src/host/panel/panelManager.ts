@@ -82,6 +82,7 @@ export class PanelManager implements WebviewPanelSerializer, Disposable {
     panel.panel.onDidChangeViewState(({ webviewPanel }) => {
       if (webviewPanel.active) this.bringForward(panel);
     });
+    panel.onDidUse(() => this.bringForward(panel));
     panel.onDidClose(() => {
       this.panels.delete(panel);
       if (this.front === panel) this.bringForward([...this.panels].at(-1) ?? null);
