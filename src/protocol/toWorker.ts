@@ -50,7 +50,7 @@ export interface Answer extends Called {
   readonly type: 'answer';
   readonly files: readonly FileInput[];
   readonly session: Session;
-  /** What the record says of itself; `changed` and `reasons` are filled in from the session. */
+  /** What the record says of itself; the changes of the session follow those it names. */
   readonly provenance: Provenance;
   /** When the record is written: ISO 8601 with the offset of the place. */
   readonly written: string;

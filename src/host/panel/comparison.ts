@@ -1,6 +1,14 @@
 import { CancellationError, CancellationTokenSource, EventEmitter, type Disposable } from 'vscode';
 import type { Request } from '../../compare/request';
-import { canRedo, canUndo, reduce, requestOf, type Action, type Session } from '../../compare/session';
+import {
+  canRedo,
+  canUndo,
+  reduce,
+  requestOf,
+  type Action,
+  type Session,
+  type Step,
+} from '../../compare/session';
 import type { Provenance } from '../../core/model/settings';
 import { OtherSideGone } from '../../protocol/calls';
 import type { FileInput } from '../../protocol/files';
@@ -10,6 +18,7 @@ import { openFile } from '../files/openedFile';
 import { lastPart } from '../files/root';
 import { timestamp } from '../timestamp';
 import type { Services } from '../services';
+import { afterLook } from './looks';
 import { keepSeen, seenBefore } from './seenBefore';
 import type { Shown } from './shown';
 import type { Subject } from './subject';
@@ -29,14 +38,15 @@ export class Comparison implements Disposable {
   shown: Shown | null = null;
   private running: CancellationTokenSource | null = null;
   private revision = 0;
-  /** The result that was seen last. */
-  private seen: { readonly request: Request; readonly cells: string } | null = null;
+  /** Results that were seen here, by their cells and what was asked: to come back to one is no further look. */
+  private readonly seen = new Set<string>();
 
   constructor(
     private readonly services: Services,
     public subject: Subject,
     private session: Session,
     private provenance: Provenance,
+    private readonly isRestored = false,
   ) {}
 
   get request(): Request {
@@ -187,22 +197,22 @@ export class Comparison implements Disposable {
    * be written again, because these cells were seen before.
    */
   private countLook(cells: string): boolean {
+    const result = JSON.stringify([cells, this.request]);
+    if (this.seen.has(result)) return false;
     const state = this.services.context.workspaceState;
-    const { request, seen } = this;
-    if (seen !== null && seen.request === request && seen.cells === cells) return false;
     const before = seenBefore(state, cells);
-    const session =
-      this.session.firstShown === null
-        ? { ...this.session, firstShown: before?.firstShown ?? null }
-        : this.session;
-    this.session = reduce(session, { kind: 'shown', when: timestamp() });
-    this.seen = { request, cells };
-    const looks = Math.max(before?.looks ?? 0, seen === null ? 0 : this.provenance.looks) + 1;
-    const outdated = looks !== this.provenance.looks || before !== null;
-    this.provenance = { ...this.provenance, looks };
-    const { firstShown } = this.session;
-    if (firstShown !== null) void keepSeen(state, cells, { looks, firstShown });
-    return outdated;
+    const isFirst = this.seen.size === 0;
+    this.seen.add(result);
+    const written = this.provenance.looks;
+    const look = { before, isFirst, isAgain: isFirst && this.isRestored, when: timestamp() };
+    const { session, provenance } = afterLook({ session: this.session, provenance: this.provenance }, look);
+    this.session = session;
+    this.provenance = provenance;
+    const { looks } = provenance;
+    if (session.firstShown !== null) {
+      void keepSeen(state, cells, { looks, firstShown: session.firstShown });
+    }
+    return looks !== written || before !== null;
   }
 }
 

@@ -53,8 +53,9 @@ export class PanelManager implements WebviewPanelSerializer, Disposable {
     const comparison = new Comparison(
       this.services,
       { files, root },
-      start({ ...request, files: recipe.request.files }, timestamp()),
+      start({ ...request, files: recipe.request.files }, provenance.changed.at(-1)?.when ?? timestamp()),
       provenance,
+      true,
     );
     this.add(new ComparisonPanel(this.services, comparison, panel));
     await comparison.run();

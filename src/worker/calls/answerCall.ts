@@ -9,6 +9,7 @@ import { viewOf } from '../../report/view';
 import { blockFrom } from '../../settings/block';
 import { cellsDigest } from '../../settings/digests';
 import { printBlock } from '../../settings/printBlock';
+import { changesKept } from '../changesKept';
 import type { Sitting } from '../desk';
 import { filesKey } from '../filesAtHand';
 import { readingFacts } from '../readingFacts';
@@ -23,8 +24,7 @@ export async function answerCall(call: Answer, sitting: Sitting): Promise<Reply<
   const { comparison, table, files } = answered;
   const provenance: Provenance = {
     ...call.provenance,
-    changed: changedAfterShown(call.session),
-    reasons: call.session.reasons,
+    changed: changesKept(call.provenance.changed, changedAfterShown(call.session)),
   };
   const blockText =
     call.record && comparison.open.length === 0 ? recordOf(answered, provenance, call, sitting) : null;
