@@ -3,11 +3,12 @@ import type { Request } from '../compare/request';
 import type { MethodDescriptor } from '../core/model/methods';
 import { Refusal } from '../core/model/problem';
 import type { ByteSource } from '../readers/byteSource';
+import type { ReadingWish } from '../readers/readingWish';
 import { scout } from '../readers/scout';
 import type { Block, BlockResult } from '../settings/document';
 import { requestFrom } from '../settings/requestFrom';
 import { findLeftOut } from './findLeftOut';
-import { headerLines } from './headerLines';
+import { headerWishes } from './headerWishes';
 
 export interface AnsweredAgain {
   readonly answered: Answered;
@@ -28,19 +29,17 @@ export async function answerAgain(
 ): Promise<AnsweredAgain> {
   const recipe = requestFrom(block, list);
   let refused: Refusal | null = null;
-  for (const header of await headerLines(recipe, sources, list)) {
+  for (const wish of await headerWishes(recipe, sources, list)) {
     try {
-      return await under(header);
+      return await under(wish);
     } catch (error) {
       if (!(error instanceof Refusal)) throw error;
       refused ??= error;
     }
   }
-  throw refused ?? new RangeError('no header line was tried');
+  throw refused ?? new RangeError('no way of reading was tried');
 
-  async function under(header: number | undefined): Promise<AnsweredAgain> {
-    const { header: _, ...reading } = recipe.wish;
-    const wish = header === undefined ? reading : { ...reading, header };
+  async function under(wish: ReadingWish): Promise<AnsweredAgain> {
     const moves = await headerMoves(block, sources, wish);
     const asked = movedBy(moves, { ...recipe, wish });
     const rows = block['left-out'] ?? [];
@@ -56,7 +55,7 @@ export async function answerAgain(
 async function headerMoves(
   { data = [] }: Block,
   sources: readonly ByteSource[],
-  wish: Request['wish'],
+  wish: ReadingWish,
 ): Promise<readonly number[]> {
   const moves: number[] = [];
   for (const [file, source] of sources.entries()) {

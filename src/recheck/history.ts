@@ -19,7 +19,7 @@ export interface HistoryEntry {
 /** The readable records of a notebook in the order of its lines, each with what it replaces and what replaces it. */
 export function historyOf(notebook: string): readonly HistoryEntry[] {
   const records = findBlocks(notebook).flatMap(recordsOf);
-  const byId = new Map(records.map(record => [record.id, record]));
+  const byId = new Map(records.filter(({ id }) => id !== '').map(record => [record.id, record]));
   return records.map(record => {
     const chain: number[] = [];
     const seen = new Set([record.id]);

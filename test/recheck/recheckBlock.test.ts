@@ -11,7 +11,17 @@ import { sameNumber } from '../../src/recheck/resultChanges';
 import { fenced } from '../../src/settings/fenced';
 import { findBlocks } from '../../src/settings/findBlocks';
 import { recordId } from '../../src/settings/digests';
-import { EXPORT, STAMP, blockOf, platform, provenance, source } from '../settings/recording';
+import {
+  ASKED,
+  EXPORT,
+  STAMP,
+  TWO_FILES,
+  blockOf,
+  platform,
+  provenance,
+  source,
+  twoFilesBlock,
+} from '../settings/recording';
 
 const notebookOf = (block: string): string => `# Kiln notebook\n\n${fenced(block)}\nafter\n`;
 
@@ -161,6 +171,79 @@ describe('a recheck', () => {
     expect(outcome.kind).toBe('same');
   });
 
+  it('says altered when the file is the same to the byte but a setting was edited', async () => {
+    const block = await blockOf(EXPORT);
+    const edited = block.replace('rows = "all"', 'rows = "4-12"');
+    const outcome = await recheck(edited, EXPORT);
+    expect([outcome.kind, codes(outcome)]).toEqual(['altered', ['text-edited']]);
+    expect(outcome.changes.map(({ key }) => key)).toContain('data.0.cells');
+  });
+
+  it('says altered, at its line, when only the digest of the cells was edited', async () => {
+    const block = await blockOf(EXPORT);
+    const edited = block.replace(/^cells = ".*"$/mu, `cells = "${'0'.repeat(64)}"`);
+    const outcome = await recheck(edited, EXPORT);
+    expect([outcome.kind, outcome.line]).toEqual(['altered', lineIn(block, 'cells = ')]);
+  });
+
+  it('marks the digest when data moved and every number stayed', async () => {
+    const block = await blockOf(EXPORT);
+    const lines = EXPORT.split('\n');
+    const swapped = [...lines.slice(0, 8), lines[9], lines[8], ...lines.slice(10)].join('\n');
+    const outcome = await recheck(block, swapped);
+    expect([outcome.kind, outcome.changes, outcome.line]).toEqual(['moved', [], lineIn(block, 'cells = ')]);
+  });
+
+  it('moves fixed ranges of lines with the header', async () => {
+    const block = await blockOf(EXPORT, { ...ASKED, rows: [[4, 12]] });
+    const outcome = await recheck(block, `Kiln 2;;;;\nread twice;;;;\n${EXPORT}`);
+    expect([outcome.kind, codes(outcome)]).toEqual(['same', ['lines-moved', 'file-changed']]);
+  });
+
+  it('names what is missing under the header where it stands now', async () => {
+    const text = `Kiln 2;;;;\n${EXPORT.replaceAll('standard', 'fast')}`;
+    const outcome = await recheck(await blockOf(EXPORT), text);
+    expect(outcome.reason?.code).toBe('label-unknown');
+  });
+
+  it('finds a header again that the file itself does not show', async () => {
+    const text = 'a,b\nkiln,x\nA,1.5\nA,2\nA,2.5\nB,3\nB,4\nB,5.5\n';
+    const asked = { files: ['kiln.csv'], measured: ['x'], label: 'kiln', per: 'none' as const };
+    const block = await blockOf(text, { ...asked, wish: { header: 2 } });
+    const outcome = await recheck(block, `old,2\nnew,3\n${text}`);
+    expect([outcome.kind, codes(outcome)]).toEqual(['same', ['lines-moved', 'file-changed']]);
+  });
+
+  it('is blocked when a group has fewer than two values, or units, left', async () => {
+    const without = async (gone: RegExp) => {
+      const text = EXPORT.split('\n').filter(line => !gone.test(line));
+      const { kind, reason } = await recheck(await blockOf(EXPORT), text.join('\n'));
+      return [kind, reason?.code];
+    };
+    expect(await without(/^standard;[24]/u)).toEqual(['blocked', 'label-single-value']);
+    expect(await without(/^standard;[46]/u)).toEqual(['blocked', 'values-too-few']);
+  });
+
+  it('computes on, and says so, when changed data raise a question', async () => {
+    const text = EXPORT.replace('standard;6;a;821,5', 'standard ;6;a;821,5');
+    const outcome = await recheck(await blockOf(EXPORT), text);
+    expect([outcome.kind, codes(outcome)]).toEqual(['moved', ['questions-open']]);
+    expect(outcome.notes[0]?.facts).toEqual({ ids: ['label-variants'] });
+  });
+
+  it('sees every number of a file of summaries', async () => {
+    const mills = 'mill,n,mean,sd\nA,12,31.4,1.1\nB,10,30.2,0.9\n';
+    const block = await blockOf(mills, { files: ['mills.csv'], wish: {}, summary: true });
+    expect((await recheck(block, mills)).kind).toBe('same');
+    for (const [was, is] of [
+      ['12', '13'],
+      ['31.4', '31.5'],
+      ['1.1', '1.2'],
+    ] as const) {
+      expect((await recheck(block, mills.replace(was, is))).kind).toBe('moved');
+    }
+  });
+
   it('rechecks typed numbers without a file', async () => {
     const block = await blockOf('', {
       files: [],
@@ -191,6 +274,32 @@ describe('a recheck', () => {
     expect((await recheck(block, null, open)).kind).toBe('same');
     const changed: Open = name => Promise.resolve(source(name, (files[name] ?? '').replace('5.5', '5.6')));
     expect((await recheck(block, null, changed)).kind).toBe('moved');
+  });
+});
+
+describe('two files, each in its own dialect', () => {
+  const opened =
+    (edit: (text: string, name: string) => string): Open =>
+    name =>
+      Promise.resolve(source(name, edit(TWO_FILES[name] ?? '', name)));
+
+  it('are read again as they were read', async () => {
+    const outcome = await recheck(
+      await twoFilesBlock(),
+      null,
+      opened(text => text),
+    );
+    expect([outcome.kind, outcome.changes, outcome.notes]).toEqual(['same', [], []]);
+  });
+
+  it('may each get lines above the header, or be gone', async () => {
+    const block = await twoFilesBlock();
+    const above = opened((text, name) => (name === 'june.csv' ? `Kiln 2;\n${text}` : text));
+    const outcome = await recheck(block, null, above);
+    expect([outcome.kind, codes(outcome)]).toEqual(['same', ['lines-moved', 'file-changed']]);
+    const gone: Open = name =>
+      Promise.resolve(name === 'june.csv' ? null : source(name, TWO_FILES[name] ?? ''));
+    expect((await recheck(block, null, gone)).reason?.code).toBe('file-not-found');
   });
 });
 

@@ -7,11 +7,14 @@ import { findBlocks } from '../../src/settings/findBlocks';
 import { parseBlock } from '../../src/settings/parseBlock';
 import { printBlock } from '../../src/settings/printBlock';
 import { requestFrom } from '../../src/settings/requestFrom';
-import { ASKED, EXPORT, STAMP, answerOf, blockOf, provenance } from './recording';
+import { ASKED, EXPORT, STAMP, answerOf, blockOf, provenance, twoFilesBlock } from './recording';
 
 const anyText = fc.string({ unit: 'grapheme', maxLength: 20 });
 const control = fc.string({
-  unit: fc.constantFrom('"', '\\', '\n', '\t', '\u0000', '\u001f', '\u007f', '`', '#', 'é', '🧪'),
+  unit: fc.constantFrom(
+    ...['"', '\\', '\n', '\r', '\t', '\u0000', '\u001f', '\u007f', '\u0085', '\u2028', '\u202e', '\ufeff'],
+    ...['`', '#', '=', '[', 'é', '🧪'],
+  ),
 });
 const text = fc.oneof(anyText, control);
 const number = fc.double({ noNaN: true });
@@ -32,8 +35,22 @@ const pad = (value: number): string => String(value).padStart(2, '0');
 const some: { requiredKeys: [] } = { requiredKeys: [] };
 /** Keys of a later version. */
 const unknown = fc.dictionary(
-  fc.constantFrom('later-key', 'later key', 'é', 'later-2'),
-  fc.oneof(text, number, fc.boolean(), fc.array(text, { maxLength: 3 })),
+  fc.constantFrom('later-key', 'later key', 'é', 'say "x"', '', '__proto__', 'constructor', 'toString'),
+  fc.oneof(text, number, fc.boolean(), fc.array(text, { maxLength: 3 }), fc.dictionary(text, number)),
+  { maxKeys: 2 },
+);
+
+const summaries = fc.array(
+  fc.oneof(
+    fc.record({ label: text, n: line, mean: finite, sd: finite }),
+    fc.record({ label: text, n: line, x: line }),
+  ),
+  { minLength: 2, maxLength: 3 },
+);
+/** Tables of a later version. */
+const unknownTables = fc.dictionary(
+  fc.constantFrom('later table', 'later-table', 'constructor'),
+  fc.oneof(unknown, fc.array(unknown, { minLength: 1, maxLength: 2 })),
   { maxKeys: 2 },
 );
 
@@ -59,6 +76,8 @@ const blocks = fc
               thousands: text,
               'units-row': line,
               'footer-left': fc.array(text),
+              'missing-words': fc.array(text),
+              below: fc.constantFrom('zero' as const, 'half' as const, 'limit' as const),
               where: fc.array(fc.tuple(text, text)),
             },
             some,
@@ -70,14 +89,30 @@ const blocks = fc
     ),
     groups: fc.record(
       {
+        layout: fc.constantFrom('wide' as const, 'files' as const, 'summary' as const, 'typed' as const),
         measured: fc.array(text),
         'measured-in': text,
+        columns: fc.array(text),
         label: text,
         test: text,
+        reference: text,
         merged: fc.array(fc.tuple(text, text)),
         per: fc.array(text),
+        'rows-are': fc.constantFrom('independent' as const, 'not stated' as const),
+        pair: text,
+        numbering: fc.constant('starts again in each group' as const),
       },
       some,
+    ),
+    'left-out': fc.array(
+      fc
+        .tuple(
+          fc.record({ line, value: text, 'row-sha256': digest, reason: text, 'after-result': fc.boolean() }),
+          fc.record({ file: text, unit: text }, some),
+          unknown,
+        )
+        .map(([known, maybe, later]) => ({ ...later, ...known, ...maybe })),
+      { minLength: 1, maxLength: 2 },
     ),
     comparison: fc
       .tuple(
@@ -95,7 +130,12 @@ const blocks = fc
             matters: finite,
             sigma: pair,
             success: text,
+            curve: fc.constant('normal-over-30' as const),
+            primary: text,
             seed: line,
+            draws: line,
+            thresholds: fc.dictionary(text, fc.oneof(number, text, fc.boolean(), fc.array(number))),
+            'ruled-out': fc.array(text),
             reasons: fc.dictionary(text, text),
           },
           some,
@@ -137,7 +177,11 @@ const blocks = fc
     record: fc.record({ id: text, replaces: text }),
     by: fc.record({ analyst: text, weighbeam: text, 'method-version': line, looks: line, written: moment }),
   })
-  .chain(known => unknown.map(later => ({ ...later, ...known })));
+  .chain(({ data, ...known }) =>
+    fc
+      .tuple(fc.oneof(fc.constant({ data }), fc.record({ summary: summaries })), unknown, unknownTables)
+      .map(([given, later, tables]) => ({ ...later, ...tables, ...given, ...known })),
+  );
 
 describe('a settings block', () => {
   it('prints, parses and prints again to the same text, with unknown keys and any characters', () => {
@@ -155,6 +199,34 @@ describe('a settings block', () => {
     const printed = await blockOf(EXPORT);
     const request = requestFrom(parseBlock(printed, 1).block);
     expect(await blockOf(EXPORT, request)).toBe(printed);
+  });
+
+  it('asks the same again of a recipe with every option that a block can hold', async () => {
+    const asked = {
+      ...ASKED,
+      matters: 15,
+      curve: 'normal-over-30' as const,
+      rows: [[4, 13]] as const,
+      options: { seed: 7, draws: 9999, primary: 'hardness', 'ruled-out': 'pooled-t,large-n-z' },
+    };
+    const printed = await blockOf(EXPORT, asked);
+    expect(printed).toContain('ruled-out = ["pooled-t", "large-n-z"]');
+    const request = requestFrom(parseBlock(printed, 1).block);
+    expect(request).toMatchObject({ options: asked.options, rows: asked.rows });
+    expect(await blockOf(EXPORT, request)).toBe(printed);
+  });
+
+  it('lets each of two files show again how it is written', async () => {
+    const printed = await twoFilesBlock();
+    const { wish } = requestFrom(parseBlock(printed, 1).block);
+    expect(wish).toEqual({ encoding: 'utf-8', thousands: '', header: 1 });
+  });
+
+  it('takes no name of JavaScript for a key it knows', async () => {
+    const later = (await blockOf(EXPORT))
+      .replace('[purpose]', 'constructor = 1\n[purpose]')
+      .replace('[record]', '[toString]\nx = 1\n[record]');
+    expect(parseBlock(later, 1).unknownKeys).toEqual(['constructor', 'toString']);
   });
 
   it('names unknown keys and keeps them', async () => {
@@ -175,6 +247,13 @@ describe('a settings block', () => {
       ],
       [printed.replace('confidence = 0.95', 'confidence = ='), 'block-not-readable', lineOf('confidence')],
       [printed.replace('"separate-t"', '"guess-t"'), 'block-not-readable', lineOf('method')],
+      [printed.replace('rows = "all"', 'rows = "5 to 9"'), 'block-not-readable', lineOf('rows')],
+      [
+        printed.replace('against = 0', 'against = 0\nagainst = 1'),
+        'block-not-readable',
+        lineOf('against') + 1,
+      ],
+      [printed.replace('row-sha256 = "', 'row-sha256 = "x'), 'block-not-readable', lineOf('row-sha256')],
       [printed.replace('format 1', 'format 2'), 'block-newer-format', 1],
       [printed.replace('# end of settings block\n', ''), 'block-not-readable', 1],
     ];
@@ -229,7 +308,7 @@ describe('finding blocks in a notebook', () => {
     fc.assert(
       fc.property(
         linesOfText,
-        fc.constantFrom('', '  ', '\t', '> ', '% ', '- '),
+        fc.constantFrom('', '  ', '\t', '> ', '% ', '- ', '.. ', '> > ', '  > ', '// '),
         fc.constantFrom('\n', '\r\n', '\r'),
         (lines, around, end) => {
           const body = block.trimEnd().split('\n');
@@ -244,6 +323,21 @@ describe('finding blocks in a notebook', () => {
         },
       ),
     );
+  });
+
+  it('reads on where an editor trimmed or moved the marks before a line', async () => {
+    const block = await blockOf(EXPORT);
+    const quoted = block.trimEnd().replace(/^/gmu, '> > ');
+    for (const [line, edited] of [
+      ['> > [groups]', '> >\n> > [groups]'],
+      ['> > label', '>> label'],
+      ['> > label', '  > >   label'],
+    ] as const) {
+      const [found] = findBlocks(quoted.replace(line, edited));
+      expect(found?.text.replace('\n\n', '\n')).toBe(block);
+    }
+    const [item] = findBlocks(`- ${block.trimEnd().replaceAll('\n', '\n  ')}`);
+    expect(item?.text).toBe(block);
   });
 
   it('finds every block, also one that was never ended', async () => {

@@ -37,7 +37,46 @@ describe('cells digest', () => {
     expect(await digestOf(EXPORT.replace('841,5', '841,6'))).not.toBe(before);
     expect(await digestOf(EXPORT.replace('slow cool;5;a', 'slow cool;7;a'))).not.toBe(before);
   });
+
+  it('holds n, mean and SD of rows that are summaries', async () => {
+    const text = 'mill,n,mean,sd\nA,12,31.40,1.1\nB,10,30.2,0.9\n';
+    const { table, comparison } = await answerOf(text, { files: ['mills.csv'], wish: {}, summary: true });
+    expect(cellsDigest(table ?? never(), comparison.settings, platform.createHasher)).toBe(
+      sha256('A\t12\t31.4\t1.1\nB\t10\t30.2\t0.9\n'),
+    );
+  });
+
+  it('is made of a million rows piece by piece', async () => {
+    const rows = Array.from({ length: 1_000_000 }, (_, row) => `${row % 2 === 0 ? 'A' : 'B'},${row % 997}.5`);
+    const { table, comparison } = await answerOf(`kiln,x\n${rows.join('\n')}\n`, {
+      files: ['x.csv'],
+      wish: {},
+      measured: ['x'],
+      label: 'kiln',
+      per: 'none',
+      onlyChosen: true,
+    });
+    const longest = { pieces: 0, length: 0 };
+    const digest = cellsDigest(table ?? never(), comparison.settings, () => {
+      const hasher = platform.createHasher();
+      return {
+        update: piece => {
+          longest.pieces += 1;
+          longest.length = Math.max(longest.length, piece.length);
+          hasher.update(piece);
+        },
+        hex: () => hasher.hex(),
+      };
+    });
+    expect(digest).toBe(sha256(rows.map(row => `${row.replace(',', '\t')}\n`).join('')));
+    expect(longest.pieces).toBeGreaterThan(100);
+    expect(longest.length).toBeLessThan(100_000);
+  });
 });
+
+function never(): never {
+  throw new Error('there is no table');
+}
 
 describe('row digest', () => {
   it('is the SHA-256 of the cells joined by TAB', () => {

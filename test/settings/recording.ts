@@ -78,3 +78,17 @@ export const STAMP = {
 export async function blockOf(text: string, request: Request = ASKED, given = provenance): Promise<string> {
   return printBlock(blockFrom(await answerOf(text, request), given, STAMP));
 }
+
+/** Two exports of one group each, every one in its own dialect. */
+export const TWO_FILES: Readonly<Record<string, string>> = {
+  'may.csv': 'tile,hardness\na,841.5\nb,843\nc,829\nd,833.5\n',
+  'june.csv': 'tile;hardness\na;815,0\nb;818,5\nc;809,0\nd;812,5\n',
+};
+
+/** The printed block of the comparison of TWO_FILES. */
+export async function twoFilesBlock(): Promise<string> {
+  const files = Object.keys(TWO_FILES);
+  const sources = files.map(file => source(file, TWO_FILES[file] ?? ''));
+  const answered = await answer(sources, { files, wish: {}, measured: ['hardness'] }, platform);
+  return printBlock(blockFrom(answered, provenance, STAMP));
+}
