@@ -2,7 +2,7 @@ import { KEY_ORDER, MOMENT_KEYS, type Block } from './document';
 import { momentOrText, tomlKey, tomlText } from './tomlText';
 
 export const FORMAT = 1;
-export const FIRST_LINE = `# weighbeam settings block, format ${FORMAT}`;
+const FIRST_LINE = `# weighbeam settings block, format ${FORMAT}`;
 export const LAST_LINE = '# end of settings block';
 
 type Table = Readonly<Record<string, unknown>>;
