@@ -202,3 +202,25 @@ describe('blocks', () => {
     expect(await recheck(file, true)).toEqual([['blocked', false]]);
   });
 });
+
+describe('columns without a name of their own', () => {
+  it('are called by their place in questions and answers', async () => {
+    const doubled = fileOf(
+      'doubled.csv',
+      'kiln,x,x\neast,1.5,2.5\neast,1.7,2.1\nwest,1.2,2.0\nwest,1.4,2.2\n',
+    );
+    const { ask } = makeWorker();
+    const call = {
+      type: 'nextStep',
+      files: [doubled],
+      request: {},
+      columns: null,
+      remembered: null,
+      answered: [],
+      only: null,
+    } as const;
+    const { step } = of('asked', await ask(call));
+    if (step?.kind !== 'one') throw new Error('one answer is picked');
+    expect(step.items.map(item => item.adds.measured?.[0])).toEqual(['#2', '#3', undefined]);
+  });
+});

@@ -3,6 +3,7 @@ import type { Request } from '../../compare/request';
 import type { StepId } from '../../protocol/asking';
 import type { FileInput } from '../../protocol/files';
 import type { ComputeClient } from '../compute/computeClient';
+import { whileWaiting } from '../whileWaiting';
 import { showStep } from './showStep';
 
 interface Wanted {
@@ -29,15 +30,16 @@ export async function askForRequest(client: ComputeClient, wanted: Wanted): Prom
   let habits = wanted.remembered;
   for (;;) {
     const now = given.at(-1) ?? { request: wanted.request, answered: [] };
-    const { step, request } = await client.ask({
+    const call = {
       type: 'nextStep',
       revision: 0,
       files: wanted.files,
       columns: wanted.columns,
-      remembered: habits,
       only: null,
-      ...now,
-    });
+    } as const;
+    const { step, request } = await whileWaiting(wanted.title, options =>
+      client.ask({ ...call, remembered: habits, ...now }, options),
+    );
     if (step === null) return request;
     const answer = await showStep(step, { title: wanted.title, canGoBack: given.length > 1 });
     if (answer === 'escape') throw new CancellationError();

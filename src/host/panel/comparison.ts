@@ -1,14 +1,6 @@
 import { CancellationError, CancellationTokenSource, EventEmitter, type Disposable } from 'vscode';
 import type { Request } from '../../compare/request';
-import {
-  canRedo,
-  canUndo,
-  reduce,
-  requestOf,
-  type Action,
-  type Session,
-  type Step,
-} from '../../compare/session';
+import { canRedo, canUndo, reduce, requestOf, type Action, type Session } from '../../compare/session';
 import type { Provenance } from '../../core/model/settings';
 import { OtherSideGone } from '../../protocol/calls';
 import type { FileInput } from '../../protocol/files';

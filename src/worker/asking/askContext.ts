@@ -18,7 +18,7 @@ export interface AskContext {
   readonly picked: readonly string[] | null;
   readonly remembered: Partial<Request> | null;
   readonly answered: readonly StepId[];
-  /** A column's labels, one a row; null when there are too many rows or labels to look at them. */
+  /** A column's labels, one a row; null when they are too many to be held. */
   labelsOf(name: string): LabelColumn | null;
 }
 

@@ -45,6 +45,10 @@ export const groupsSpelled = (column: ColumnFacts): number =>
 export const saysOutcome = (column: ColumnFacts): boolean =>
   column.labels.every(({ label }) => OUTCOME.test(label.trim()));
 
+/** How likely it is that a column holds what was measured: it has a unit or decimals, and names nothing. */
+export const measuredLikelihood = (column: ColumnFacts, rows: number): number =>
+  (looksLikeIds(column, rows) ? 0 : 4) + (column.unit === null ? 0 : 2) + (hasFractions(column) ? 1 : 0);
+
 /** Whether a label is one that usually names what is compared against. */
 export const soundsLikeReference = (label: string): boolean => REFERENCE_LABEL.test(label.trim());
 

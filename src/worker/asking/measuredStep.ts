@@ -1,6 +1,6 @@
 import type { StepItem } from '../../protocol/asking';
 import { choice, isAnswered, type AskContext, type Asker, type ColumnFacts } from './askContext';
-import { canBeLabels, canBeMeasured, hasTwoOutcomes, looksLikeIds } from './columnRoles';
+import { canBeLabels, canBeMeasured, hasTwoOutcomes, measuredLikelihood } from './columnRoles';
 
 /** Which column holds the values, or which columns hold one group each. */
 export const measuredStep: Asker = context => {
@@ -9,8 +9,8 @@ export const measuredStep: Asker = context => {
   const labels = context.columns.filter(canBeLabels);
   const items: StepItem[] = measurable.map(column => numberItem(context, column));
   const wide = context.files.length === 1 && measurable.length > 1;
-  const single = measurable.findIndex(column => !looksLikeIds(column, context.rows));
-  let guess = Math.max(0, single);
+  const likelihoods = measurable.map(column => measuredLikelihood(column, context.rows));
+  let guess = Math.max(0, likelihoods.indexOf(Math.max(...likelihoods)));
 
   if (wide) {
     const pair = context.picked?.length === 2 && measurable.length === 2 ? measurable : null;

@@ -1,6 +1,7 @@
 import type { LabelColumn } from '../../core/model/cells';
 import type { FileInput } from '../../protocol/files';
 import type { NextStep } from '../../protocol/toWorker';
+import { fieldName } from '../../readers/findField';
 import type { ReadingWish } from '../../readers/readingWish';
 import type { Survey } from '../../readers/survey';
 import type { AskContext } from '../asking/askContext';
@@ -10,8 +11,8 @@ import type { Sitting } from '../desk';
 import { surveyFile, tableOf } from '../filesAtHand';
 import type { Reply } from '../reply';
 
-/** Above this, labels are not looked at row by row before a question: asking must stay quick. */
-const MOST_ROWS = 200_000;
+/** Above this, columns in which every cell is another one are not held as labels: they would take more than all others. */
+const MANY_ROWS = 200_000;
 
 /** Decides what is to be asked next about these files. */
 export async function nextStepCall(call: NextStep, sitting: Sitting): Promise<Reply<'asked'>> {
@@ -20,15 +21,12 @@ export async function nextStepCall(call: NextStep, sitting: Sitting): Promise<Re
   const [file] = call.files;
   if (file === undefined) return { type: 'asked', step: null, request: call.request };
   const survey = await surveyFile(desk, file, wish, tick);
-  const labels =
-    survey.rows > MOST_ROWS
-      ? new Map<string, LabelColumn>()
-      : await labelColumns(file, wish, survey, sitting);
+  const labels = await labelColumns(file, wish, survey, sitting);
   const context: AskContext = {
     t: desk.t,
     files: call.files.map(({ name }) => name),
     rows: survey.rows,
-    columns: survey.columns,
+    columns: survey.columns.map(column => ({ ...column, name: fieldName(survey.fields, column.field) })),
     request: call.request,
     picked: call.columns,
     remembered: call.remembered,
@@ -48,7 +46,8 @@ async function labelColumns(
 ): Promise<ReadonlyMap<string, LabelColumn>> {
   const wanted = survey.columns
     .filter(column => canBeIds(column) || canBeLabels(column))
+    .filter(column => survey.rows <= MANY_ROWS || !column.nearlyUnique)
     .map(({ field }) => field);
   const table = await tableOf(desk, file, wish, wanted, tick);
-  return new Map(wanted.map(field => [survey.fields[field]?.name ?? '', table.labels(field)]));
+  return new Map(wanted.map(field => [fieldName(survey.fields, field), table.labels(field)]));
 }

@@ -275,3 +275,14 @@ describe('the question about the label column', () => {
     expect(goThrough(about(cells)).request).toMatchObject({ label: 'schedule', test: 'slow cool' });
   });
 });
+
+describe('the question about the measured column', () => {
+  it('rather takes numbers with decimals or a unit than whole numbers that may be ids', () => {
+    const cells = {
+      schedule: repeat(['slow cool', 'standard'], 6),
+      firing: Array.from({ length: 12 }, (_, row) => String(row * row)),
+      hardness: Array.from({ length: 12 }, (_, row) => `${800 + row}.5`),
+    };
+    expect(goThrough(about(cells)).request).toMatchObject({ measured: ['hardness'] });
+  });
+});
