@@ -1,7 +1,7 @@
 import * as v from 'valibot';
 
 /** A message that no side sends: names the first place that is wrong, never what stands there. */
-export class NotAMessage extends Error {
+class NotAMessage extends Error {
   constructor(what: string, issues: readonly v.BaseIssue<unknown>[]) {
     const [first] = issues;
     const path = first === undefined ? null : v.getDotPath(first);

@@ -3,7 +3,7 @@ import type { Session, Step } from '../compare/session';
 import { countSchema } from './places';
 import { requestSchema } from './request';
 
-export const sessionStepSchema: v.GenericSchema<unknown, Step> = v.strictObject({
+const sessionStepSchema: v.GenericSchema<unknown, Step> = v.strictObject({
   request: requestSchema,
   when: v.string(),
 });

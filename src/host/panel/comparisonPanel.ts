@@ -61,6 +61,7 @@ export class ComparisonPanel implements Disposable {
       }),
       comparison.onBusy(({ done, total }) => this.tell(done, total)),
     );
+    panel.iconPath = Uri.joinPath(extensionUri, 'media', 'icon.svg');
     this.follow();
     panel.webview.html = panelHtml(panel.webview, extensionUri);
   }

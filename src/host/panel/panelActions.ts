@@ -29,10 +29,12 @@ export async function actOn(services: Services, comparison: Comparison, action: 
   }
 }
 
-/** Goes to the cell that a problem is about. */
+/** Goes to the cell that a problem is about; a row that holds text for a number can be left out from there. */
 export async function showProblemCell(services: Services, comparison: Comparison): Promise<void> {
-  const at = comparison.shown?.problem?.at ?? null;
-  if (at !== null) await showAt(services, comparison, at);
+  const problem = comparison.shown?.problem ?? null;
+  if (problem === null || problem.at === null) return;
+  await showAt(services, comparison, problem.at);
+  if (problem.code === 'text-in-measured') await offerToLeaveOut(comparison, problem.at);
 }
 
 async function showAt({ client }: Services, comparison: Comparison, at: CellRef): Promise<void> {

@@ -1,4 +1,4 @@
-import { l10n, Uri, type Webview } from 'vscode';
+import { env, l10n, Uri, type Webview } from 'vscode';
 
 /** The page of a panel: a root, our style, our script, and nothing else may load or run. The content comes by message. */
 export function panelHtml(webview: Webview, extensionUri: Uri): string {
@@ -13,7 +13,7 @@ export function panelHtml(webview: Webview, extensionUri: Uri): string {
     `font-src ${webview.cspSource}`,
   ].join('; ');
   return `<!DOCTYPE html>
-<html lang="en">
+<html lang="${escaped(l10n.bundle === undefined ? 'en' : env.language)}">
 <head>
 <meta charset="utf-8">
 <meta http-equiv="Content-Security-Policy" content="${escaped(policy)}">

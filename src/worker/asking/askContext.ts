@@ -36,7 +36,7 @@ export const isAnswered = (context: AskContext, id: StepId, ...keys: readonly (k
   context.answered.includes(id) || keys.some(key => context.request[key] !== undefined);
 
 /** Index of the item that was picked last time, when it is still among them and nothing else is. */
-export function rememberedItem(
+function rememberedItem(
   items: readonly { readonly adds: Partial<Request> }[],
   remembered: Partial<Request> | null,
 ): number {

@@ -6,7 +6,7 @@ import type { Provenance } from '../../core/model/settings';
 import type { Answer } from '../../protocol/toWorker';
 import { jsonReport } from '../../report/json';
 import { viewOf } from '../../report/view';
-import { blockFrom } from '../../settings/block';
+import { blockFrom, type Block } from '../../settings/block';
 import { cellsDigest } from '../../settings/digests';
 import { printBlock } from '../../settings/printBlock';
 import { changesKept } from '../changesKept';
@@ -26,8 +26,9 @@ export async function answerCall(call: Answer, sitting: Sitting): Promise<Reply<
     ...call.provenance,
     changed: changesKept(call.provenance.changed, changedAfterShown(call.session)),
   };
-  const blockText =
+  const block =
     call.record && comparison.open.length === 0 ? recordOf(answered, provenance, call, sitting) : null;
+  const blockText = block === null ? null : printBlock(block);
   const { t, version } = desk;
   return {
     type: 'answered',
@@ -36,7 +37,7 @@ export async function answerCall(call: Answer, sitting: Sitting): Promise<Reply<
     readings: comparison.readings.map((reading, index) =>
       readingFacts(files[index]?.path ?? '', reading, table?.rows ?? 0),
     ),
-    cells: table === null ? '' : cellsDigest(table, comparison.settings, desk.platform.createHasher),
+    cells: cellsOf(block) ?? digestOf(answered, sitting),
     open: comparison.open,
     numbers: call.numbers ? { ...jsonReport(comparison, t) } : null,
   };
@@ -76,8 +77,15 @@ const askedOfTable: ReadonlySet<string> = new Set<keyof Request>([
 const readingPart = (request: Request): unknown =>
   Object.entries(request).filter(([key]) => !askedOfTable.has(key));
 
-function recordOf(answered: Answered, provenance: Provenance, call: Answer, { desk }: Sitting): string {
+function recordOf(answered: Answered, provenance: Provenance, call: Answer, { desk }: Sitting): Block {
   const { version, platform } = desk;
   const stamp = { version, written: call.written, createHasher: platform.createHasher };
-  return printBlock(blockFrom(answered, provenance, stamp));
+  return blockFrom(answered, provenance, stamp);
 }
+
+/** The digest that the record of one file holds already. */
+const cellsOf = (block: Block | null): string | null =>
+  block?.data?.length === 1 ? (block.data[0]?.cells ?? null) : null;
+
+const digestOf = ({ table, comparison }: Answered, { desk }: Sitting): string =>
+  table === null ? '' : cellsDigest(table, comparison.settings, desk.platform.createHasher);
