@@ -13,7 +13,7 @@ export interface Notice {
   readonly action: { readonly id: (typeof noticeActions)[number]; readonly label: string } | null;
 }
 
-export const tools = ['undo', 'redo', 'addToNotebook'] as const;
+export const tools = ['answer', 'undo', 'redo', 'addToNotebook'] as const;
 
 /** A button of the page's own; it is there only while it can do something. */
 export interface Tool {

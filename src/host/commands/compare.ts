@@ -1,16 +1,12 @@
-import { l10n } from 'vscode';
 import type { Request } from '../../compare/request';
 import { readRequest } from '../../protocol/request';
-import { askForRequest } from '../asking/askForRequest';
-import { rememberAnswers, rememberedAnswers } from '../asking/remembered';
+import { askComparison } from '../asking/askComparison';
 import { RefusedError } from '../compute/computeClient';
-import { openFile } from '../files/openedFile';
-import { lastPart, recordName, rootOf } from '../files/root';
+import { recordName, rootOf } from '../files/root';
 import type { Host } from '../host';
 import { chooseFile } from '../selecting/chooseFile';
 import { targetsOf, type Targets } from '../selecting/targets';
 import { settingsFor } from '../settingsFor';
-import { whileWaiting } from '../whileWaiting';
 import type { Command } from './command';
 
 /**
@@ -42,31 +38,12 @@ async function chosen(): Promise<Targets | null> {
   return uri === null ? null : { files: [uri], spans: [] };
 }
 
+/** What was asked; where the file cannot be read, what is known: the panel then says what is wrong with it. */
 async function asked(host: Host, { files, spans }: Targets, base: Request): Promise<Request> {
-  const { client, context, log } = host;
-  const title = files.map(lastPart).join(', ');
   try {
-    const inputs = await Promise.all(
-      files.map(async (uri, index) => (await openFile(uri, base.files[index] ?? '')).input),
-    );
-    const started = performance.now();
-    const surveyed = await whileWaiting(l10n.t('Reading {0}', title), options =>
-      client.ask({ type: 'survey', revision: 0, files: inputs, request: base, spans }, options),
-    );
-    log.read(surveyed.readings, performance.now() - started);
-    const { rows, columns, says } = surveyed;
-    const answers = await askForRequest(client, {
-      files: inputs,
-      request: rows === null ? base : { ...base, rows },
-      columns,
-      remembered: rememberedAnswers(context.workspaceState, files),
-      title: `${title} · ${says}`,
-    });
-    const request: Request = { ...base, ...answers };
-    await rememberAnswers(context.workspaceState, files, request);
-    return request;
+    return await askComparison(host, files, spans, base);
   } catch (error) {
-    if (error instanceof RefusedError) return base; // the panel says what is wrong with the file
+    if (error instanceof RefusedError) return base;
     throw error;
   }
 }

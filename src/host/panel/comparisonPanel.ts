@@ -19,6 +19,7 @@ import type { Comparison } from './comparison';
 import { watchFiles } from './fileWatch';
 import { noticesFor, type FileState } from './notices';
 import { actOn, showProblemCell } from './panelActions';
+import { answerQuestion, questionLabel } from './openQuestions';
 import { panelHtml } from './panelHtml';
 
 export const viewType = 'weighbeam.comparison';
@@ -106,7 +107,8 @@ export class ComparisonPanel implements Disposable {
         await this.onNotice(message.id);
         return;
       case 'tool':
-        await commands.executeCommand(`weighbeam.${message.id}`);
+        if (message.id === 'answer') await answerQuestion(this.services, this.comparison);
+        else await commands.executeCommand(`weighbeam.${message.id}`);
         return;
       case 'showProblem':
         await showProblemCell(this.services, this.comparison);
@@ -195,7 +197,9 @@ export class ComparisonPanel implements Disposable {
 
 /** The buttons that can do something now. */
 function toolsFor({ canUndo, canRedo, shown }: Comparison): readonly Tool[] {
+  const question = shown === null ? null : questionLabel(shown);
   const possible: readonly (readonly [boolean, Tool])[] = [
+    [question !== null, { id: 'answer', label: question ?? '' }],
     [canUndo, { id: 'undo', label: l10n.t('Undo') }],
     [canRedo, { id: 'redo', label: l10n.t('Redo') }],
     [shown !== null && shown.blockText !== null, { id: 'addToNotebook', label: l10n.t('Add to notebook…') }],

@@ -29,15 +29,15 @@ export async function actOn(services: Services, comparison: Comparison, action: 
   }
 }
 
-/** Goes to the cell that a problem is about; a row that holds text for a number can be left out from there. */
+/** Goes to the cell that a problem is about */
 export async function showProblemCell(services: Services, comparison: Comparison): Promise<void> {
   const problem = comparison.shown?.problem ?? null;
   if (problem === null || problem.at === null) return;
   await showAt(services, comparison, problem.at);
-  if (problem.code === 'text-in-measured') await offerToLeaveOut(comparison, problem.at);
 }
 
-async function showAt({ client }: Services, comparison: Comparison, at: CellRef): Promise<void> {
+/** Goes to a cell of the comparison's files. */
+export async function showAt({ client }: Services, comparison: Comparison, at: CellRef): Promise<void> {
   const { files } = await comparison.open();
   const [uri, input] = [comparison.subject.files[at.file], files[at.file]];
   if (uri !== undefined && input !== undefined) {
@@ -139,8 +139,8 @@ async function askPatch(
   return step === undefined ? null : askStep(services, comparison, request, step);
 }
 
-/** Puts one question again; a question that is asked against a margin is followed by that of the margin. */
-async function askStep(
+/** Puts one question again, null when the person gave up; a question that is asked against a margin is followed by that of the margin. */
+export async function askStep(
   services: Services,
   comparison: Comparison,
   request: Request,

@@ -1,3 +1,4 @@
+import { alikeLabels } from '../../core/evidence/alikeLabels';
 import type { ColumnFacts } from './askContext';
 
 const MOST_LABELS = 50;
@@ -34,12 +35,11 @@ export function looksLikeIds(column: ColumnFacts, rows: number): boolean {
   return span === column.distinct && (column.distinct === rows || column.distinct * 2 <= rows);
 }
 
-/** How a label is spelled but for capitals and spaces: what is spelled alike most often means the same. */
-export const spelling = (label: string): string => label.trim().replace(/\s+/g, ' ').toLowerCase();
-
-/** How many labels there are when those spelled alike count once. */
-export const groupsSpelled = (column: ColumnFacts): number =>
-  new Set(column.labels.map(({ label }) => spelling(label))).size;
+/** How many labels there are when those that look alike count once. */
+export function groupsSpelled(column: ColumnFacts): number {
+  const alike = alikeLabels(column.labels.map(({ label }) => label));
+  return column.distinct - alike.reduce((surplus, set) => surplus + set.length - 1, 0);
+}
 
 /** Yes and no, passed and failed: rather what came out than what was done. */
 export const saysOutcome = (column: ColumnFacts): boolean =>
@@ -47,7 +47,7 @@ export const saysOutcome = (column: ColumnFacts): boolean =>
 
 /** How likely it is that a column holds what was measured: it has a unit or decimals, and names nothing. */
 export const measuredLikelihood = (column: ColumnFacts, rows: number): number =>
-  (looksLikeIds(column, rows) ? 0 : 4) + (column.unit === null ? 0 : 2) + (hasFractions(column) ? 1 : 0);
+  (looksLikeIds(column, rows) ? 0 : 4) + (column.unit !== null ? 2 : hasFractions(column) ? 1 : 0);
 
 /** Whether a label is one that usually names what is compared against. */
 export const soundsLikeReference = (label: string): boolean => REFERENCE_LABEL.test(label.trim());

@@ -31,6 +31,8 @@ const askers: Readonly<Record<StepId, Asker>> = {
 /** The parts of a request that a question answers: without them it can be put again. */
 const answeredBy: Partial<Record<StepId, readonly (keyof Request)[]>> = {
   success: ['success'],
+  same: ['same'],
+  units: ['per', 'pair'],
   question: ['question', 'method', 'variance', 'df', 'curve'],
   margin: ['margin'],
   variance: ['method', 'variance', 'df', 'curve'],

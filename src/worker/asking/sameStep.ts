@@ -1,5 +1,5 @@
+import { alikeLabels } from '../../core/evidence/alikeLabels';
 import { choice, isAnswered, type Asker } from './askContext';
-import { spelling } from './columnRoles';
 import { groupLabels, type GroupLabel } from './groupLabels';
 
 /** Whether labels that differ only in capitals or spaces mean the same group. */
@@ -23,22 +23,17 @@ export const sameStep: Asker = context => {
         label: t('Different groups'),
         description: '',
         detail: t('Each label stays a group of its own'),
-        adds: {},
+        // A label declared the same as itself is declared a group of its own.
+        adds: { same: same.map(([from]) => [from, from] as const) },
       },
     ],
   });
 };
 
-/** Each label that is spelled like a more frequent one, with that one. */
+/** Each label that looks like a more frequent one, with that one. */
 function variants(groups: readonly GroupLabel[]): readonly (readonly [from: string, to: string])[] {
   const byCount = [...groups].sort((a, b) => (b.rows ?? 0) - (a.rows ?? 0));
-  const known = new Map<string, string>();
-  const found: [string, string][] = [];
-  for (const { label } of byCount) {
-    const spelled = spelling(label);
-    const to = known.get(spelled);
-    if (to === undefined) known.set(spelled, label);
-    else found.push([label, to]);
-  }
-  return found;
+  return alikeLabels(byCount.map(({ label }) => label)).flatMap(([usual = '', ...rare]) =>
+    rare.map(label => [label, usual] as const),
+  );
 }
