@@ -19,8 +19,8 @@ export function Page({ show, busy, send }: PageProps) {
       {show?.notices.map(notice => (
         <NoticeLine notice={notice} send={send} />
       ))}
-      <Tools tools={tools.filter(tool => !isNotebook(tool))} send={send} />
       {problem !== null && show !== null && <ProblemPart problem={problem} words={show.words} send={send} />}
+      <Tools tools={tools.filter(tool => !isNotebook(tool))} send={send} />
       {view !== null && <Panel view={view} send={action => send({ type: 'act', revision, action })} />}
       <Tools tools={tools.filter(isNotebook)} send={send} />
     </>

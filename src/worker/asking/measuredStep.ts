@@ -25,6 +25,11 @@ export const measuredStep: Asker = context => {
   for (const column of narrowed(context, outcomes)) {
     items.push(outcomeItem(context, column));
   }
+  const summary = summaryItem(context);
+  if (summary !== null) {
+    guess = items.length;
+    items.push(summary);
+  }
   const only = items[0];
   if (only === undefined) return null;
   if (items.length === 1) return { plain: only.adds };
@@ -84,5 +89,19 @@ function outcomeItem({ t }: AskContext, column: ColumnFacts): StepItem {
     ),
     detail: t('The shares of one outcome are compared'),
     adds: { measured: [column.name], measure: 'proportion' },
+  };
+}
+
+/** A file of summaries: a row a group with its n, mean and SD, or with how many of how many. */
+function summaryItem({ t, columns }: AskContext): StepItem | null {
+  const has = (name: string): boolean => columns.some(column => column.name.trim().toLowerCase() === name);
+  const label = columns.find(({ kind }) => kind === 'label');
+  const means = has('n') && has('mean') && has('sd');
+  if (label === undefined || !(means || (has('x') && has('n')))) return null;
+  return {
+    label: t('Each row is a summary'),
+    description: means ? 'n, mean, sd' : 'x, n',
+    detail: t('Compared as given; the values behind them cannot be checked'),
+    adds: { summary: true, label: label.name, ...(means ? {} : { measure: 'proportion' as const }) },
   };
 }

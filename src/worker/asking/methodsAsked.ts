@@ -12,6 +12,7 @@ export function methodsAsked(request: Partial<Request>): readonly Described[] {
   return methods
     .filter(method => method.design === design && method.measure === measure)
     .filter(method => request.question === undefined || asks(method, request.question))
+    .filter(method => request.summary !== true || method.needs === 'summary')
     .filter(method => request.sigma !== undefined || !method.options.some(needsSigma));
 }
 

@@ -1,6 +1,6 @@
 import type { LabelColumn } from '../../core/model/cells';
 import type { StepItem } from '../../protocol/asking';
-import { choice, isAnswered, type AskContext, type Asker } from './askContext';
+import { choice, isAnswered, type AskContext, type Asker, type ColumnFacts } from './askContext';
 import { canBeIds, hasTwoOutcomes } from './columnRoles';
 import { groupLabels, mergedInto } from './groupLabels';
 import { idFacts, nestIds, type IdFacts } from './relation';
@@ -12,15 +12,17 @@ interface Candidate {
 
 /** What received the treatment as one piece, or what makes two values partners. */
 export const unitsStep: Asker = context => {
-  const { t, request } = context;
+  const { t } = context;
   if (isAnswered(context, 'units', 'per', 'pair')) return null;
   const items: StepItem[] = [eachRow(context)];
   let guess = 0;
+  // Ids that come again in every group may be the same pieces or others: taken only where nothing clearer is there.
+  let doubtful = 0;
   for (const found of candidates(context)) {
     const { facts } = found;
     if (facts.pairs) {
       guess ||= items.length;
-      items.push(pairItem(context, found));
+      items.push(pairItem(context, found.column.name, facts.ids));
       continue;
     }
     if (facts.most < 2) continue;
@@ -33,10 +35,15 @@ export const unitsStep: Asker = context => {
       guess ||= items.length;
       items.push(unitItem(context, found));
     } else {
+      if (facts.ids * 2 >= facts.most) doubtful ||= items.length;
       items.push(restartingItem(context, found));
     }
   }
-  if (items.length === 1) return request.columns === undefined ? null : { plain: {} };
+  for (const column of partnersOfWide(context)) {
+    guess ||= items.length;
+    items.push(pairItem(context, column.name, column.distinct));
+  }
+  if (items.length === 1) return null;
   return choice(
     context,
     {
@@ -44,9 +51,18 @@ export const unitsStep: Asker = context => {
       prompt: t('Rows of one piece are averaged; each piece counts once'),
       items,
     },
-    guess,
+    guess || doubtful,
   );
 };
+
+/** Where each group has a column of its own: columns in which every row has an id of its own, so that it can be a pair. */
+function partnersOfWide({ request, columns, rows }: AskContext): readonly ColumnFacts[] {
+  const groups = request.columns;
+  if (groups === undefined) return [];
+  return columns.filter(
+    column => canBeIds(column) && column.distinct === rows && !groups.includes(column.name),
+  );
+}
 
 /** Columns that could hold ids, with how their ids stand to the groups; only where one column holds the labels. */
 function candidates(context: AskContext): readonly Candidate[] {
@@ -112,11 +128,11 @@ const restartingItem = ({ t }: AskContext, { column, facts }: Candidate): StepIt
   adds: { per: [column.name], pair: 'none' },
 });
 
-const pairItem = ({ t }: AskContext, { column, facts }: Candidate): StepItem => ({
-  label: t('Pairs by {0}', column.name),
-  description: t('{0} pairs', facts.ids),
-  detail: t('Claims that the two values of one {0} belong together', column.name),
-  adds: { pair: column.name },
+const pairItem = ({ t }: AskContext, column: string, pairs: number): StepItem => ({
+  label: t('Pairs by {0}', column),
+  description: t('{0} pairs', pairs),
+  detail: t('Claims that the two values of one {0} belong together', column),
+  adds: { pair: column },
 });
 
 const counted = (t: AskContext['t'], facts: IdFacts): string =>

@@ -226,6 +226,25 @@ describe('the question about units', () => {
     expect(request.per).toBeUndefined();
   });
 
+  it('offers pairs where each group has a column of its own and each row an id', () => {
+    const wide = {
+      tile: ['1', '2', '3', '4'],
+      before: ['2.31', '2.35', '2.29', '2.34'],
+      after: ['2.27', '2.30', '2.24', '2.28'],
+    };
+    const { request } = goThrough(about(wide), { measured: 'One column for each group…' });
+    expect(request).toMatchObject({ columns: ['before', 'after'], reference: 'before', pair: 'tile' });
+  });
+
+  it('rather counts ids that come again in each group once than every row of them', () => {
+    const cells = {
+      schedule: each(['a', 'b'], 8),
+      plot: repeat(each(['1', '2', '3', '4'], 2), 2),
+      yield: Array.from({ length: 16 }, (_, row) => `${row}.5`),
+    };
+    expect(goThrough(about(cells)).request).toMatchObject({ per: ['plot'], pair: 'none' });
+  });
+
   it('offers units within units where readings come again inside them', () => {
     const cells = {
       glaze: each(['a', 'b'], 12),
@@ -284,5 +303,19 @@ describe('the question about the measured column', () => {
       hardness: Array.from({ length: 12 }, (_, row) => `${800 + row}.5`),
     };
     expect(goThrough(about(cells)).request).toMatchObject({ measured: ['hardness'] });
+  });
+});
+
+describe('a file of summaries', () => {
+  it('is seen by its column names, and only methods that need no values are offered', () => {
+    const cells = {
+      mill: ['north', 'river'],
+      n: ['18', '15'],
+      mean: ['23.41', '24.36'],
+      sd: ['1.12', '1.94'],
+    };
+    const { asked, request } = goThrough(about(cells));
+    expect(request).toMatchObject({ summary: true, label: 'mill', reference: 'river', test: 'north' });
+    expect(asked.map(step => step.id)).toEqual(['measured', 'reference', 'question', 'variance']);
   });
 });
