@@ -1,6 +1,5 @@
 // Builds every bundle of the project into dist/.   node esbuild.mjs [--watch]
 import { build, context } from 'esbuild';
-import { existsSync } from 'node:fs';
 import { chmod, mkdir, readdir, rm, writeFile } from 'node:fs/promises';
 import path from 'node:path';
 import { notices } from './.config/notices.mjs';
@@ -29,7 +28,7 @@ const bundles = [
   { out: 'webview.js', entry: 'src/webview/main.tsx', ...page },
   { out: 'cli.js', entry: 'src/cli/main.ts', ...node, banner: { js: '#!/usr/bin/env node' } },
   { out: 'accuracy.js', entry: 'src/cli/accuracy.ts', ...node },
-].filter(bundle => existsSync(bundle.entry));
+];
 
 const optionsOf = ({ out, entry, ...rest }) => ({
   ...rest,
@@ -65,7 +64,7 @@ async function buildAll() {
   const results = await Promise.allSettled(bundles.map(buildOne));
   if (results.some(({ status }) => status === 'rejected')) process.exit(1); // esbuild has said why
   const built = results.map(({ value }) => value);
-  if (existsSync('dist/cli.js')) await chmod('dist/cli.js', 0o755);
+  await chmod('dist/cli.js', 0o755);
   await writeFile('dist/NOTICES.txt', await notices(built.map(({ metafile }) => metafile)));
   await sweep(['dist/NOTICES.txt', ...built.flatMap(({ files }) => files)]);
 }

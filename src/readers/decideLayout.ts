@@ -48,7 +48,9 @@ export function decideLayout(head: HeadBytes, wish: ReadingWish, name: string, f
     null,
   );
   const openQuote = heads.flatMap(records => records.openQuote ?? []).sort((a, b) => a.line - b.line)[0];
-  if (best === null || best.head.openQuote !== null) {
+  // Where nothing parts cells, no quote can open one: such a reading must not hide a quote that another meets.
+  const hidden = openQuote !== undefined && best !== null && best.width === 1;
+  if (best === null || best.head.openQuote !== null || hidden) {
     if (openQuote === undefined) throw new Refusal('file-empty', { name }, name);
     throw new Refusal('quote-unclosed', { name, line: openQuote.line }, { file, ...openQuote });
   }

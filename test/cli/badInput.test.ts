@@ -31,6 +31,7 @@ describe('a file that cannot be compared gets a problem that says where and what
       'file-binary',
       ['data.csv'],
     ],
+    ['an unclosed quote', 'site,mass\nNorth,"1.2\nNorth,1.4\nSouth,2\nSouth,3\n', 'quote-unclosed', ['2']],
     [
       'text where numbers should be',
       good.replace('1.4', 'about 1'),

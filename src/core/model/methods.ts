@@ -39,7 +39,11 @@ export interface MethodResult {
   /** Of the printed interval or bound (0.9 for `equivalent` at confidence 0.95). */
   readonly confidence: number;
   /** Beside every question but `differs`: the two-sided p and interval at the stated confidence. */
-  readonly twoSided?: { readonly p: number | null; readonly lower: number | null; readonly upper: number | null };
+  readonly twoSided?: {
+    readonly p: number | null;
+    readonly lower: number | null;
+    readonly upper: number | null;
+  };
   readonly extra?: Facts;
 }
 
