@@ -14,7 +14,7 @@ interface Percent {
  * the curve and the confidence of the given row, so that it excludes 0 exactly when that row's interval does (against 0).
  * With v₁, v₂ the variances of the means, c their covariance, q the quantile and g = q²v₂/m₂²:
  *   R + (−g·c/v₂ ± (q/m₂)·√(v₁ − 2Rc + R²v₂ − g(v₁ − c²/v₂))) after division by 1 − g; for g ≥ 1 no finite interval.
- * null when the reference mean is not above 0 or the row carries no variances. Means in units of the measured column.
+ * null when the reference mean is not above 0 (or so near it that the percent overflows) or the row carries no variances. Means in units of the measured column.
  * Source: Fieller 1954, Journal of the Royal Statistical Society B 16:175–185.
  */
 export function percentOfReference(
@@ -25,6 +25,7 @@ export function percentOfReference(
   const [testVariance, referenceVariance] = variancesOf(row);
   if (!(referenceMean > 0) || testVariance === undefined || referenceVariance === undefined) return null;
   const value = (100 * difference) / referenceMean;
+  if (!Number.isFinite(value)) return null;
   const quantile = quantileOf(row);
   const covariance = Number(row.extra?.['covariance'] ?? 0);
   const g = (quantile / referenceMean) ** 2 * referenceVariance;
