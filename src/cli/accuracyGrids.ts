@@ -95,7 +95,7 @@ export function digitsOf(grid: Grid): readonly number[] | null {
 const fits = (key: string, { cols }: Grid): boolean =>
   cols.slice(key.split(',').length).every(column => functions[key]?.[column] !== undefined);
 
-export function rightDigits(ours: number, truth: number): number {
+function rightDigits(ours: number, truth: number): number {
   if (ours === truth) return 16;
   const error = Math.abs(ours - truth) / Math.abs(truth);
   return Number.isFinite(error) ? Math.max(0, Math.min(16, -Math.log10(error))) : 0;

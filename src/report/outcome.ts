@@ -52,13 +52,13 @@ function changesWords(changes: readonly OutcomeChange[], t: Say): string {
 }
 
 /** "p was 0.003, is 0.004". */
-export function changeWords(change: OutcomeChange, t: Say): string {
+function changeWords(change: OutcomeChange, t: Say): string {
   const { was, is } = changeTexts(change);
   return t('{0} was {1}, is {2}', keyWords(change.key), was, is);
 }
 
 /** Both values with as few digits as tell them apart, three at least. */
-export function changeTexts({ was, is }: OutcomeChange): { readonly was: string; readonly is: string } {
+function changeTexts({ was, is }: OutcomeChange): { readonly was: string; readonly is: string } {
   const text = (value: string | number, digits: number): string =>
     typeof value === 'string' ? visible(value) : printSignificant(value, digits);
   for (let digits = LEAST_DIGITS; digits < MOST_DIGITS; digits += 1) {

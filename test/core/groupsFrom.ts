@@ -17,14 +17,14 @@ export function exactDecimal(x: number): string {
   return decimalText(BigInt(whole) * 5n ** BigInt(bits), bits);
 }
 
-export function numbersOf(texts: readonly string[]): Numbers {
+function numbersOf(texts: readonly string[]): Numbers {
   const builder = new NumbersBuilder();
   for (const text of texts) builder.addDecimal(text);
   return builder.build();
 }
 
 /** Samples of decimals as written, all in one frame. */
-export function samplesOf(lists: readonly (readonly string[])[]): Sample[] {
+function samplesOf(lists: readonly (readonly string[])[]): Sample[] {
   return alignFrames(lists.map(numbersOf)).map(numbers =>
     makeSample(
       numbers,

@@ -16,8 +16,6 @@ export const evidenceChecks = [
   brownForsythe,
 ] as const;
 
-export type EvidenceId = (typeof evidenceChecks)[number]['id'];
-
 /** The check with this id, from the list unless another is given. */
 export function evidenceById(
   id: string,

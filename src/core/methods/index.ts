@@ -22,8 +22,6 @@ export const methods = [
   miettinenNurminen,
 ] as const;
 
-export type MethodId = (typeof methods)[number]['id'];
-
 /** The method with this id, from the registry unless another list is given. */
 export function methodById(
   id: string,

@@ -49,8 +49,6 @@ export interface LabelColumn {
   readonly codes: Uint8Array | Uint16Array | Int32Array;
 }
 
-export type Column = NumberColumn | LabelColumn;
-
 /** One header cell: its exact text (unit taken off only into `unit`, the name keeps the header's exact text). */
 export interface Field {
   readonly name: string;

@@ -40,7 +40,7 @@ export function chiSquareLowerQuantile(p: number, df: number): number {
  * Regularised incomplete gamma functions P(a, x) and Q(a, x), a > 0, x ≥ 0. Source: series DLMF 8.7.1 below a + 1,
  * continued fraction DLMF 8.9.2 above, prefactor in the saddle-point form of Loader 2000.
  */
-export function incompleteGamma(a: number, x: number): Tails {
+function incompleteGamma(a: number, x: number): Tails {
   if (!(x > 0)) return { lower: 0, upper: 1 };
   if (x === Infinity) return { lower: 1, upper: 0 };
   if (x < a + 1) {

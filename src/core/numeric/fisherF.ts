@@ -31,7 +31,7 @@ export const fLowerQuantile = (p: number, df1: number, df2: number): number =>
   1 / fUpperQuantile(p, df2, df1);
 
 /** Density of F at f > 0. */
-export function fDensity(f: number, df1: number, df2: number): number {
+function fDensity(f: number, df1: number, df2: number): number {
   const { x, y, lambda } = shares(f, df1, df2);
   return betaPrefactor(x, y, df1 / 2, df2 / 2, lambda) / f;
 }

@@ -22,7 +22,7 @@ export function tTwoSided(t: number, df: number): number {
 }
 
 /** Density of Student's t at t. */
-export function tDensity(t: number, df: number): number {
+function tDensity(t: number, df: number): number {
   const { x, y } = shares(t, df);
   return t === 0
     ? (betaPrefactor(0.5, 0.5, df / 2, 0.5) * 2 ** ((df + 1) / 2)) / Math.sqrt(df)

@@ -38,7 +38,7 @@ export function verdictShort(comparison: Comparison, scale: Scale, t: Say): stri
 }
 
 /** The rows the verdict listens to: the counted ones and the chosen one. */
-export function heardRows({ whatIf, chosen }: Comparison): readonly Row[] {
+function heardRows({ whatIf, chosen }: Comparison): readonly Row[] {
   return whatIf.rows.filter(row => row.result !== null && (row.counted || isSame(row, chosen)));
 }
 

@@ -70,7 +70,7 @@ function spanWords(
 }
 
 /** Values that no limit may print as unless it truly has them. */
-export function specialValues({ settings }: Pick<Comparison, 'settings'>): readonly number[] {
+function specialValues({ settings }: Pick<Comparison, 'settings'>): readonly number[] {
   const { against, matters, margin } = settings;
   return [0, against, ...(matters === null ? [] : [matters, -matters]), ...(margin ?? [])];
 }

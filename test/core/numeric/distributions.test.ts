@@ -5,6 +5,13 @@ import jStat from 'jstat';
 import { describe, expect, it } from 'vitest';
 import { digitsOf, summaryOf, type Grid } from '../../../src/cli/accuracyGrids';
 import { betaQuantile } from '../../../src/core/numeric/betaQuantile';
+import { binomialTails } from '../../../src/core/numeric/binomial';
+import {
+  chiSquareLowerQuantile,
+  chiSquareLowerTail,
+  chiSquareUpperQuantile,
+  chiSquareUpperTail,
+} from '../../../src/core/numeric/chiSquare';
 import { fLowerQuantile, fLowerTail, fUpperQuantile, fUpperTail } from '../../../src/core/numeric/fisherF';
 import { incompleteBeta } from '../../../src/core/numeric/incompleteBeta';
 import {
@@ -14,7 +21,14 @@ import {
   normalUpperQuantile,
   normalUpperTail,
 } from '../../../src/core/numeric/normal';
+import {
+  noncentralityForLowerTail,
+  noncentralityForUpperTail,
+  noncentralTLowerTail,
+  noncentralTUpperTail,
+} from '../../../src/core/numeric/noncentralT';
 import { rootOfLogTail } from '../../../src/core/numeric/rootOfLogTail';
+import { studentizedRangeUpperQuantile } from '../../../src/core/numeric/studentizedRange';
 import { tLowerTail, tTwoSided, tUpperQuantile, tUpperTail } from '../../../src/core/numeric/studentT';
 
 const fixtures = path.join(import.meta.dirname, 'fixtures');
@@ -118,6 +132,51 @@ describe('tails and quantiles', () => {
         NaN,
       ]);
     }
+  });
+});
+
+describe('the distributions of sizes, counts and ranges', () => {
+  it('chi-square quantiles invert its tails; on 1 df it is the square of a normal value', () => {
+    fc.assert(
+      fc.property(fc.double({ min: 1e-9, max: 0.999, noNaN: true }), df, (p, n) => {
+        expect(relative(chiSquareUpperTail(chiSquareUpperQuantile(p, n), n), p)).toBeLessThan(1e-9);
+        expect(relative(chiSquareLowerTail(chiSquareLowerQuantile(p, n), n), p)).toBeLessThan(1e-9);
+        expect(relative(chiSquareUpperQuantile(p, 1), normalUpperQuantile(p / 2) ** 2)).toBeLessThan(1e-9);
+      }),
+    );
+  });
+
+  it('the noncentrality found for a tail gives that tail, and is mirrored with the sign of t', () => {
+    const tail = fc.constantFrom(0.005, 0.025, 0.05, 0.5);
+    fc.assert(
+      fc.property(
+        fc.double({ min: -8, max: 8, noNaN: true }),
+        fc.integer({ min: 2, max: 200 }),
+        tail,
+        (t, n, p) => {
+          const lower = noncentralityForUpperTail(t, n, p);
+          expect(relative(noncentralTUpperTail(t, n, lower), p)).toBeLessThan(1e-12);
+          const upper = noncentralityForLowerTail(t, n, p);
+          expect(relative(noncentralTLowerTail(t, n, upper), p)).toBeLessThan(1e-12);
+          expect(noncentralityForLowerTail(-t, n, p)).toBe(-lower);
+        },
+      ),
+      { numRuns: 30 },
+    );
+  });
+
+  it('binomial tails are sums of their terms', () => {
+    // Source: the definition; C(10, k) / 2^10 by hand.
+    expect(binomialTails(2, 10, 0.5).lower).toBeCloseTo(56 / 1024, 15);
+    expect(binomialTails(8, 10, 0.5).upper).toBeCloseTo(56 / 1024, 15);
+    expect(binomialTails(10, 10, 0.5)).toEqual({ lower: 1, upper: expect.closeTo(1 / 1024, 15) });
+    expect(binomialTails(0, 10, 0.5).upper).toBe(1);
+  });
+
+  it('the range of two means is a t times the root of 2', () => {
+    expect(studentizedRangeUpperQuantile(0.05, 2, 9)).toBe(Math.SQRT2 * tUpperQuantile(0.025, 9));
+    // Source: NIST/SEMATECH e-Handbook 7.4.7.1 prints q(0.05; 4, 16) = 4.05.
+    expect(studentizedRangeUpperQuantile(0.05, 4, 16)).toBeCloseTo(4.05, 2);
   });
 });
 
