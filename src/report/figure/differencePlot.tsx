@@ -29,6 +29,7 @@ export function DifferencePlot({ difference }: { readonly difference: Difference
   return (
     <svg
       class="wb-plot wb-plot-difference"
+      width={DIFFERENCE_WIDTH}
       viewBox={`0 0 ${DIFFERENCE_WIDTH} ${PLOT_HEIGHT}`}
       aria-hidden="true"
     >

@@ -35,7 +35,12 @@ export function GroupsPlot({ figure, send }: GroupsPlotProps) {
     : scale;
   const middle = (group: number): number => LEFT + COLUMN * (group + 0.5);
   return (
-    <svg class="wb-plot wb-plot-groups" viewBox={`0 0 ${width} ${PLOT_HEIGHT}`} aria-hidden="true">
+    <svg
+      class="wb-plot wb-plot-groups"
+      width={width}
+      viewBox={`0 0 ${width} ${PLOT_HEIGHT}`}
+      aria-hidden="true"
+    >
       <LabelText text={figure.axis} x={8} y={14} width={52} most={1} anchor="start" kind="wb-axis-name" />
       <Axis scale={printed} x={LEFT} to={width - 6} count={6} />
       {figure.kind === 'pairs' && <PairLines figure={figure} scale={scale} middle={middle} />}
