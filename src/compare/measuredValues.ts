@@ -14,10 +14,11 @@ export type Measured =
 
 export function measuredValues(
   table: Table,
-  settings: Pick<Settings, 'measure' | 'options' | 'reading'>,
+  settings: Pick<Settings, 'layout' | 'measure' | 'options' | 'reading'>,
   field: number,
 ): Measured {
-  if (!measuresOutcomes(settings.measure, settings.options['success'])) {
+  const counted = settings.layout.kind === 'summary';
+  if (counted || !measuresOutcomes(settings.measure, settings.options['success'])) {
     return { kind: 'numbers', field, column: table.numbers(field) };
   }
   const column = table.labels(field);

@@ -1,4 +1,4 @@
-import type { Reason, Say } from '../core/model/say';
+import type { Facts, Reason, Say } from '../core/model/say';
 import type { Outcome, OutcomeChange } from '../recheck/outcome';
 import { fullText, printSignificant, withMinus } from './numbersPrinted';
 import { problemWords } from './problem';
@@ -74,22 +74,20 @@ const keyWords = (key: string): string => visible(key.replace(/^result\./, ''));
 
 function outcomeNote({ code, facts }: Reason, words: Say): string {
   const t = withFacts(words);
-  const keys = facts['keys'];
   switch (code) {
     case 'lines-moved':
       return t('lines of the file have moved');
-    case 'header-moved':
-      return t('the header stands on another line');
     case 'file-changed':
       return t('the file has changed elsewhere');
     case 'text-edited':
       return t('the text of the block was edited after it was written');
+    case 'questions-open':
+      return t('the data now ask a question that was not answered: {0}', listed(facts['ids']));
     case 'unknown-keys':
-      return t(
-        'keys that this version does not know were kept: {0}',
-        Array.isArray(keys) ? keys.join(', ') : '',
-      );
+      return t('keys that this version does not know were kept: {0}', listed(facts['keys']));
     default:
       return visible(code);
   }
 }
+
+const listed = (names: Facts[string] | undefined): string => (Array.isArray(names) ? names.join(', ') : '');
