@@ -1,3 +1,4 @@
+import { mergedLabel } from '../core/evidence/mergedLabel';
 import type { Table } from '../core/model/cells';
 import type { Settings } from '../core/model/settings';
 import type { Roles } from './roles';
@@ -32,17 +33,6 @@ export function groupingOf(table: Table, settings: Grouped, roles: Roles): Group
   const labels = [...new Set(merged.filter((_, code) => code > 0))];
   const ofCode = Int32Array.from(merged, (label, code) => (code === 0 ? -1 : labels.indexOf(label)));
   return { labels, valuesPerRow: 1, labelOf: row => ofCode[codes[row] ?? 0] ?? -1 };
-}
-
-/** What a label counts as after the declared merges, followed one after another; a circle of merges ends where it began. */
-function mergedLabel(label: string, same: Settings['same']): string {
-  const seen = new Set<string>();
-  let now = label;
-  while (!seen.has(now)) {
-    seen.add(now);
-    now = same.find(([from]) => from === now)?.[1] ?? now;
-  }
-  return now;
 }
 
 /** One group a file: its name without the folders, or the whole path where two names are alike. */

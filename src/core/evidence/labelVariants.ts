@@ -2,19 +2,9 @@ import type { LabelColumn, Table } from '../model/cells';
 import type { EvidenceDescriptor, Finding, Seen } from '../model/comparison';
 import type { Settings } from '../model/settings';
 import { alikeLabels } from './alikeLabels';
+import { mergedLabel } from './mergedLabel';
 
 const CELLS = 20;
-
-/** What a label counts as after the declared merges. */
-function merged(label: string, same: Settings['same']): string {
-  const seen = new Set<string>();
-  let now = label;
-  while (!seen.has(now)) {
-    seen.add(now);
-    now = same.find(([from]) => from === now)?.[1] ?? now;
-  }
-  return now;
-}
 
 /** The field a name means: its exact header, else that but for spaces around it, else its place; −1 where there is none. */
 function labelField({ fields }: Table, column: string): number {
@@ -33,7 +23,7 @@ function openSets({ levels }: LabelColumn, { groups, settings }: Seen): readonly
   const compared = new Set(groups.map(({ label }) => label));
   const own = new Set(settings.same.filter(([from, to]) => from === to).map(([from]) => from));
   return alikeLabels(levels.filter(label => !own.has(label))).filter(set => {
-    const counted = new Set(set.map(label => merged(label, settings.same)));
+    const counted = new Set(set.map(label => mergedLabel(label, settings.same)));
     return counted.size > 1 && [...counted].some(label => compared.has(label));
   });
 }
