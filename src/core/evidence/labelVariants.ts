@@ -1,6 +1,5 @@
 import type { LabelColumn, Table } from '../model/cells';
 import type { EvidenceDescriptor, Finding, Seen } from '../model/comparison';
-import type { Settings } from '../model/settings';
 import { alikeLabels } from './alikeLabels';
 import { mergedLabel } from './mergedLabel';
 
