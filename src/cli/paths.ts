@@ -1,6 +1,7 @@
 import { realpath } from 'node:fs/promises';
 import path from 'node:path';
 import { Refusal } from '../core/model/problem';
+import { candidates } from '../recheck/candidates';
 
 /** A file by its place on disk and by its name from the root, with / between folders. */
 export interface NamedFile {
@@ -58,22 +59,13 @@ export async function nameFiles(
  */
 export async function findNamed(name: string, root: string, notebook: string): Promise<string | null> {
   const base = await realpath(root);
-  const refuse = () => new Refusal('file-outside-root', { name, root: path.basename(base) }, name);
-  if (path.isAbsolute(name) || path.win32.isAbsolute(name) || !isInside(base, path.resolve(base, name)))
-    throw refuse();
-  const folders = [base];
-  for (
-    let folder = path.dirname(await realpath(notebook));
-    isInside(base, folder);
-    folder = path.dirname(folder)
-  ) {
-    folders.push(folder);
-    if (folder === path.dirname(folder)) break;
-  }
-  for (const folder of folders) {
-    const found = await realpath(path.resolve(folder, name)).catch(() => null);
+  const notebookFolder = path.relative(base, path.dirname(await realpath(notebook)));
+  for (const candidate of candidates(name, slashes(notebookFolder))) {
+    const found = await realpath(path.resolve(base, candidate)).catch(() => null);
     if (found === null) continue;
-    if (!isInside(base, found)) throw refuse();
+    if (!isInside(base, found)) {
+      throw new Refusal('file-outside-root', { name, root: path.basename(base) }, name);
+    }
     return found;
   }
   return null;

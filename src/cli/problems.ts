@@ -1,5 +1,5 @@
 import { Refusal, type Problem } from '../core/model/problem';
-import { problemLine, problemWords } from '../report/problem';
+import { problemLine, problemWithFlag } from '../report/problem';
 import { english } from './english';
 import { Exit, type ExitCode, type Io } from './io';
 import { UsageError } from './usageError';
@@ -30,7 +30,10 @@ function told(error: unknown, files: readonly string[]): { readonly problem: Tol
     };
   }
   if (error instanceof Refusal) {
-    return { exit: isUsage(error) ? Exit.Usage : Exit.Problem, problem: problemWords(error, english, files) };
+    return {
+      exit: isUsage(error) ? Exit.Usage : Exit.Problem,
+      problem: problemWithFlag(error, english, files),
+    };
   }
   const { message } = error instanceof Error ? error : new Error(String(error));
   const code = error instanceof Error && 'code' in error && typeof error.code === 'string' ? error.code : '';

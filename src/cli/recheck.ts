@@ -1,9 +1,8 @@
 import { readFile } from 'node:fs/promises';
 import path from 'node:path';
-import { recheckBlock } from '../recheck/recheckBlock';
 import type { Outcome } from '../recheck/outcome';
+import { recheckText } from '../recheck/recheckText';
 import { outcomeSentence } from '../report/outcome';
-import { findBlocks } from '../settings/findBlocks';
 import { diskSource } from './diskSource';
 import { english } from './english';
 import { recheckFlags } from './flags';
@@ -68,8 +67,7 @@ async function checkNotebook(
   };
   const shown = path.relative(io.cwd, notebook).split(path.sep).join('/');
   const checked: Checked[] = [];
-  for (const found of findBlocks(await readFile(notebook, 'utf8'))) {
-    const outcome = await recheckBlock(found, open, platform);
+  for await (const outcome of recheckText(await readFile(notebook, 'utf8'), open, platform)) {
     checked.push({ path: shown, line: outcome.line, outcome });
   }
   return checked;

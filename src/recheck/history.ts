@@ -35,7 +35,7 @@ export function historyOf(notebook: string): readonly HistoryEntry[] {
       id: record.id,
       replaces: chain,
       replacedBy: records
-        .filter(({ replaces }) => record.id !== '' && replaces === record.id)
+        .filter(({ id, replaces }) => record.id !== '' && replaces === record.id && id !== record.id)
         .map(({ firstLine }) => firstLine),
       elsewhere: next === NONE || byId.has(next) ? null : next,
     };

@@ -20,7 +20,10 @@ export interface Outcome {
   readonly line: number;
   readonly firstLine: number;
   readonly changes: readonly OutcomeChange[];
-  /** 'lines-moved', 'file-changed', 'text-edited', 'questions-open' {ids of findings}, 'unknown-keys' {keys}. */
+  /**
+   * 'lines-moved', 'file-changed', 'text-edited', 'questions-open' {ids of findings}, 'unknown-keys' {keys}, 'replaced'
+   * {lines of the records that replace it}.
+   */
   readonly notes: readonly Reason[];
   /** Why it is blocked. */
   readonly reason: Refusal | null;

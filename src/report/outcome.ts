@@ -85,6 +85,8 @@ function outcomeNote({ code, facts }: Reason, words: Say): string {
       return t('the data now ask a question that was not answered: {0}', listed(facts['ids']));
     case 'unknown-keys':
       return t('keys that this version does not know were kept: {0}', listed(facts['keys']));
+    case 'replaced':
+      return t('replaced by the record on line {0}', listed(facts['lines']));
     default:
       return visible(code);
   }

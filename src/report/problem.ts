@@ -21,6 +21,13 @@ export function problemWords(refusal: Refusal, t: Say, files: readonly string[] 
   return { code: refusal.code, message, where: whereOf(refusal, message, t, files), fix };
 }
 
+/** The same for the command line: what to do also names what to type. */
+export function problemWithFlag(refusal: Refusal, t: Say, files: readonly string[] = []): Problem {
+  const { flag } = words[refusal.code](toldBy(refusal.facts, t));
+  const problem = problemWords(refusal, t, files);
+  return flag === undefined ? problem : { ...problem, fix: `${problem.fix.replace(/\.$/u, '')} (${flag}).` };
+}
+
 /** A problem on one line, as the command line prints it; surfaces have problems of their own beside those of core. */
 export function problemLine({
   code,

@@ -1,8 +1,10 @@
 import { Uri, workspace } from 'vscode';
+import { Refusal } from '../../core/model/problem';
 import type { NamedFile } from '../../protocol/toWorker';
+import { candidates } from '../../recheck/candidates';
 import { diskPath, followLinks } from '../platform/disk.node';
 import { openFile } from './openedFile';
-import { rootOf } from './root';
+import { recordName, rootOf } from './root';
 
 /**
  * The file that a block of a notebook names: looked for from the root, then from the notebook's folder upwards. A name
@@ -10,9 +12,11 @@ import { rootOf } from './root';
  */
 export async function findNamedFile(name: string, notebook: Uri): Promise<NamedFile> {
   const root = rootOf(notebook);
-  for (const folder of [root, ...foldersUpTo(root, notebook)]) {
-    const uri = Uri.joinPath(folder, name);
-    if (!isWithin(uri, root)) return { name, input: null, outside: true };
+  const folder = Uri.joinPath(notebook, '..');
+  const places = placesOf(name, folder.path === root.path ? '' : recordName(folder, root));
+  if (places === null) return { name, input: null, outside: true };
+  for (const place of places) {
+    const uri = Uri.joinPath(root, place);
     if (!(await exists(uri))) continue;
     if (await leavesByLink(uri, root)) return { name, input: null, outside: true };
     const { input } = await openFile(uri, name);
@@ -21,17 +25,14 @@ export async function findNamedFile(name: string, notebook: Uri): Promise<NamedF
   return { name, input: null, outside: false };
 }
 
-/** The notebook's folder and those above it, up to the root and without it. */
-function foldersUpTo(root: Uri, notebook: Uri): readonly Uri[] {
-  const folders: Uri[] = [];
-  for (
-    let folder = Uri.joinPath(notebook, '..');
-    isWithin(folder, root);
-    folder = Uri.joinPath(folder, '..')
-  ) {
-    folders.push(folder);
+/** Where the file may stand, relative to the root; null for a name that leads out of it. */
+function placesOf(name: string, notebookFolder: string): readonly string[] | null {
+  try {
+    return candidates(name, notebookFolder);
+  } catch (error) {
+    if (error instanceof Refusal) return null;
+    throw error;
   }
-  return folders;
 }
 
 function isWithin(uri: Uri, root: Uri): boolean {

@@ -16,17 +16,18 @@ export const askingProblems = {
   }),
   'sigma-needed': ({ t }) => ({
     message: t('Known standard deviations were asked for and none were given'),
-    fix: t('Give both, of single values, test group first: --sigma 0.8,1.1.'),
+    fix: t('Give both, of single values, test group first.'),
+    flag: '--sigma 0.8,1.1',
   }),
   'sigma-not-positive': ({ t, list }) => ({
     message: t('A standard deviation has to be above 0; given: {0}', list('sigma') ?? '?'),
-    fix: t('Give both known standard deviations, test group first: --sigma 0.8,1.1.'),
+    fix: t('Give both known standard deviations, test group first.'),
+    flag: '--sigma 0.8,1.1',
   }),
   'margin-needed': ({ t }) => ({
     message: t('This question needs a margin'),
-    fix: t(
-      'State it in the units of the measured column, before the result is seen: --margin 5 or --margin=-3,5.',
-    ),
+    fix: t('State it in the units of the measured column, before the result is seen.'),
+    flag: '--margin 5 or --margin=-3,5',
   }),
   'margin-invalid': ({ t, number }) => ({
     message: t(
@@ -34,7 +35,8 @@ export const askingProblems = {
       number('low') ?? '?',
       number('high') ?? '?',
     ),
-    fix: t('Give one number above 0, or both bounds: --margin=-3,5.'),
+    fix: t('Give one number above 0, or both bounds.'),
+    flag: '--margin=-3,5',
   }),
   'matters-invalid': ({ t, number }) => ({
     message: t('The size that matters has to be a number above 0; given: {0}', number('matters') ?? '?'),
@@ -46,7 +48,8 @@ export const askingProblems = {
   }),
   'method-not-for-this': ({ t, text, list }) => ({
     message: notForThis(t, text, list),
-    fix: t('Leave the method to its default, or see what each one is for: weighbeam methods.'),
+    fix: t('Leave the method to its default, or see what each one is for.'),
+    flag: 'weighbeam methods',
   }),
   'question-not-for-method': ({ t, text, list }) => ({
     message: t('{0} does not answer the question "{1}"', text('method') ?? '', text('question') ?? ''),
@@ -59,7 +62,8 @@ export const askingProblems = {
         .map(id => evidenceById(id)?.title(t) ?? id)
         .join(', '),
     ),
-    fix: t('Answer it; the number itself is printed beside the question (--format text or json).'),
+    fix: t('Answer it; the number itself is shown beside the question.'),
+    flag: '--format text',
   }),
   'reason-needed': ({ t, number, text }) => ({
     message:

@@ -20,9 +20,8 @@ export const computingProblems = {
             number('missing') ?? 0,
             number('leftOut') ?? 0,
           ),
-          fix: t(
-            'Check the rows of this group; one value is enough only with known standard deviations (--variance known).',
-          ),
+          fix: t('Check the rows of this group; one value is enough only with known standard deviations.'),
+          flag: '--variance known',
         },
   'values-all-equal': ({ t, text }) => ({
     message:

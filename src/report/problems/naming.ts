@@ -1,5 +1,5 @@
 import type { Say } from '../../core/model/say';
-import type { SayProblem } from './told';
+import type { ProblemWords, SayProblem } from './told';
 
 /** Why the columns, groups or rows named do not make a comparison. */
 export const namingProblems = {
@@ -13,15 +13,7 @@ export const namingProblems = {
   }),
   'column-needed': ({ t, text, list }) => ({
     message: columnNeeded(t, text('needed') ?? ''),
-    fix:
-      text('needed') === 'measured'
-        ? t('Name it (--of); the columns are: {0}.', list('columns') ?? t('none'))
-        : text('needed') === 'label'
-          ? t(
-              'Name it (--by), or one column a group (--columns); the columns are: {0}.',
-              list('columns') ?? t('none'),
-            )
-          : t('The columns are: {0}.', list('columns') ?? t('none')),
+    ...columnRemedy(t, text('needed') ?? '', list('columns') ?? t('none')),
   }),
   'label-unknown': ({ t, text, list }) => ({
     message:
@@ -38,11 +30,9 @@ export const namingProblems = {
     message: t('The label {0} occurs once: one value has no spread', text('label') ?? ''),
     fix:
       list('labels') === null
-        ? t('Check whether it is another group misspelt (--same "FROM -> TO"), or choose another group.')
-        : t(
-            'Check whether it is another group misspelt (--same "FROM -> TO"), or choose among: {0}.',
-            list('labels') ?? '',
-          ),
+        ? t('Check whether it is another group misspelt, or choose another group.')
+        : t('Check whether it is another group misspelt, or choose among: {0}.', list('labels') ?? ''),
+    flag: '--same "FROM -> TO"',
   }),
   'groups-too-few': ({ t, list }) => ({
     message: t('There are not two groups to compare'),
@@ -53,9 +43,8 @@ export const namingProblems = {
   }),
   'groups-too-many': ({ t, list }) => ({
     message: t('There are more than two groups: {0}', list('labels') ?? ''),
-    fix: t(
-      'Name the two to compare (--test, --reference). To choose them after seeing the values overstates what they show.',
-    ),
+    fix: t('Name the two to compare. To choose them after seeing the values overstates what they show.'),
+    flag: '--test L --reference L',
   }),
   'columns-too-many': ({ t, list }) => ({
     message: t('More than one measured column was named: {0}', list('columns') ?? ''),
@@ -71,7 +60,8 @@ export const namingProblems = {
   }),
   'success-needed': ({ t, list }) => ({
     message: t('It is not said which outcome is counted'),
-    fix: t('Name it (--success); the outcomes are: {0}.', list('outcomes') ?? list('labels') ?? ''),
+    fix: t('Name it; the outcomes are: {0}.', list('outcomes') ?? list('labels') ?? ''),
+    flag: '--success VALUE',
   }),
   'outcomes-too-many': ({ t, list, text }) => ({
     message: t(
@@ -79,7 +69,8 @@ export const namingProblems = {
       text('column') ?? t('the column'),
       list('outcomes') ?? list('labels') ?? '',
     ),
-    fix: t('Declare outcomes the same (--same "FROM -> TO"), or name the one that is counted (--success).'),
+    fix: t('Declare outcomes the same, or name the one that is counted.'),
+    flag: '--same "FROM -> TO", --success VALUE',
   }),
   'units-disagree': ({ t, text }) => ({
     message: t(
@@ -87,7 +78,8 @@ export const namingProblems = {
       text('column') ?? t('unit'),
       text('unit') ?? '',
     ),
-    fix: t('A unit has one outcome: correct the file, or compare rows one by one (--per none).'),
+    fix: t('A unit has one outcome: correct the file, or compare rows one by one.'),
+    flag: '--per none',
   }),
   'pairs-repeated': ({ t, text, list }) => ({
     message: t(
@@ -108,6 +100,16 @@ export const namingProblems = {
     fix: t('Check the pair column: the same id has to stand in both groups, exactly as written.'),
   }),
 } as const satisfies Record<string, SayProblem>;
+
+function columnRemedy(t: Say, needed: string, columns: string): Pick<ProblemWords, 'fix' | 'flag'> {
+  if (needed === 'measured') return { fix: t('Name it; the columns are: {0}.', columns), flag: '--of COL' };
+  if (needed === 'label')
+    return {
+      fix: t('Name it, or one column a group; the columns are: {0}.', columns),
+      flag: '--by COL or --columns A,B',
+    };
+  return { fix: t('The columns are: {0}.', columns) };
+}
 
 function columnNeeded(t: Say, needed: string): string {
   if (needed === 'measured') return t('No measured column is named');

@@ -8,9 +8,8 @@ export const readingProblems = {
   }),
   'file-header-only': ({ t }) => ({
     message: t('The file has a header and no data row under it'),
-    fix: t(
-      'Export the data again with its rows, or name the header’s line if another line holds it (--header).',
-    ),
+    fix: t('Export the data again with its rows, or name the header’s line if another line holds it.'),
+    flag: '--header N',
   }),
   'file-binary': ({ t }) => ({
     message: t('The file is not text: it holds bytes that no text has'),
@@ -22,14 +21,16 @@ export const readingProblems = {
   }),
   'file-outside-root': ({ t, text }) => ({
     message: t('{0} lies outside the root folder', text('name') ?? t('The file')),
-    fix: t('Move the file under the root, or name a root that holds it (--root).'),
+    fix: t('Move the file under the root, or name a root that holds it.'),
+    flag: '--root DIR',
   }),
   'encoding-invalid': ({ t, text }) => ({
     message:
       text('encoding') === null
         ? t('The bytes of the file do not fit its encoding')
         : t('The bytes of the file do not fit the encoding {0}', text('encoding') ?? ''),
-    fix: t('Name the encoding the file was written in (--encoding), or save it as UTF-8.'),
+    fix: t('Name the encoding the file was written in, or save it as UTF-8.'),
+    flag: '--encoding E',
   }),
   'quote-unclosed': ({ t }) => ({
     message: t('A quotation mark is opened and never closed'),
@@ -42,7 +43,8 @@ export const readingProblems = {
       text('asDecimal') ?? '1.234',
       text('asThousands') ?? '1234',
     ),
-    fix: t('Say which mark parts the decimals: --decimal , or --decimal .'),
+    fix: t('Say which mark parts the decimals.'),
+    flag: '--decimal , or --decimal .',
   }),
   'layouts-equal': ({ t, names }) => ({
     message: t(
@@ -51,14 +53,16 @@ export const readingProblems = {
         .map(mark => (mark === '\t' ? t('tab') : mark))
         .join(t(' and by ')),
     ),
-    fix: t('Name the delimiter: --delimiter.'),
+    fix: t('Name the delimiter.'),
+    flag: '--delimiter C',
   }),
   'header-not-found': ({ t, text }) => ({
     message:
       text('header') === null
         ? t('No line of the file looks like a header')
         : t('Line {0} is not in the file, so it cannot be the header', text('header') ?? ''),
-    fix: t('Name the line that holds the column names (--header).'),
+    fix: t('Name the line that holds the column names.'),
+    flag: '--header N',
   }),
   'text-in-measured': ({ t, number, list }) => ({
     message: t(
@@ -66,9 +70,8 @@ export const readingProblems = {
       number('count') ?? 1,
       list('texts') ?? '',
     ),
-    fix: t(
-      'Correct the cells in the file, or leave those rows out with a reason (--leave-out "LINE:reason").',
-    ),
+    fix: t('Correct the cells in the file, or leave those rows out with a reason.'),
+    flag: '--leave-out "LINE:reason"',
   }),
   'censored-unanswered': ({ t, number }) => ({
     message: t(
@@ -76,8 +79,9 @@ export const readingProblems = {
       number('count') ?? 1,
     ),
     fix: t(
-      'Say how such values are counted: --below zero, half or limit. Each choice can change the answer.',
+      'Say how such values are counted: as zero, half the limit or the limit. Each can change the answer.',
     ),
+    flag: '--below zero, half or limit',
   }),
   'number-unusable': ({ t, text }) => ({
     message:

@@ -16,6 +16,8 @@ export interface Told {
 export interface ProblemWords {
   readonly message: string;
   readonly fix: string;
+  /** What to type on the command line to do it; no other surface shows it. */
+  readonly flag?: string;
 }
 
 export type SayProblem = (told: Told) => ProblemWords;

@@ -1,10 +1,9 @@
 import { Refusal } from '../../core/model/problem';
 import type { Recheck } from '../../protocol/toWorker';
 import type { ByteSource } from '../../readers/byteSource';
-import { recheckBlock } from '../../recheck/recheckBlock';
 import type { Outcome } from '../../recheck/outcome';
+import { recheckText } from '../../recheck/recheckText';
 import { outcomeSentence } from '../../report/outcome';
-import { findBlocks } from '../../settings/findBlocks';
 import type { OutcomeShown } from '../../protocol/fromWorker';
 import type { Desk, Sitting } from '../desk';
 import type { Reply } from '../reply';
@@ -19,10 +18,8 @@ export async function recheckCall(call: Recheck, { desk, tick }: Sitting): Promi
     return Promise.resolve(input === null ? null : desk.platform.open(input));
   };
   const outcomes: OutcomeShown[] = [];
-  for (const found of findBlocks(call.text)) {
-    const outcome = await recheckBlock(found, open, { tick, createHasher: desk.platform.createHasher });
-    outcomes.push(shown(outcome, desk));
-  }
+  const platform = { tick, createHasher: desk.platform.createHasher };
+  for await (const outcome of recheckText(call.text, open, platform)) outcomes.push(shown(outcome, desk));
   return { type: 'rechecked', outcomes };
 }
 
