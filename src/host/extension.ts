@@ -13,7 +13,7 @@ import { Log } from './log';
 import { viewType } from './panel/comparisonPanel';
 import { PanelManager } from './panel/panelManager';
 import type { Shown } from './panel/shown';
-import type { Services } from './services';
+import type { OpenStep, Services } from './services';
 
 /** What the extension's own tests see of it. */
 export interface TestApi {
@@ -21,6 +21,10 @@ export interface TestApi {
   lastShown(): Shown | null;
   /** Ends the worker as a crash would. */
   endWorker(): void;
+  /** What the panel in front says of its files. */
+  notices(): readonly string[];
+  /** The question that is open. */
+  openStep(): OpenStep | null;
 }
 
 /** Wires the parts; everything else begins when a command or a panel asks for it. */
@@ -30,7 +34,11 @@ export function activate(context: ExtensionContext): TestApi | undefined {
   const { version } = context.extension.packageJSON as { readonly version: string };
   const client = new ComputeClient(context.extensionUri, version, log);
   const testing = context.extensionMode === ExtensionMode.Test;
-  const services: Services = { context, client, log, testing };
+  let openStep: OpenStep | null = null;
+  const onStep = (step: OpenStep | null): void => {
+    openStep = step;
+  };
+  const services: Services = { context, client, log, testing, onStep };
   const panels = new PanelManager(services);
   const diagnostics = languages.createDiagnosticCollection('weighbeam');
   const host: Host = { ...services, panels, diagnostics };
@@ -52,6 +60,11 @@ export function activate(context: ExtensionContext): TestApi | undefined {
     ),
   );
   return testing
-    ? { lastShown: () => panels.current?.shown ?? null, endWorker: () => client.end() }
+    ? {
+        lastShown: () => panels.current?.shown ?? null,
+        endWorker: () => client.end(),
+        openStep: () => openStep,
+        notices: () => panels.notices,
+      }
     : undefined;
 }

@@ -66,6 +66,25 @@ export async function compare(uri: vscode.Uri, request: object): Promise<Shown> 
   return shown;
 }
 
+/** Starts the command and waits for its first question; gives what stands over it. Escape ends the command. */
+export async function takenBy(...args: readonly unknown[]): Promise<string> {
+  const api = await weighbeam();
+  const running = Promise.resolve(vscode.commands.executeCommand('weighbeam.compare', ...args));
+  const { title } = await until('a question is open', () => api.openStep() ?? undefined);
+  await escape(running);
+  return title;
+}
+
+/** Presses Escape until the command has ended. */
+export async function escape(running: Promise<unknown>): Promise<void> {
+  let ended = false;
+  void running.then(() => (ended = true));
+  await until('the command has ended', async () => {
+    await vscode.commands.executeCommand('workbench.action.closeQuickOpen');
+    return ended;
+  });
+}
+
 /** Runs the command and takes the answer under the cursor of every question; gives what the panel then shows. */
 export async function compareByEnter(...args: readonly unknown[]): Promise<Shown> {
   const api = await weighbeam();

@@ -15,7 +15,7 @@ import { rememberAnswers, rememberedAnswers } from './remembered';
  * @param base what is known without asking: names of the files, how to read them, the confidence
  */
 export async function askComparison(
-  { client, context, log }: Services,
+  { client, context, log, onStep }: Services,
   files: readonly Uri[],
   spans: readonly TextSpan[],
   base: Request,
@@ -35,6 +35,7 @@ export async function askComparison(
     columns,
     remembered: rememberedAnswers(context.workspaceState, files),
     title: `${title} · ${says}`,
+    onStep,
   });
   const request: Request = { ...base, ...answers };
   await rememberAnswers(context.workspaceState, files, request);

@@ -4,6 +4,7 @@ import type { StepId } from '../../protocol/asking';
 import type { FileInput } from '../../protocol/files';
 import type { ComputeClient } from '../compute/computeClient';
 import { whileWaiting } from '../whileWaiting';
+import type { Services } from '../services';
 import { showStep } from './showStep';
 
 interface Wanted {
@@ -14,6 +15,7 @@ interface Wanted {
   readonly remembered: Partial<Request> | null;
   /** Stands before every question: what is compared and what was taken of it. */
   readonly title: string;
+  readonly onStep: Services['onStep'];
 }
 
 interface Given {
@@ -41,7 +43,9 @@ export async function askForRequest(client: ComputeClient, wanted: Wanted): Prom
       client.ask({ ...call, remembered: habits, ...now }, options),
     );
     if (step === null) return request;
+    wanted.onStep({ id: step.id, title: wanted.title });
     const answer = await showStep(step, { title: wanted.title, canGoBack: given.length > 1 });
+    wanted.onStep(null);
     if (answer === 'escape') throw new CancellationError();
     if (answer === 'back') {
       given.pop();

@@ -30,11 +30,12 @@ export const addToNotebook = (host: Host): Command => ({
   },
 });
 
-/** The notebook that the settings name, else one of the workspace's Markdown files, else one chosen elsewhere. */
+/** The notebook that the settings name, else one of the workspace's notebooks, else one chosen elsewhere. */
 async function chooseNotebook(root: Uri): Promise<Uri | null> {
-  const named = workspace.getConfiguration('weighbeam', root).get<string>('notebookFile') ?? '';
+  const settings = workspace.getConfiguration('weighbeam', root);
+  const named = settings.get<string>('notebookFile') ?? '';
   if (named !== '') return existing(Uri.joinPath(root, named));
-  const found = await workspace.findFiles('**/*.{md,markdown}', undefined, MOST_LISTED);
+  const found = await workspace.findFiles(settings.get<string>('notebooks') ?? '', undefined, MOST_LISTED);
   const elsewhere = { label: l10n.t('Another file…'), description: '', uri: null };
   const items = found
     .sort((a, b) => a.path.localeCompare(b.path))
@@ -48,7 +49,7 @@ async function chooseNotebook(root: Uri): Promise<Uri | null> {
     items.length === 0 ? elsewhere : await window.showQuickPick([...items, elsewhere], { title });
   if (picked === undefined) return null;
   if (picked.uri !== null) return picked.uri;
-  const chosen = await window.showOpenDialog({ title, filters: { Markdown: ['md', 'markdown'] } });
+  const chosen = await window.showOpenDialog({ title });
   return chosen?.[0] ?? null;
 }
 

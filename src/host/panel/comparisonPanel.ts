@@ -67,6 +67,12 @@ export class ComparisonPanel implements Disposable {
     panel.webview.html = panelHtml(panel.webview, extensionUri);
   }
 
+  /** What befell the files or the calculation, as the panel says it. */
+  get notices(): readonly Notice[] {
+    const { shown, subject } = this.comparison;
+    return noticesFor(shown, this.fileState, subject);
+  }
+
   reveal(): void {
     this.panel.reveal(undefined, true);
   }
@@ -175,7 +181,7 @@ export class ComparisonPanel implements Disposable {
         recipe: { files: subject.files.map(String), blockText: shown.blockText, request },
         view: shown.view,
         problem: shown.problem,
-        notices: noticesFor(shown, this.fileState, subject),
+        notices: this.notices,
         tools: toolsFor(this.comparison),
         words: {
           problem: l10n.t('Why there is no number'),

@@ -22,6 +22,11 @@ export class PanelManager implements WebviewPanelSerializer, Disposable {
     return this.front?.comparison ?? null;
   }
 
+  /** What the panel in front says of its files. */
+  get notices(): readonly string[] {
+    return (this.front?.notices ?? []).map(({ text }) => text);
+  }
+
   /** Shows a comparison beside the editor. One that has a panel already is taken up there. */
   async show(subject: Subject, request: Request): Promise<void> {
     const key = subjectKey(subject, request);
