@@ -45,18 +45,19 @@ interface MarkProps {
 }
 
 function Mark({ point, path, x, y, send }: MarkProps) {
-  const { at: cell, far, label } = point;
+  const { at: cell, far, text, label } = point;
+  const title = [text, label].filter(part => part !== '').join(', ');
   const kind = `${far ? 'wb-point wb-point-far' : 'wb-point'}${cell !== null && send !== null ? ' wb-point-live' : ''}`;
   const place = `translate(${at(x)} ${at(y)})`;
   if (cell === null || send === null)
     return (
       <path class={kind} d={path} transform={place}>
-        {label !== '' && <title>{label}</title>}
+        {title !== '' && <title>{title}</title>}
       </path>
     );
   return (
     <path class={kind} d={path} transform={place} onClick={() => send({ kind: 'point', at: cell })}>
-      <title>{label}</title>
+      <title>{title}</title>
     </path>
   );
 }
