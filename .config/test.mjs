@@ -1,4 +1,4 @@
-// npm test [-- --only unit,host,...]: every check of the project. The last line is 'N passed, N failed'.
+// npm test [-- --only unit,host,...] [--editor 1.139]: every check of the project. The last line is 'N passed, N failed'.
 import { mkdtemp, readFile, rm } from 'node:fs/promises';
 import { tmpdir } from 'node:os';
 import path from 'node:path';
@@ -55,7 +55,8 @@ async function vitest(args) {
   }
 }
 
-const { values } = parseArgs({ options: { only: { type: 'string' } } });
+const { values } = parseArgs({ options: { only: { type: 'string' }, editor: { type: 'string' } } });
+if (values.editor !== undefined) process.env.WEIGHBEAM_EDITOR = values.editor; // read where the editor is installed
 const wanted = values.only?.split(',') ?? Object.keys(stages);
 const unknown = wanted.filter(name => !(name in stages));
 if (unknown.length) {

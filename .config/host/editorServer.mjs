@@ -5,8 +5,18 @@ import { tmpdir } from 'node:os';
 import path from 'node:path';
 import { command } from '../command.mjs';
 
-/** VS Code 1.100, the oldest that the extension supports, and the last whose server runs on Node.js 20. */
-const CARRIER = { name: 'code-server', version: '4.100.3', node: 20 };
+/**
+ * The oldest VS Code that the extension supports, which is also the last whose server runs on Node.js 20, and the newest
+ * that it is tried on.
+ */
+const LINES = {
+  '1.100': { version: '4.100.3', node: 20 },
+  1.139: { version: '4.139.1', node: 24 },
+};
+const line = process.env.WEIGHBEAM_EDITOR ?? '1.100';
+if (!(line in LINES))
+  throw new Error(`WEIGHBEAM_EDITOR is ${line}; there are ${Object.keys(LINES).join(', ')}.`);
+const CARRIER = { name: 'code-server', ...LINES[line] };
 /** Searches inside the editor need this binary; its package for one platform brings it without a download. */
 const RIPGREP = '1.18.0';
 
@@ -66,8 +76,10 @@ async function install(folder) {
   const alias = path.join(server, 'node_modules.asar');
   if (!existsSync(alias)) await symlink('node_modules', alias, 'dir');
 
-  const binary = path.join(modules, '@vscode', 'ripgrep', 'bin', 'rg');
-  if (!existsSync(binary)) {
+  // Later lines search with a package that brings its own binary.
+  const search = path.join(modules, '@vscode', 'ripgrep');
+  const binary = path.join(search, 'bin', 'rg');
+  if (existsSync(search) && !existsSync(binary)) {
     await mkdir(path.dirname(binary), { recursive: true });
     await copyFile(path.join(folder, 'node_modules', '@vscode', `ripgrep-${platform}`, 'bin', 'rg'), binary);
     await chmod(binary, 0o755);
