@@ -32,7 +32,7 @@ const markNames: Readonly<Record<string, string>> = {
   ' ': 'space',
   ',': 'comma',
   ';': 'semicolon',
-  '|': 'bar',
+  '|': 'pipe',
 };
 
 function readAs({ reading, rows, firstLine, lastLine }: Survey): readonly string[] {

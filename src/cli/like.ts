@@ -1,5 +1,6 @@
 import { readFile } from 'node:fs/promises';
 import path from 'node:path';
+import { patched } from '../compare/patched';
 import type { Request } from '../compare/request';
 import { Refusal } from '../core/model/problem';
 import { findBlocks } from '../settings/findBlocks';
@@ -51,21 +52,6 @@ export async function recipeOf(like: string, cwd: string): Promise<Recipe> {
   return { request: requestFrom(parsed), purpose: parsed.purpose['question-in-words'] };
 }
 
-/** Keys that cannot stand together: a word on the command line drops what the recipe said in another way. */
-const replaces: Readonly<Partial<Record<keyof Said, readonly (keyof Said)[]>>> = {
-  measured: ['columns', 'summary', 'typed'],
-  label: ['columns', 'summary', 'typed'],
-  columns: ['measured', 'label', 'summary', 'typed'],
-  summary: ['measured', 'label', 'columns', 'typed', 'per', 'pair'],
-  per: ['pair'],
-  pair: ['per'],
-  variance: ['method', 'df', 'curve'],
-  df: ['method'],
-  curve: ['method'],
-  method: ['variance', 'df', 'curve'],
-  measure: ['method', 'variance', 'df', 'curve'],
-};
-
 /**
  * A recipe on other files: what the command line says is laid over it. Rows left out in the block are rows of its own
  * file, so they are not carried to another; nor is the line of its header, which is found anew.
@@ -78,16 +64,11 @@ export function laidOver(
 ): Request {
   const sameFiles =
     files.length === recipe.files.length && files.every((name, index) => name === recipe.files[index]);
-  const dropped = new Set<string>(Object.keys(said).flatMap(key => replaces[key as keyof Said] ?? []));
-  if (!sameFiles) dropped.add('leaveOut');
-  const kept = Object.fromEntries(Object.entries(recipe).filter(([key]) => !dropped.has(key)));
   const { header, ...reading } = recipe.wish;
+  const over = patched(recipe, said, sameFiles ? [] : ['leaveOut']);
   return {
-    ...kept,
-    ...said,
-    ...(said.options === undefined && recipe.options === undefined
-      ? {}
-      : { options: { ...recipe.options, ...said.options } }),
+    ...over,
+    ...(over.options === undefined ? {} : { options: { ...recipe.options, ...said.options } }),
     files,
     wish: { ...reading, ...(sameFiles && header !== undefined ? { header } : {}), ...wish },
   };

@@ -7,9 +7,10 @@ const SIDES: readonly Key[] = ['test', 'reference', 'same'];
 
 /** What else no longer holds when a key is said anew: it was said of another layout, relation, measure or method. */
 const REPLACES: Readonly<Partial<Record<Key, readonly Key[]>>> = {
-  columns: ['measured', 'label', 'summary', ...SIDES],
-  measured: ['columns', 'summary'],
-  label: ['columns', ...SIDES],
+  columns: ['measured', 'label', 'summary', 'typed', ...SIDES],
+  measured: ['columns', 'summary', 'typed'],
+  label: ['columns', 'summary', 'typed', ...SIDES],
+  summary: ['measured', 'label', 'columns', 'typed', 'per', 'pair', ...SIDES],
   measure: ['success', ...ASSUMPTION],
   method: ['variance', 'df', 'curve'],
   variance: ['method', 'df', 'curve'],

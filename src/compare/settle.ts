@@ -2,7 +2,7 @@ import { methods } from '../core/methods/index';
 import type { Table } from '../core/model/cells';
 import type { MethodDescriptor } from '../core/model/methods';
 import { Refusal } from '../core/model/problem';
-import type { OptionValue, Settings } from '../core/model/settings';
+import type { Settings } from '../core/model/settings';
 import { confidenceAsked } from './confidenceAsked';
 import { labelCounts, type LabelCount } from './labelCounts';
 import { layoutAsked, relationAsked } from './layoutAsked';
@@ -41,7 +41,7 @@ export function settle(
   const { method, curve } = methodAsked(request, measure);
   checkMethod({ method, measure, question, relation, layout }, list);
   checkMargin(question, request.margin, confidence);
-  checkSigma(method, request.sigma ?? pairOf(request.options?.['sigma']));
+  checkSigma(method, request.sigma);
   checkNumbers(request);
   const grouped = {
     files: request.files,
@@ -116,10 +116,4 @@ function optionsOf(request: Request, curve: string | null): Settings['options'] 
     ...(request.success === undefined ? {} : { success: request.success }),
     ...(curve === null ? {} : { curve }),
   };
-}
-
-function pairOf(value: OptionValue | undefined): Request['sigma'] {
-  if (typeof value !== 'object') return undefined;
-  const [test, reference] = value;
-  return test === undefined || reference === undefined ? undefined : [test, reference];
 }

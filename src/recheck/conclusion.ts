@@ -1,3 +1,4 @@
+import { mattersPlace } from '../compare/mattersPlace';
 import type { Block, BlockResult } from '../settings/document';
 
 /**
@@ -18,6 +19,5 @@ export function conclusionOf(result: BlockResult, { comparison }: Block): string
 function mattersAnswer(interval: readonly number[] | undefined, matters: number | undefined): string {
   const [lower, upper] = interval ?? [];
   if (matters === undefined || lower === undefined || upper === undefined) return 'not asked';
-  if (lower >= matters || upper <= -matters) return 'beyond';
-  return lower > -matters && upper < matters ? 'within' : 'across';
+  return mattersPlace(lower, upper, matters);
 }

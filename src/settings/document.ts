@@ -156,9 +156,6 @@ export const KEY_ORDER: ReadonlyMap<string, readonly string[]> = new Map(
   }).map(([table, schema]) => [table, Object.keys(schema.entries)] as const),
 );
 
-/** Options of a comparison that keep their key whatever methods there are. */
-export const FIXED_OPTIONS = ['sigma', 'success', 'curve', 'primary', 'seed', 'draws', 'ruled-out'] as const;
-
 /** Keys whose values are printed as bare dates and times. */
 export const MOMENT_KEYS: ReadonlySet<string> = new Set(['when', 'written']);
 

@@ -5,7 +5,7 @@ import type { Count, Summary } from '../core/model/groups';
 import type { LeftOut, OptionValue, Provenance } from '../core/model/settings';
 import type { Request } from '../compare/request';
 import type { ReadingWish } from '../readers/readingWish';
-import { FIXED_OPTIONS, type Block, type BlockData, type BlockSummary } from './document';
+import type { Block, BlockData, BlockSummary } from './document';
 import { optionKeys } from './optionKeys';
 import { rangesOf } from './ranges';
 
@@ -111,11 +111,17 @@ function leftOutOf(block: Block): readonly LeftOut[] {
   }));
 }
 
+/** Options that go with more than one method. */
+const GENERAL = ['primary', 'seed', 'draws'];
+
+/** These are asked by a word of their own; said twice, one could be changed and the other stay. */
+const isNoWordOfItsOwn = (key: string): boolean => !['sigma', 'success', 'curve'].includes(key);
+
 function optionsOf(
   { comparison }: Block,
   list: readonly MethodDescriptor[],
 ): Readonly<Record<string, OptionValue>> {
-  const keys = new Set<string>([...FIXED_OPTIONS, ...optionKeys(list, evidenceChecks)]);
+  const keys = new Set<string>([...GENERAL, ...optionKeys(list, evidenceChecks)].filter(isNoWordOfItsOwn));
   const named = Object.entries(comparison).filter(([key]) => keys.has(key)) as [string, OptionValue][];
   const ruledOut = comparison['ruled-out'];
   return {

@@ -250,6 +250,45 @@ describe('the recipe of a block', () => {
     expect(chosen.id).toBe('pooled-t');
   });
 
+  it.each([
+    ['a curve', ['--pair', 'none', '--curve', 'normal-over-30'], ['--curve', 't'], 'separate-t'],
+    ['pairs', ['--pair', 'none'], ['--pair', 'day'], 'paired-t'],
+  ])('yields in %s that the recipe had said otherwise', async (_, before, after, method) => {
+    const values = Array.from(
+      { length: 31 },
+      (__, day) => `a,${day},${5 + (day % 7)}\nb,${day},${6 + (day % 5)}\n`,
+    );
+    await using temp = await folderWith({ 'data.csv': `kiln,day,x\n${values.join('')}` });
+    const asked = [
+      '--of',
+      'x',
+      '--by',
+      'kiln',
+      '--test',
+      'a',
+      '--reference',
+      'b',
+      '--pair',
+      'none',
+      '--per',
+      'none',
+    ];
+    const first = await weighbeam(
+      temp.folder,
+      'compare',
+      'data.csv',
+      ...asked,
+      ...before,
+      '--format',
+      'block',
+    );
+    expect(first.code).toBe(0);
+    await temp.write('note.md', first.out);
+    const argv = ['compare', 'data.csv', '--like', 'note.md', ...after, '--format', 'json'];
+    const { chosen } = JSON.parse((await weighbeam(temp.folder, ...argv)).out) as { chosen: { id: string } };
+    expect(chosen.id).toBe(method);
+  });
+
   it('of a notebook with several needs the line', async () => {
     await using temp = await folderWith('demo');
     const { out } = await weighbeam(temp.folder, 'compare', ...mainCase, '--format', 'block');

@@ -25,6 +25,23 @@ export async function askText(wanted: TextWanted): Promise<string | null> {
   return text === undefined ? null : text.trim();
 }
 
+/** How the samples were taken, one line for the record, which may stay empty; null when the person gave up. */
+export const askSampling = (value: string, step = ''): Promise<string | null> =>
+  askText({
+    title: l10n.t('How were the samples taken?') + step,
+    prompt: l10n.t('One line for the settings block; leave it empty when it is not known'),
+    placeholder: l10n.t('for example: 3 tiles a firing, places by lot'),
+    value,
+  });
+
+/** Who did the analysis, which may stay empty; null when the person gave up. */
+export const askAnalyst = (value: string, step = ''): Promise<string | null> =>
+  askText({
+    title: l10n.t('Who did the analysis?') + step,
+    prompt: l10n.t('A name for the settings block; it is not a signature, and may stay empty'),
+    value,
+  });
+
 /** A confidence between 0 and 1; typed as percent it is turned down with what to type instead. */
 export async function askConfidence(now: number): Promise<number | null> {
   const typed = await window.showInputBox({

@@ -1,6 +1,6 @@
 import { l10n, window, type Memento } from 'vscode';
 import { fenced } from '../../settings/fenced';
-import { askText } from '../asking/askText';
+import { askAnalyst, askSampling } from '../asking/askText';
 import type { Comparison } from '../panel/comparison';
 
 interface HandedOut {
@@ -60,18 +60,10 @@ function tellWhy(comparison: Comparison): null {
 
 async function askStated(comparison: Comparison, memory: Memento): Promise<Stated | null> {
   const { sampling, analyst } = comparison.stated;
-  const how = await askText({
-    title: l10n.t('How were the samples taken? (1 of 2)'),
-    prompt: l10n.t('One line for the settings block; leave it empty when it is not known'),
-    placeholder: l10n.t('for example: 3 tiles a firing, places by lot'),
-    value: sampling,
-  });
+  const how = await askSampling(sampling, l10n.t(' ({0} of {1})', 1, 2));
   if (how === null) return null;
-  const who = await askText({
-    title: l10n.t('Who did the analysis? (2 of 2)'),
-    prompt: l10n.t('A name for the settings block; it is not a signature, and may stay empty'),
-    value: analyst === '' ? (memory.get<string>(ANALYST) ?? '') : analyst,
-  });
+  const known = analyst === '' ? (memory.get<string>(ANALYST) ?? '') : analyst;
+  const who = await askAnalyst(known, l10n.t(' ({0} of {1})', 2, 2));
   if (who === null) return null;
   await memory.update(ANALYST, who);
   return { sampling: how, analyst: who };

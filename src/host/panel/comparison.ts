@@ -8,7 +8,7 @@ import type { Answered } from '../../protocol/fromWorker';
 import { RefusedError } from '../compute/computeClient';
 import { openFile } from '../files/openedFile';
 import { lastPart } from '../files/root';
-import { timestamp } from '../timestamp';
+import { now } from '../now';
 import type { Services } from '../services';
 import { afterLook } from './looks';
 import { keepSeen, seenBefore } from './seenBefore';
@@ -79,7 +79,7 @@ export class Comparison implements Disposable {
     const keys = Object.keys(this.request) as (keyof Request)[];
     const unset = keys.filter(key => request[key] === undefined && !staying.includes(key));
     const isSame = unset.length === 0 && sameRequest({ ...this.request, ...request }, this.request);
-    await (isSame ? this.run() : this.act({ kind: 'change', patch: request, unset, when: timestamp() }));
+    await (isSame ? this.run() : this.act({ kind: 'change', patch: request, unset, when: now() }));
   }
 
   /** States something for the record that changes no number. */
@@ -172,7 +172,7 @@ export class Comparison implements Disposable {
           files: opened.files,
           session: this.session,
           provenance: this.provenance,
-          written: timestamp(),
+          written: now(),
           record: !opened.unsaved,
           numbers: testing,
         },
@@ -196,7 +196,7 @@ export class Comparison implements Disposable {
     const isFirst = this.seen.size === 0;
     this.seen.add(result);
     const written = this.provenance.looks;
-    const look = { before, isFirst, isAgain: isFirst && this.isRestored, when: timestamp() };
+    const look = { before, isFirst, isAgain: isFirst && this.isRestored, when: now() };
     const { session, provenance } = afterLook({ session: this.session, provenance: this.provenance }, look);
     this.session = session;
     this.provenance = provenance;

@@ -14,7 +14,7 @@ import { documentOf } from '../files/openedFile';
 import { lastPart, recordName, rootOf } from '../files/root';
 import { chooseFile } from '../selecting/chooseFile';
 import type { Services } from '../services';
-import { timestamp } from '../timestamp';
+import { now } from '../now';
 import type { Comparison } from './comparison';
 import { watchFiles } from './fileWatch';
 import { noticesFor, type FileState } from './notices';
@@ -146,7 +146,7 @@ export class ComparisonPanel implements Disposable {
     comparison.moveTo(
       { files, root },
       files.map(file => recordName(file, root)),
-      timestamp(),
+      now(),
     );
     this.follow();
   }

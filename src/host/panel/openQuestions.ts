@@ -3,7 +3,7 @@ import type { Request } from '../../compare/request';
 import type { StepId } from '../../protocol/asking';
 import { askComparison } from '../asking/askComparison';
 import type { Services } from '../services';
-import { timestamp } from '../timestamp';
+import { now } from '../now';
 import type { Comparison } from './comparison';
 import { askStep, offerToLeaveOut, showAt } from './panelActions';
 import type { Shown } from './shown';
@@ -93,14 +93,14 @@ async function answerFinding(
   const unset = (['per', 'pair'] as const).filter(
     key => steps[id ?? ''] === undefined && patch[key] === undefined,
   );
-  await comparison.act({ kind: 'change', patch, unset, when: timestamp() });
+  await comparison.act({ kind: 'change', patch, unset, when: now() });
 }
 
 /** Takes up how the file is to be read; what could not be asked before then follows. */
 async function read(services: Services, comparison: Comparison, wish: Request['wish'] | null): Promise<void> {
   if (wish === null) return;
   const patch = { wish: { ...comparison.request.wish, ...wish } };
-  await comparison.act({ kind: 'change', patch, when: timestamp() });
+  await comparison.act({ kind: 'change', patch, when: now() });
   const { request, shown } = comparison;
   const wasAsked = request.measured ?? request.columns ?? request.summary;
   if (wasAsked === undefined && shown?.problem?.code === 'column-needed') await askAll(services, comparison);
@@ -140,5 +140,5 @@ const delimiters = (): readonly WishItem[] => [
   { label: l10n.t('semicolon'), description: ';', wish: { delimiter: ';' } },
   { label: l10n.t('comma'), description: ',', wish: { delimiter: ',' } },
   { label: l10n.t('tab'), description: '', wish: { delimiter: '\t' } },
-  { label: l10n.t('vertical bar'), description: '|', wish: { delimiter: '|' } },
+  { label: l10n.t('pipe'), description: '|', wish: { delimiter: '|' } },
 ];

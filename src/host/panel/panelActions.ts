@@ -3,11 +3,11 @@ import type { Request } from '../../compare/request';
 import type { CellRef } from '../../core/model/problem';
 import type { StepId } from '../../protocol/asking';
 import type { ChangeKey, PanelAction } from '../../report/panel/action';
-import { askConfidence, askMatters, askText } from '../asking/askText';
+import { askAnalyst, askConfidence, askMatters, askSampling, askText } from '../asking/askText';
 import { showStep } from '../asking/showStep';
 import { showCell } from '../files/showCell';
 import type { Services } from '../services';
-import { timestamp } from '../timestamp';
+import { now } from '../now';
 import type { Comparison } from './comparison';
 
 /** Does what a control of the panel asks for. A person who gives up a question changes nothing. */
@@ -23,7 +23,7 @@ export async function actOn(services: Services, comparison: Comparison, action: 
       await showAt(services, comparison, action.at);
       return offerToLeaveOut(comparison, action.at);
     case 'takeBack':
-      return comparison.act({ kind: 'take back', file: action.file, line: action.line, when: timestamp() });
+      return comparison.act({ kind: 'take back', file: action.file, line: action.line, when: now() });
     case 'copyBlock':
       await commands.executeCommand('weighbeam.copyBlock');
   }
@@ -59,24 +59,12 @@ export async function offerToLeaveOut(comparison: Comparison, { file, line }: Ce
     placeholder: l10n.t('for example: tile cracked on the saw'),
     required: true,
   });
-  if (reason !== null) await comparison.act({ kind: 'leave out', file, line, reason, when: timestamp() });
+  if (reason !== null) await comparison.act({ kind: 'leave out', file, line, reason, when: now() });
 }
 
 async function state(comparison: Comparison, key: 'sampling' | 'analyst'): Promise<void> {
   const { sampling, analyst } = comparison.stated;
-  const text =
-    key === 'sampling'
-      ? await askText({
-          title: l10n.t('How were the samples taken?'),
-          prompt: l10n.t('One line for the settings block'),
-          placeholder: l10n.t('for example: 3 tiles a firing, places by lot'),
-          value: sampling,
-        })
-      : await askText({
-          title: l10n.t('Who did the analysis?'),
-          prompt: l10n.t('A name for the settings block; it is not a signature'),
-          value: analyst,
-        });
+  const text = key === 'sampling' ? await askSampling(sampling) : await askAnalyst(analyst);
   if (text !== null) await comparison.state({ [key]: text });
 }
 
@@ -92,7 +80,7 @@ async function change(services: Services, comparison: Comparison, key: ChangeKey
   if (patch === null) return;
   const reason = comparison.wasSeen ? await askReason() : '';
   if (reason === null) return;
-  const when = timestamp();
+  const when = now();
   const unset = unsetBy(key, patch);
   await comparison.act(
     { kind: 'change', patch, unset, when },
@@ -102,22 +90,11 @@ async function change(services: Services, comparison: Comparison, key: ChangeKey
   );
 }
 
-/** What a new answer makes void: a method is chosen anew with the scale, a margin goes with its question. */
+/** What an answer leaves open that stood there before: a margin goes with its question, a size that matters can be taken back. */
 function unsetBy(key: ChangeKey, patch: Partial<Request>): readonly (keyof Request)[] {
-  const words: readonly (keyof Request)[] = ['variance', 'df', 'curve'];
-  switch (key) {
-    case 'variance':
-      return words;
-    case 'measure':
-      return [...words, 'method'];
-    case 'question':
-      return patch.margin === undefined ? ['margin'] : [];
-    case 'matters':
-      return patch.matters === undefined ? ['matters'] : [];
-    case 'confidence':
-    case 'margin':
-      return [];
-  }
+  if (key === 'question' && patch.margin === undefined) return ['margin'];
+  if (key === 'matters' && patch.matters === undefined) return ['matters'];
+  return [];
 }
 
 async function askPatch(

@@ -4,7 +4,7 @@ import { start } from '../../compare/session';
 import { readPanelState, type Recipe } from '../../protocol/panelState';
 import { rootOf } from '../files/root';
 import type { Services } from '../services';
-import { timestamp } from '../timestamp';
+import { now } from '../now';
 import { Comparison } from './comparison';
 import { ComparisonPanel, createPanel } from './comparisonPanel';
 import { freshProvenance } from './provenance';
@@ -34,7 +34,7 @@ export class PanelManager implements WebviewPanelSerializer, Disposable {
       ({ comparison }) => subjectKey(comparison.subject, comparison.request) === key,
     );
     if (there === undefined) {
-      const comparison = new Comparison(this.services, subject, start(request, timestamp()), freshProvenance);
+      const comparison = new Comparison(this.services, subject, start(request, now()), freshProvenance);
       this.add(new ComparisonPanel(this.services, comparison, createPanel()));
       await comparison.run();
       return;
@@ -58,7 +58,7 @@ export class PanelManager implements WebviewPanelSerializer, Disposable {
     const comparison = new Comparison(
       this.services,
       { files, root },
-      start({ ...request, files: recipe.request.files }, provenance.changed.at(-1)?.when ?? timestamp()),
+      start({ ...request, files: recipe.request.files }, provenance.changed.at(-1)?.when ?? now()),
       provenance,
       true,
     );

@@ -1,10 +1,8 @@
+import { mattersPlace, type MattersPlace } from '../../compare/mattersPlace';
 import type { Comparison } from '../../core/model/comparison';
 import type { Say } from '../../core/model/say';
 import { groupLabels } from '../words/groupLabels';
 import type { Scale } from '../words/scale';
-
-/** Where an interval lies as seen from the size that matters: wholly beyond it, wholly inside, or across. */
-type Place = 'beyond' | 'inside' | 'across';
 
 /** The same in a sentence and in few words. */
 export interface MattersWords {
@@ -32,21 +30,16 @@ export function mattersSentence(comparison: Comparison, scale: Scale, t: Say): M
     return both(t('{0} matters: without an interval this cannot be held against it.', said));
   const lower = result.lower ?? -Infinity;
   const upper = result.upper ?? Infinity;
-  const place = placeOf(lower, upper, matters);
+  const place = mattersPlace(lower, upper, matters);
   return lower <= against && upper >= against
     ? undecided(place, said, scale.typed(against), t)
     : decided(place, { lower, upper, matters: scale.typedNumber(matters), said }, comparison, t);
 }
 
-function placeOf(lower: number, upper: number, matters: number): Place {
-  if (lower >= matters || upper <= -matters) return 'beyond';
-  return lower > -matters && upper < matters ? 'inside' : 'across';
-}
-
 const both = (text: string): MattersWords => ({ full: text, short: text });
 
 /** The interval holds what the difference was held against. */
-function undecided(place: Place, said: string, against: string, t: Say): MattersWords {
+function undecided(place: MattersPlace, said: string, against: string, t: Say): MattersWords {
   return place === 'inside'
     ? {
         full: t(
@@ -77,7 +70,7 @@ interface Seen {
   readonly said: string;
 }
 
-function decided(place: Place, seen: Seen, comparison: Comparison, t: Say): MattersWords {
+function decided(place: MattersPlace, seen: Seen, comparison: Comparison, t: Say): MattersWords {
   const { lower, upper, matters, said } = seen;
   const [test = '', reference = ''] = groupLabels(comparison);
   switch (place) {
