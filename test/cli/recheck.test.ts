@@ -259,25 +259,12 @@ describe('the recipe of a block', () => {
       (__, day) => `a,${day},${5 + (day % 7)}\nb,${day},${6 + (day % 5)}\n`,
     );
     await using temp = await folderWith({ 'data.csv': `kiln,day,x\n${values.join('')}` });
-    const asked = [
-      '--of',
-      'x',
-      '--by',
-      'kiln',
-      '--test',
-      'a',
-      '--reference',
-      'b',
-      '--pair',
-      'none',
-      '--per',
-      'none',
-    ];
+    const words = ['--of', 'x', '--by', 'kiln', '--test', 'a', '--reference', 'b', '--per', 'none'];
     const first = await weighbeam(
       temp.folder,
       'compare',
       'data.csv',
-      ...asked,
+      ...words,
       ...before,
       '--format',
       'block',
