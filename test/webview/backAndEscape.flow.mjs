@@ -8,12 +8,8 @@ export async function flow({ page, input, panel, openFile, run, answerAll }) {
   const next = async () => {
     const now = await title.innerText();
     await page.keyboard.press('Enter');
-    await page.waitForFunction(before => {
-      const shown = [...document.querySelectorAll('.quick-input-title')].find(
-        ({ offsetParent }) => offsetParent,
-      );
-      return !shown || shown.textContent !== before;
-    }, now);
+    const same = title.filter({ hasText: now });
+    for (let waited = 0; waited < 100 && (await same.isVisible()); waited++) await page.waitForTimeout(50);
   };
   await openFile('firings-april.csv');
   await run('Weighbeam: Compare groups…');

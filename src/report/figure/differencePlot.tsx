@@ -6,7 +6,6 @@ import { LabelText } from './labelText';
 import { at, markPath } from './shapes';
 import { swarm } from './swarm';
 
-export const DIFFERENCE_WIDTH = 210;
 const TOP = 48;
 const BOTTOM = 282;
 const LEFT = 58;
@@ -14,10 +13,18 @@ const RIGHT = 136;
 
 type Difference = NonNullable<FigureShown['difference']>;
 
+const LEAST_BESIDE = 74;
+const LETTER = 6.6;
+
+/** Width of the plot in its own units: the axis and the longest label beside it. */
+export const differenceWidth = ({ rules }: Difference): number =>
+  RIGHT + Math.max(LEAST_BESIDE, ...rules.map(({ label }) => 10 + Math.ceil(label.length * LETTER)));
+
 /** The difference with its interval on an axis of its own, with what it is held against and what matters ruled across. */
 export function DifferencePlot({ difference }: { readonly difference: Difference }) {
   const { estimate, lower, upper, rules, points, power, axis } = difference;
   const factor = 10 ** power;
+  const width = differenceWidth(difference);
   const scale = scaleLinear()
     .domain(domainOf(difference).map(value => value * factor))
     .range([BOTTOM, TOP])
@@ -29,8 +36,8 @@ export function DifferencePlot({ difference }: { readonly difference: Difference
   return (
     <svg
       class="wb-plot wb-plot-difference"
-      width={DIFFERENCE_WIDTH}
-      viewBox={`0 0 ${DIFFERENCE_WIDTH} ${PLOT_HEIGHT}`}
+      width={width}
+      viewBox={`0 0 ${width} ${PLOT_HEIGHT}`}
       aria-hidden="true"
     >
       <LabelText text={axis} x={8} y={14} width={30} most={2} anchor="start" kind="wb-axis-name" />

@@ -1,6 +1,6 @@
 import { renderToString } from 'preact-render-to-string';
 import type { View } from '../view/shown';
-import { DifferencePlot, DIFFERENCE_WIDTH } from './differencePlot';
+import { DifferencePlot, differenceWidth } from './differencePlot';
 import { figureStyle } from './figureStyle';
 import { LabelText } from './labelText';
 import { GroupsPlot, groupsPlotWidth, PLOT_HEIGHT } from './groupsPlot';
@@ -15,7 +15,7 @@ export function figureSvg(view: View): string {
   const { figure } = view;
   if (figure === null) return '';
   const groups = groupsPlotWidth(figure);
-  const difference = figure.difference === null ? 0 : DIFFERENCE_WIDTH;
+  const difference = figure.difference === null ? 0 : differenceWidth(figure.difference);
   const width = groups + difference + 2 * MARGIN;
   const height = PLOT_HEIGHT + CAPTION + 2 * MARGIN;
   const svg = (
@@ -35,7 +35,7 @@ export function figureSvg(view: View): string {
         <GroupsPlot figure={figure} send={null} />
       </svg>
       {figure.difference !== null && (
-        <svg x={MARGIN + groups} y={MARGIN} width={DIFFERENCE_WIDTH} height={PLOT_HEIGHT}>
+        <svg x={MARGIN + groups} y={MARGIN} width={difference} height={PLOT_HEIGHT}>
           <DifferencePlot difference={figure.difference} />
         </svg>
       )}

@@ -17,7 +17,7 @@ export function Numbers({ shown, words, send }: Part<NumbersShown>) {
               <span class="wb-unseen">{shown.quantity}</span>
             </th>
             {columns.map(column => (
-              <th key={column} role="columnheader" scope="col">
+              <th key={column} role="columnheader" scope="col" class={shortClass(column)}>
                 {column}
               </th>
             ))}
@@ -26,7 +26,7 @@ export function Numbers({ shown, words, send }: Part<NumbersShown>) {
         <tbody role="rowgroup">
           {rows.map(row => (
             <tr key={row.key} role="row">
-              <th role="rowheader" scope="row">
+              <th role="rowheader" scope="row" class={shortClass(row.name)}>
                 {row.name}
               </th>
               {row.cells.map((cell, index) => (
@@ -56,6 +56,12 @@ export function Numbers({ shown, words, send }: Part<NumbersShown>) {
     </section>
   );
 }
+
+const SHORT = 12;
+
+/** A short label is never broken inside a word; a long one may be, so that the table fits a narrow panel. */
+const shortClass = (label: string): string | undefined =>
+  label.split(' ').every(word => word.length <= SHORT) ? 'wb-short' : undefined;
 
 /** The same numbers with every digit, to be read and copied without pointing at them. */
 function InFull({ shown, words, send }: Part<NumbersShown>) {
