@@ -1,10 +1,9 @@
 import assert from 'node:assert/strict';
 import * as vscode from 'vscode';
 import { long, wide } from './data';
-import { closeAll, compareByEnter, open, panels, read, until, weighbeam, write } from './editor';
+import { closeAll, compareByEnter, escape, open, panels, read, until, weighbeam, write } from './editor';
 
 const accept = () => vscode.commands.executeCommand('workbench.action.acceptSelectedQuickOpenItem');
-const escape = () => vscode.commands.executeCommand('workbench.action.closeQuickOpen');
 
 suite('the command', () => {
   teardown(closeAll);
@@ -53,16 +52,22 @@ suite('the command', () => {
       const uri = await write('escaped.csv', long);
       await open(uri);
       const before = api.lastShown();
-      const running = vscode.commands.executeCommand('weighbeam.compare');
-      // The editor gives no way to see a quick pick from here; an answer is taken as soon as one can be.
-      for (let given = 0; given < answered; given++)
-        await new Promise(resolve => setTimeout(resolve, 400)).then(accept);
-      let ended = false;
-      void running.then(() => (ended = true));
-      await until('the command has ended', async () => {
-        await escape();
-        return ended;
-      });
+      const running = Promise.resolve(vscode.commands.executeCommand('weighbeam.compare'));
+      const seen = new Set<string>();
+      while (seen.size <= answered) {
+        const step = await until('a further question is open', () => {
+          const open = api.openStep();
+          return open !== null && !seen.has(open.id) && open;
+        });
+        seen.add(step.id);
+        // The question is known a moment before its box takes an answer.
+        await until('the answer is taken', async () => {
+          if (seen.size > answered || api.openStep()?.id !== step.id) return true;
+          await accept();
+          return false;
+        });
+      }
+      await escape(running);
       assert.deepEqual(panels(), []);
       assert.equal(api.lastShown(), before);
       assert.equal(await read(uri), long);

@@ -86,6 +86,24 @@ suite('the panel', () => {
     assert.ok(api.notices().some(text => text.includes('stopped unexpectedly')));
   });
 
+  test('says so when the worker dies again and again, instead of computing for ever', async function () {
+    this.timeout(60_000);
+    const rows = Array.from(
+      { length: 400_000 },
+      (_, index) => `${index % 2 ? 'east' : 'west'},${(index * 7919) % 1013}\n`,
+    );
+    const uri = await write('dying.csv', `kiln,density (g/cm3)\n${rows.join('')}`);
+    const api = await weighbeam();
+    const killing = setInterval(() => api.endWorker(), 150);
+    try {
+      const shown = await compare(uri, request);
+      assert.equal(shown.problem?.code, 'calculation-stopped');
+    } finally {
+      clearInterval(killing);
+    }
+    assert.equal((await compare(uri, request)).problem, null, 'the next try is answered');
+  });
+
   test('that was closed while it computed gives no answer to anybody', async () => {
     const uri = await write('closed.csv', long);
     const api = await weighbeam();

@@ -20,6 +20,14 @@ interface Manifest {
       readonly category: string;
     }[];
     readonly menus: Readonly<Record<string, readonly { readonly command: string; readonly when: string }[]>>;
+    readonly walkthroughs: readonly {
+      readonly steps: readonly {
+        readonly id: string;
+        readonly description: string;
+        readonly media: { readonly svg: string; readonly altText: string };
+        readonly completionEvents: readonly string[];
+      }[];
+    }[];
     readonly configuration: { readonly properties: Readonly<Record<string, Setting>> };
   };
 }
@@ -99,6 +107,28 @@ describe('commands', () => {
         expect(when).toContain('resourceExtname =~ /^\\.(csv|tsv|tab|txt)$/i');
     }
   });
+});
+
+describe('the walkthrough', () => {
+  const steps = manifest.contributes.walkthroughs.flatMap(walkthrough => walkthrough.steps);
+
+  it.each(steps)('step $id shows a picture that is there and says what it shows', ({ media }) => {
+    expect(existsSync(path.join(root, media.svg))).toBe(true);
+    expect(words[media.altText.slice(1, -1)]).toBeTruthy();
+  });
+
+  it.each(steps)(
+    'step $id offers and waits for commands that there are',
+    ({ description, completionEvents }) => {
+      const known = commands.map(({ command }) => command);
+      const offered = [...(words[description.slice(1, -1)] ?? '').matchAll(/\(command:([^)]+)\)/g)].map(
+        match => match[1] ?? '',
+      );
+      const awaited = completionEvents.flatMap(event => /^onCommand:(.+)$/.exec(event)?.[1] ?? []);
+      expect([...offered, ...awaited].filter(command => !known.includes(command))).toEqual([]);
+      expect(completionEvents.length).toBeGreaterThan(0);
+    },
+  );
 });
 
 describe('settings', () => {

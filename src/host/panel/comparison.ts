@@ -1,9 +1,10 @@
-import { CancellationError, CancellationTokenSource, EventEmitter, type Disposable } from 'vscode';
+import { CancellationError, CancellationTokenSource, EventEmitter, l10n, type Disposable } from 'vscode';
 import type { Request } from '../../compare/request';
 import { canRedo, canUndo, reduce, requestOf, type Action, type Session } from '../../compare/session';
 import type { Provenance } from '../../core/model/settings';
 import { OtherSideGone } from '../../protocol/calls';
 import type { FileInput } from '../../protocol/files';
+import type { ShownProblem } from '../../protocol/places';
 import type { Answered } from '../../protocol/fromWorker';
 import { RefusedError } from '../compute/computeClient';
 import { openFile } from '../files/openedFile';
@@ -157,7 +158,12 @@ export class Comparison implements Disposable {
         this.services.log.refused(error.problem.code);
         return { ...nothing, problem: error.problem, unsaved, restarted };
       }
-      throw error;
+      if (error instanceof CancellationError) throw error;
+      this.services.log.failed(
+        'answer',
+        error instanceof Error ? (error.stack ?? error.message) : String(error),
+      );
+      return { ...nothing, problem: stoppedProblem(), unsaved, restarted };
     }
   }
 
@@ -207,6 +213,15 @@ export class Comparison implements Disposable {
     return looks !== written || before !== null;
   }
 }
+
+/** What the panel says instead of computing for ever. */
+const stoppedProblem = (): ShownProblem => ({
+  code: 'calculation-stopped',
+  message: l10n.t('The calculation stopped unexpectedly'),
+  where: null,
+  fix: l10n.t('Run the comparison again; should it stop again, the log of Weighbeam says why.'),
+  at: null,
+});
 
 /** Whether two requests say the same, in whatever order. */
 function sameRequest(a: Request, b: Request): boolean {

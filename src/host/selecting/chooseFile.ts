@@ -19,6 +19,9 @@ export async function chooseFile(): Promise<Uri | null> {
       ? elsewhere
       : await window.showQuickPick([...items, elsewhere], {
           title: l10n.t('Which file holds the measurements?'),
+          placeHolder: l10n.t(
+            'In an open file, select the rows to compare first, or nothing for the whole table',
+          ),
         });
   if (picked === undefined) return null;
   if (picked.uri !== null) return picked.uri;
