@@ -57,7 +57,7 @@ export function Numbers({ shown, words, send }: Part<NumbersShown>) {
   );
 }
 
-const SHORT = 12;
+const SHORT = 9;
 
 /** A short label is never broken inside a word; a long one may be, so that the table fits a narrow panel. */
 const shortClass = (label: string): string | undefined =>
