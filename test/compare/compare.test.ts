@@ -154,9 +154,11 @@ describe('rows under other assumptions', () => {
       ['conservative-t', true, false, 'bound'],
       ['large-n-z', true, false, 'too-few-for-normal'],
       ['known-sigma-z', false, false, 'sigma-absent'],
+      ['permutation', true, true, null],
       ['paired-t', false, false, 'no-pairs'],
+      ['sign-flip', false, false, 'no-pairs'],
     ]);
-    expect(whatIf.counted).toEqual([0, 1]);
+    expect(whatIf.counted).toEqual([0, 1, 5]);
   });
 
   it('does not count a row that was ruled out', () => {

@@ -5,9 +5,11 @@ import { largeNZ } from './largeNZ';
 import { miettinenNurminen } from './miettinenNurminen';
 import { newcombe } from './newcombe';
 import { pairedT } from './pairedT';
+import { permutation } from './permutation';
 import { pooledT } from './pooledT';
 import { proportionZ } from './proportionZ';
 import { separateT } from './separateT';
+import { signFlip } from './signFlip';
 
 /** Every method, in the order in which rows are printed. Pickers, flags, schema, help and JSON follow from this list. */
 export const methods = [
@@ -16,7 +18,9 @@ export const methods = [
   conservativeT,
   largeNZ,
   knownSigmaZ,
+  permutation,
   pairedT,
+  signFlip,
   proportionZ,
   newcombe,
   miettinenNurminen,

@@ -1,3 +1,5 @@
+import { readdirSync, readFileSync } from 'node:fs';
+import path from 'node:path';
 import { describe, expect, it } from 'vitest';
 import { evidenceById, evidenceChecks } from '../../../src/core/evidence/index';
 import { methodById, methods } from '../../../src/core/methods/index';
@@ -38,6 +40,20 @@ const OWN_REASONS: Readonly<Record<string, readonly Reason[]>> = {
     { code: 'against-not-zero', facts: {} },
     { code: 'no-outcomes', facts: { label: 'slow' } },
   ],
+  newcombe: [{ code: 'no-outcomes', facts: { label: 'slow' } }],
+  'miettinen-nurminen': [{ code: 'no-outcomes', facts: { label: 'slow' } }],
+  permutation: [
+    { code: 'no-values', facts: {} },
+    { code: 'too-many-ways', facts: { n: 12, m: 12 } },
+    { code: 'too-many-digits', facts: {} },
+    { code: 'cannot-reach', facts: { ways: 20, least: 0.1 } },
+  ],
+  'sign-flip': [
+    { code: 'one-pair', facts: { n: 1 } },
+    { code: 'too-many-ways', facts: { n: 21 } },
+    { code: 'too-many-digits', facts: {} },
+    { code: 'cannot-reach', facts: { n: 5, least: 0.0625 } },
+  ],
 };
 
 describe('the registry of methods', () => {
@@ -72,6 +88,19 @@ describe('the registry of methods', () => {
       }
     },
   );
+
+  it('is held to every reason that stands in the source of a method', () => {
+    const folder = path.join(import.meta.dirname, '..', '..', '..', 'src', 'core', 'methods');
+    const sources = readdirSync(folder)
+      .filter(name => name.endsWith('.ts'))
+      .map(name => readFileSync(path.join(folder, name), 'utf8'));
+    const given = sources.flatMap(source =>
+      [...source.matchAll(/code: '([a-z-]+)', facts/g)].map(([, code]) => code),
+    );
+    const held = new Set([...REASONS, ...Object.values(OWN_REASONS).flat()].map(({ code }) => code));
+    expect(given.length).toBeGreaterThan(10);
+    expect(given.filter(code => code === undefined || !held.has(code))).toEqual([]);
+  });
 
   it('finds a method in any list given', () => {
     expect(methodById('paired-t', all.slice(0, 2))).toBeUndefined();

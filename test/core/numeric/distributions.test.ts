@@ -41,13 +41,20 @@ const probability = fc.double({ min: 1e-12, max: 1 - 1e-12, noNaN: true });
 const df = fc.double({ min: 1, max: 1e6, noNaN: true });
 const moderate = fc.double({ min: -30, max: 30, noNaN: true });
 
+/** The quantiles of the studentized range take a tenth of a second each, more on a busy machine. */
+const WHOLE_GRID_MS = 180_000;
+
 // Source of every grid: 50-digit arithmetic (mpmath) from the exact doubles of the arguments.
 describe('tails and quantiles', () => {
-  it.each(grids.map(grid => [grid.name, grid] as const))('of %s keep 13 digits on every point', (_, grid) => {
-    const digits = digitsOf(grid);
-    expect(digits?.length).toBeGreaterThanOrEqual(grid.rows.length);
-    expect(summaryOf(digits ?? []).fewest).toBeGreaterThanOrEqual(13);
-  });
+  it.each(grids.map(grid => [grid.name, grid] as const))(
+    'of %s keep 13 digits on every point',
+    (_, grid) => {
+      const digits = digitsOf(grid);
+      expect(digits?.length).toBeGreaterThanOrEqual(grid.rows.length);
+      expect(summaryOf(digits ?? []).fewest).toBeGreaterThanOrEqual(13);
+    },
+    WHOLE_GRID_MS,
+  );
 
   it('agree with an independent implementation at its own accuracy', () => {
     // jstat 1.9: tails by continued fraction to about 3e-7, quantiles to 7 to 10 digits.

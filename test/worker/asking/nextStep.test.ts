@@ -280,9 +280,7 @@ describe('one question put again', () => {
 
   it('is not put where there is but one answer', () => {
     const { request } = goThrough(about(firings));
-    expect(
-      onlyStep(about(firings, { request: { ...request, pair: 'firing', per: 'none' } }), 'variance'),
-    ).toBeNull();
+    expect(onlyStep(about(firings, { request: { ...request, per: 'none' } }), 'measure')).toBeNull();
   });
 });
 
