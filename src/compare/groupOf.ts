@@ -1,4 +1,5 @@
 import type { Group, Sample, Unit } from '../core/model/groups';
+import { Refusal } from '../core/model/problem';
 
 /** What became of the values of a group that are not in its sample. */
 export interface Uncounted {
@@ -13,7 +14,14 @@ export interface Readings {
   readonly unitOf: Int32Array;
 }
 
-/** A group with its mean and SD; the SD of one value is NaN. */
+/** Sums of squares outside of this lose digits, or all, when variances are squared for degrees of freedom. */
+const LEAST_SQUARES = 1e-140;
+const MOST_SQUARES = 1e140;
+
+/**
+ * A group with its mean and SD; the SD of one value is NaN. Throws Refusal number-unusable for values so large or so small
+ * that their spread cannot be computed with.
+ */
 export function groupOf(
   label: string,
   sample: Sample,
@@ -21,6 +29,7 @@ export function groupOf(
   readings?: Readings,
 ): Group {
   const { mean, ss } = sample.moments();
+  if (sample.n > 1 && !isUsable(ss, sample)) throw new Refusal('number-unusable', { label });
   return {
     label,
     n: sample.n,
@@ -34,4 +43,11 @@ export function groupOf(
     readingSample: readings?.sample ?? null,
     unitOf: readings?.unitOf ?? null,
   };
+}
+
+function isUsable(ss: number, sample: Sample): boolean {
+  if (ss > LEAST_SQUARES && ss < MOST_SQUARES) return true;
+  if (ss !== 0) return false;
+  const values = sample.sorted();
+  return values[0] === values.at(-1);
 }

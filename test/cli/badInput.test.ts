@@ -50,6 +50,8 @@ describe('a file that cannot be compared gets a problem that says where and what
       'values-too-few',
       ['North', '1'],
     ],
+    ['values too large to compute with', good.replace(/(\d\.\d)/g, '$1e300'), 'number-unusable', ['North']],
+    ['values too small to compute with', good.replace(/(\d\.\d)/g, '$1e-300'), 'number-unusable', ['North']],
     ['all values of all groups equal', good.replace(/\d\.\d/g, '5'), 'values-all-equal', ['5']],
   ];
   it.each(cases)('%s', async (_, text, code, words) => {

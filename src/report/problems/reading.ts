@@ -86,8 +86,11 @@ export const readingProblems = {
   'number-unusable': ({ t, text }) => ({
     message:
       text('text') === null
-        ? t('A number cannot be used: it is not finite, or larger than can be computed with')
+        ? t(
+            'The numbers of {0} cannot be used: they are not finite, or too large or too small to compute with',
+            text('label') ?? t('a group'),
+          )
         : t('{0} cannot be used as a number', text('text') ?? ''),
-    fix: t('Correct the number, or leave its row out with a reason.'),
+    fix: t('Correct the number, give the column in other units, or leave the row out with a reason.'),
   }),
 } as const satisfies Record<string, SayProblem>;
