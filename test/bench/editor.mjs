@@ -16,17 +16,14 @@ const table = rows =>
  * Answers every question with Enter; gives the milliseconds from the last Enter to the headline in the panel, and how
  * many of them the editor took to load the page of a new panel, which no extension can hurry.
  */
-async function answerMs({ page, panel, run }) {
+async function answerMs({ page, panel, run, title, leaveQuestion }) {
   await run('Weighbeam: Compare groups…');
-  const title = page.locator('.quick-input-widget:visible .quick-input-title');
   for (;;) {
     await title.filter({ hasText: /\(\d+\/\d+\)/ }).waitFor();
     const said = await title.innerText();
     const [, now, of] = /\((\d+)\/(\d+)\)/.exec(said);
     if (now === of) break;
-    await page.keyboard.press('Enter');
-    const same = title.filter({ hasText: said });
-    while (await same.isVisible()) await page.waitForTimeout(20);
+    await leaveQuestion();
   }
   const started = performance.now();
   await page.keyboard.press('Enter');

@@ -1,11 +1,9 @@
-import { createHash } from 'node:crypto';
 import { readFileSync } from 'node:fs';
 import path from 'node:path';
 import { render } from 'preact-render-to-string';
 import { answer } from '../../src/compare/answer';
 import type { Request } from '../../src/compare/request';
 import { Refusal } from '../../src/core/model/problem';
-import type { Provenance } from '../../src/core/model/settings';
 import type { Show } from '../../src/protocol/toPanel';
 import { bytesSource } from '../../src/readers/byteSource';
 import { problemWords } from '../../src/report/problem';
@@ -14,23 +12,9 @@ import { blockFrom } from '../../src/settings/block';
 import { printBlock } from '../../src/settings/printBlock';
 import { Page } from '../../src/webview/page';
 import { english as t } from '../report/fixtures/english';
+import { platform, provenance, STAMP } from '../settings/recording';
 
 const demo = path.join(process.env['WEIGHBEAM_ROOT'] ?? '.', 'media', 'demo');
-const createHasher = () => {
-  const hash = createHash('sha256');
-  return { update: (bytes: Uint8Array | string) => void hash.update(bytes), hex: () => hash.digest('hex') };
-};
-const provenance: Provenance = {
-  questionInWords: '',
-  sampling: '3 tiles a firing, places by lot',
-  analyst: 'R. Kolb',
-  reasons: {},
-  changed: [],
-  looks: 1,
-  plan: null,
-  replaces: null,
-};
-
 /** What a panel shows of a request on a file of the demo, or on this text. */
 async function shown(file: string, asked: Partial<Request>, text?: string): Promise<Show> {
   const bytes = text === undefined ? readFileSync(path.join(demo, file)) : new TextEncoder().encode(text);
@@ -46,13 +30,11 @@ async function shown(file: string, asked: Partial<Request>, text?: string): Prom
     words: { problem: 'Why there is no number', showCell: 'Show', ready: 'Computed' },
   } as const;
   try {
-    const platform = { tick: () => undefined, createHasher };
     const answered = await answer([bytesSource(file, bytes)], request, platform);
     const { comparison, table, files } = answered;
-    const stamp = { version: '0.1.0', written: '2031-05-02T09:31:00+02:00', createHasher };
-    const blockText = comparison.open.length > 0 ? null : printBlock(blockFrom(answered, provenance, stamp));
-    const view = viewOf(comparison, { t, table, files, version: '0.1.0', provenance, blockText });
     const isOpen = comparison.open.length > 0;
+    const blockText = isOpen ? null : printBlock(blockFrom(answered, provenance, STAMP));
+    const view = viewOf(comparison, { t, table, files, version: STAMP.version, provenance, blockText });
     return {
       ...page,
       view,

@@ -5,6 +5,12 @@ import { closeAll, compare, panels, read, until, weighbeam, write } from './edit
 
 const request = { measured: ['density (g/cm3)'], label: 'kiln', per: 'none' };
 
+/** Invented, and enough that the worker can be ended under it. */
+const many = `kiln,density (g/cm3)\n${Array.from(
+  { length: 400_000 },
+  (_, index) => `${index % 2 ? 'east' : 'west'},${(index * 7919) % 1009}\n`,
+).join('')}`;
+
 suite('the panel', () => {
   teardown(closeAll);
 
@@ -71,11 +77,7 @@ suite('the panel', () => {
 
   test('starts a lost calculation again when the worker dies under it, and says so', async function () {
     this.timeout(60_000);
-    const rows = Array.from(
-      { length: 400_000 },
-      (_, index) => `${index % 2 ? 'east' : 'west'},${(index * 7919) % 1009}\n`,
-    );
-    const uri = await write('lost.csv', `kiln,density (g/cm3)\n${rows.join('')}`);
+    const uri = await write('lost.csv', many);
     const api = await weighbeam();
     const running = compare(uri, request);
     await new Promise(resolve => setTimeout(resolve, 150));
@@ -88,11 +90,7 @@ suite('the panel', () => {
 
   test('says so when the worker dies again and again, instead of computing for ever', async function () {
     this.timeout(60_000);
-    const rows = Array.from(
-      { length: 400_000 },
-      (_, index) => `${index % 2 ? 'east' : 'west'},${(index * 7919) % 1013}\n`,
-    );
-    const uri = await write('dying.csv', `kiln,density (g/cm3)\n${rows.join('')}`);
+    const uri = await write('dying.csv', many);
     const api = await weighbeam();
     const killing = setInterval(() => api.endWorker(), 150);
     try {

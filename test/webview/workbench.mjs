@@ -34,11 +34,21 @@ function gestures(page) {
   const panel = page.frameLocator('iframe.webview.ready').frameLocator('#active-frame');
   const input = page.locator('.quick-input-widget:visible input');
   const rows = page.locator('.quick-input-widget:visible .monaco-list-row');
+  const title = page.locator('.quick-input-widget:visible .quick-input-title');
   return {
     /** Text box of the quick pick that is open. */
     input,
     /** Items of the quick pick that is open. */
     rows,
+    /** What stands over the question that is open. */
+    title,
+
+    /** Answers the question that is open; done once it is another one, or none. */
+    async leaveQuestion(answer = () => page.keyboard.press('Enter')) {
+      const same = title.filter({ hasText: await title.innerText() });
+      await answer();
+      await same.waitFor({ state: 'hidden' });
+    },
     /** The page that the extension shows in its panel. */
     panel,
 

@@ -1,12 +1,5 @@
 import type { Ticker } from '../model/problem';
-
-/** Of all ways of allotting the values to the two groups: how many there are, and how many give a statistic at least as high, low or far as the one met. */
-export interface AllottedStatistics {
-  readonly ways: number;
-  readonly atLeast: number;
-  readonly atMost: number;
-  readonly asFar: number;
-}
+import type { Ways } from './ways';
 
 const TICK = 1 << 12;
 /** Doubles closer than this, relative to their size, are told apart by whole numbers. */
@@ -19,11 +12,7 @@ const LOST = 1e-6;
  * against `reference`. The values are whole numbers; ties are decided on whole numbers too, never on rounded statistics.
  * Both groups hold two values or more, and those met are not all equal within both groups.
  */
-export function allottedStatistics(
-  test: Float64Array,
-  reference: Float64Array,
-  tick: Ticker,
-): AllottedStatistics {
+export function allottedStatistics(test: Float64Array, reference: Float64Array, tick: Ticker): Ways {
   const values = centred([...test, ...reference]);
   const [n, m] = [test.length, reference.length];
   const whole = new Whole(values, n);
@@ -86,6 +75,8 @@ class Whole {
   private readonly sum: number;
   private readonly squares: number;
   private readonly integers: readonly bigint[];
+  private readonly exactSum: bigint;
+  private readonly exactSquares: bigint;
 
   constructor(
     private readonly values: readonly number[],
@@ -95,6 +86,8 @@ class Whole {
     this.sum = values.reduce((total, value) => total + value, 0);
     this.squares = values.reduce((total, value) => total + value * value, 0);
     this.integers = values.map(BigInt);
+    this.exactSum = this.integers.reduce((total, value) => total + value, 0n);
+    this.exactSquares = this.integers.reduce((total, value) => total + value * value, 0n);
   }
 
   /** t in doubles; NaN where the groups scatter too little for doubles. */
@@ -116,22 +109,18 @@ class Whole {
 
   exact(chosen: Int32Array): Fraction {
     const [n, m] = [BigInt(this.n), BigInt(this.m)];
-    let [sum, squares, all, allSquares] = [0n, 0n, 0n, 0n];
-    for (const value of this.integers) {
-      all += value;
-      allSquares += value * value;
-    }
+    let [sum, squares] = [0n, 0n];
     for (const index of chosen) {
       const value = this.integers[index] ?? 0n;
       sum += value;
       squares += value * value;
     }
-    const other = all - sum;
+    const other = this.exactSum - sum;
     return {
       over: m * sum - n * other,
       under:
         (n * squares - sum * sum) * m * m * (m - 1n) +
-        (m * (allSquares - squares) - other * other) * n * n * (n - 1n),
+        (m * (this.exactSquares - squares) - other * other) * n * n * (n - 1n),
     };
   }
 }

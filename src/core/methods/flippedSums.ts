@@ -1,12 +1,5 @@
 import type { Ticker } from '../model/problem';
-
-/** Of all ways of giving each value a sign: how many there are, and how many sums lie at least as high, low or far as the one met. */
-export interface FlippedSums {
-  readonly ways: number;
-  readonly atLeast: number;
-  readonly atMost: number;
-  readonly asFar: number;
-}
+import type { Ways } from './ways';
 
 const TICK = 1 << 16;
 
@@ -15,7 +8,7 @@ const TICK = 1 << 16;
  * 2⁵³, so every sum is exact. Each step changes one sign (Gray code), so 2ⁿ steps are all it takes; n at most 30.
  * Source of the order: Knuth 2011, The Art of Computer Programming 4A, 7.2.1.1.
  */
-export function flippedSums(values: Float64Array, tick: Ticker): FlippedSums {
+export function flippedSums(values: Float64Array, tick: Ticker): Ways {
   const n = values.length;
   const ways = 2 ** n;
   const met = values.reduce((sum, value) => sum + value, 0);

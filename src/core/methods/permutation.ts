@@ -4,9 +4,9 @@ import type { Reason } from '../model/say';
 import { meanDifference } from '../numeric/meanDifference';
 import { wholeOffsets } from '../numeric/wholeOffsets';
 import { allottedStatistics } from './allottedStatistics';
-import { alphaOf } from './confidence';
 import { separatePrecision } from './precision';
-import { commonWhy, spreadMissing } from './reasons';
+import { spreadMissing } from './reasons';
+import { cannotReach, judgeWays, waysQuestions, waysWhy } from './ways';
 
 type Two = Designs['two'];
 
@@ -18,7 +18,7 @@ export const permutation = method({
   version: 1,
   design: 'two',
   measure: 'mean',
-  questions: ['differs', 'higher', 'lower'],
+  questions: waysQuestions,
   statistic: 't',
   needs: 'values',
   counted: true,
@@ -30,30 +30,19 @@ export const permutation = method({
   ],
   work: n => n * MOST_WAYS,
   applies: missing,
-  doubts: ({ test, reference }, { question, confidence }) => {
+  doubts: ({ test, reference }, ask) => {
     const ways = waysOf(test.n, reference.n);
-    const least = (question === 'differs' && test.n === reference.n ? 2 : 1) / ways;
-    return least < alphaOf(confidence) ? null : { code: 'cannot-reach', facts: { ways, least } };
+    // Groups of one size can change places: each statistic is then met from both sides.
+    const sides = ask.question === 'differs' && test.n === reference.n ? 2 : 1;
+    return cannotReach(sides / ways, ways, ask);
   },
-  run: (data, { question, against, confidence }, tick) => {
-    const [test, reference] = wholeGroups(data, against) ?? [new Float64Array(0), new Float64Array(0)];
-    const { atLeast, atMost, asFar, ways } = allottedStatistics(test, reference, tick);
+  run: (data, ask, tick) => {
+    const whole = wholeGroups(data, ask.against);
+    if (whole === null) throw new RangeError('the values are no whole numbers of one step');
     const estimate = meanDifference(data.test, data.reference);
     const { se } = separatePrecision(data.test, data.reference);
-    const p = asFar / ways;
-    const common = {
-      estimate,
-      se,
-      statistic: (estimate - against) / se,
-      df: null,
-      lower: null,
-      upper: null,
-      confidence,
-      extra: { ways },
-    };
-    if (question === 'differs') return { ...common, p };
-    const twoSided = { p, lower: null, upper: null };
-    return { ...common, twoSided, p: (question === 'higher' ? atLeast : atMost) / ways };
+    const met = { estimate, se, statistic: (estimate - ask.against) / se };
+    return judgeWays(met, allottedStatistics(...whole, tick), ask);
   },
   title: t => t('permutation'),
   assumes: t => t('chance alone allotted the units to the groups'),
@@ -67,7 +56,6 @@ export const permutation = method({
       MOST_WAYS,
     ),
   why: (reason, t) => {
-    const { ways, least } = reason.facts;
     switch (reason.code) {
       case 'no-values':
         return t('only n, mean and SD are known, not the values');
@@ -77,12 +65,8 @@ export const permutation = method({
           Number(reason.facts['n']),
           Number(reason.facts['m']),
         );
-      case 'too-many-digits':
-        return t('the values have too many digits for exact sums');
-      case 'cannot-reach':
-        return t('with {0} ways of allotting no p below {1} can come of it', Number(ways), Number(least));
       default:
-        return commonWhy(reason, t);
+        return waysWhy(reason, t);
     }
   },
 });

@@ -2,9 +2,8 @@ import type { Designs } from '../model/groups';
 import { method, type Ask } from '../model/methods';
 import type { Reason } from '../model/say';
 import { wholeOffsets } from '../numeric/wholeOffsets';
-import { alphaOf } from './confidence';
 import { flippedSums } from './flippedSums';
-import { commonWhy } from './reasons';
+import { cannotReach, judgeWays, waysQuestions, waysWhy } from './ways';
 
 type Pairs = Designs['pairs'];
 
@@ -17,7 +16,7 @@ export const signFlip = method({
   version: 1,
   design: 'pairs',
   measure: 'mean',
-  questions: ['differs', 'higher', 'lower'],
+  questions: waysQuestions,
   statistic: 'sum',
   needs: 'values',
   counted: true,
@@ -28,29 +27,16 @@ export const signFlip = method({
   ],
   work: n => (n > MOST_PAIRS ? n : 2 ** n),
   applies: tooFewOrMany,
-  doubts: (data, ask) => {
-    const least = leastP(data, ask);
-    return least < alphaOf(ask.confidence)
-      ? null
-      : { code: 'cannot-reach', facts: { n: data.differences.n, least } };
+  doubts: ({ differences }, ask) => {
+    const ways = 2 ** differences.n;
+    return cannotReach((ask.question === 'differs' ? 2 : 1) / ways, ways, ask);
   },
-  run: ({ differences }, { question, against, confidence }, tick) => {
-    const whole = wholeOffsets(differences.numbers, against) ?? new Float64Array(0);
-    const { atLeast, atMost, asFar, ways } = flippedSums(whole, tick);
-    const twoSided = { p: asFar / ways, lower: null, upper: null };
+  run: ({ differences }, ask, tick) => {
+    const whole = wholeOffsets(differences.numbers, ask.against);
+    if (whole === null) throw new RangeError('the differences are no whole numbers of one step');
     const { mean } = differences.moments();
-    const common = {
-      estimate: mean,
-      se: null,
-      statistic: (mean - against) * differences.n,
-      df: null,
-      lower: null,
-      upper: null,
-      confidence,
-      extra: { ways },
-    };
-    if (question === 'differs') return { ...common, p: twoSided.p };
-    return { ...common, twoSided, p: (question === 'higher' ? atLeast : atMost) / ways };
+    const met = { estimate: mean, se: null, statistic: (mean - ask.against) * differences.n };
+    return judgeWays(met, flippedSums(whole, tick), ask);
   },
   title: t => t('sign flips'),
   assumes: t => t('within each pair it was left to chance which value came under which condition'),
@@ -63,18 +49,14 @@ export const signFlip = method({
       'Fewer than 6 pairs: no p below 0.05 can come of them. More than 20: there are too many ways to go through them all.',
     ),
   why: (reason, t) => {
-    const { n, least } = reason.facts;
+    const n = Number(reason.facts['n']);
     switch (reason.code) {
       case 'one-pair':
-        return t('{0} complete pair: one difference has no spread', Number(n));
+        return t('{0} complete pair: one difference has no spread', n);
       case 'too-many-ways':
-        return t('{0} pairs: there are too many ways of exchanging them to go through all', Number(n));
-      case 'too-many-digits':
-        return t('the values have too many digits for exact sums');
-      case 'cannot-reach':
-        return t('with {0} pairs no p below {1} can come of it', Number(n), Number(least));
+        return t('{0} pairs: there are too many ways of exchanging them to go through all', n);
       default:
-        return commonWhy(reason, t);
+        return waysWhy(reason, t);
     }
   },
 });
@@ -85,7 +67,3 @@ function tooFewOrMany({ differences }: Pairs, { against }: Ask): Reason | null {
   if (n > MOST_PAIRS) return { code: 'too-many-ways', facts: { n } };
   return wholeOffsets(differences.numbers, against) === null ? { code: 'too-many-digits', facts: {} } : null;
 }
-
-/** The smallest p that the number of pairs allows. */
-const leastP = ({ differences }: Pairs, { question }: Ask): number =>
-  (question === 'differs' ? 2 : 1) / 2 ** differences.n;

@@ -10,7 +10,6 @@ export const fLowerTail = (f: number, df1: number, df2: number): number => tails
 
 /** f with P(F ≥ f) = p, for p in (0, 1). */
 export function fUpperQuantile(p: number, df1: number, df2: number): number {
-  if (!(df1 > 0 && df2 > 0)) return NaN;
   if (!(p > 0 && p < 1)) return p === 0 ? Infinity : p === 1 ? 0 : NaN;
   const start = fStart(p, df1, df2);
   const density = (f: number): number => fDensity(f, df1, df2);

@@ -13,9 +13,10 @@ export interface Tails {
 /**
  * Regularised incomplete beta function I_x(a, b) and its complement, a, b > 0. x and y = 1 − x are given separately so
  * that neither loses digits; so is λ = a·y − b·x where the caller knows it better than the difference gives it. Source: Didonato & Morris 1992, ACM TOMS 18:360 (algorithm 708, continued fraction BFRAC),
- * with the prefactor in the saddle-point form of Loader 2000.
+ * with the prefactor in the saddle-point form of Loader 2000. NaN where an argument is.
  */
 export function incompleteBeta(x: number, y: number, a: number, b: number, lambda = a * y - b * x): Tails {
+  if ([x, y, a, b, lambda].some(Number.isNaN)) return { lower: NaN, upper: NaN };
   if (!(x > 0)) return { lower: 0, upper: 1 };
   if (!(y > 0)) return { lower: 1, upper: 0 };
   if (lambda >= 0) {

@@ -5,7 +5,7 @@ const FARTHEST = 20;
 /**
  * The x > 0 at which a decreasing upper tail equals p ≤ ½: Newton steps on ln x for the log of the tail, kept inside a
  * bracket that every evaluation tightens; where a step leaves it, the bracket is halved on the log scale. A start good
- * to 8 digits needs one or two steps; any positive start converges.
+ * to 8 digits needs one or two steps; any positive start converges. NaN where the tail is.
  */
 export function rootOfLogTail(
   start: number,
@@ -18,6 +18,7 @@ export function rootOfLogTail(
   let x = start > 0 && start < Infinity ? start : 1;
   for (let step = 0; step < MOST_STEPS; step += 1) {
     const tail = upperTail(x);
+    if (Number.isNaN(tail)) return NaN;
     if (tail === p) return x;
     if (tail > p) low = x;
     else high = x;

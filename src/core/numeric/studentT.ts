@@ -32,7 +32,6 @@ function tDensity(t: number, df: number): number {
 /** t with P(T ≥ t) = p, for p in (0, 1) and df > 0; ±∞ at 0 and 1. */
 export function tUpperQuantile(p: number, df: number): number {
   if (df === Infinity) return normalUpperQuantile(p);
-  if (!(df > 0)) return NaN;
   if (!(p > 0 && p < 1)) return p === 0 ? Infinity : p === 1 ? -Infinity : NaN;
   if (p === 0.5) return 0;
   if (p > 0.5) return -tUpperQuantile(1 - p, df);

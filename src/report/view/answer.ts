@@ -49,7 +49,7 @@ export function statisticOf({ chosen }: Comparison, t: Say): string | null {
   const name = statisticName(chosen.id, t);
   const value = printThree(result.statistic);
   const ways = result.extra?.['ways'];
-  if (typeof ways === 'number') return t('{0} {1} among {2} ways of exchanging', name, value, ways);
+  if (typeof ways === 'number') return t('{0} {1} among {2} ways', name, value, ways);
   if (result.df === null) return t('{0} {1} on the normal curve', name, value);
   if (typeof result.df === 'number')
     return t('{0} {1} on {2} degrees of freedom', name, value, printDf(result.df));

@@ -52,7 +52,7 @@ const OWN_REASONS: Readonly<Record<string, readonly Reason[]>> = {
     { code: 'one-pair', facts: { n: 1 } },
     { code: 'too-many-ways', facts: { n: 21 } },
     { code: 'too-many-digits', facts: {} },
-    { code: 'cannot-reach', facts: { n: 5, least: 0.0625 } },
+    { code: 'cannot-reach', facts: { ways: 32, least: 0.0625 } },
   ],
 };
 
