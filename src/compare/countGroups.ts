@@ -31,7 +31,7 @@ export function countGroups(table: Table, selection: Selection, settings: Settin
         units: null,
       };
     }
-    const units = [...agreedUnits(table, selection, rows, isSuccess).values()];
+    const units = [...agreedUnits(table, selection, { rows, field: measured.field }, isSuccess).values()];
     const x = units.filter(unit => unit.success).length;
     return { count: { label, x, n: units.length }, readings: rows.length, units };
   });
@@ -40,7 +40,7 @@ export function countGroups(table: Table, selection: Selection, settings: Settin
 function agreedUnits(
   table: Table,
   selection: Selection,
-  rows: Int32Array,
+  { rows, field }: { readonly rows: Int32Array; readonly field: number },
   isSuccess: (row: number) => boolean,
 ): ReadonlyMap<number, Unit & { readonly success: boolean }> {
   const [ids] = selection.ids;
@@ -51,7 +51,7 @@ function agreedUnits(
     const id = ids?.levels[unit] ?? '';
     const before = units.get(unit);
     if (before !== undefined && before.success !== success) {
-      const where = { file: table.file(row), line: table.line(row), field: 0 };
+      const where = { file: table.file(row), line: table.line(row), field };
       throw new Refusal('units-disagree', { column: ids?.name ?? '', unit: id }, where);
     }
     units.set(unit, { path: [id], readings: (before?.readings ?? 0) + 1, success });

@@ -7,9 +7,12 @@ type Asked = Pick<Ask, 'confidence' | 'against' | 'margin'>;
 
 /**
  * The word for a result. A row with a p is decided by it (below 1 − confidence); a row without one by its interval. The
- * two words that say the margin is crossed need the whole interval beyond it.
+ * words that say the margin is crossed were not asked for, so they need the whole two-sided interval beyond it, in every
+ * row alike (for `equivalent` its interval of two one-sided tests). Throws RangeError for a p that is not a number: it
+ * would read as "not shown".
  */
 export function decide(question: Question, result: MethodResult, ask: Asked): Decision {
+  if (Number.isNaN(result.p)) throw new RangeError('a row was computed without a p that can be decided by');
   const shown = isShown(question, result, ask);
   switch (question) {
     case 'differs':
@@ -20,13 +23,13 @@ export function decide(question: Question, result: MethodResult, ask: Asked): De
       return shown ? 'lower' : 'not shown';
     case 'equivalent':
       if (shown) return 'within margin';
-      return isBeyond(result, ask) ? 'outside margin' : 'not shown within margin';
+      return isBelow(result, ask) || isAbove(result, ask) ? 'outside margin' : 'not shown within margin';
     case 'not-lower':
       if (shown) return 'not lower by the margin';
-      return isOpposite(result, ask) ? 'lower by at least the margin' : 'not shown';
+      return isBelow(result.twoSided, ask) ? 'lower by at least the margin' : 'not shown';
     case 'not-higher':
       if (shown) return 'not higher by the margin';
-      return isOpposite(result, ask) ? 'higher by at least the margin' : 'not shown';
+      return isAbove(result.twoSided, ask) ? 'higher by at least the margin' : 'not shown';
   }
 }
 
@@ -52,16 +55,12 @@ function isShown(question: Question, { p, lower, upper }: MethodResult, ask: Ask
   }
 }
 
-/** The whole interval of `equivalent` lies outside the margin. */
-function isBeyond({ lower, upper }: MethodResult, { margin }: Asked): boolean {
-  if (margin === null || lower === null || upper === null) return false;
-  return upper <= margin[0] || lower >= margin[1];
-}
+type Limits = Pick<MethodResult, 'lower' | 'upper'> | undefined;
 
-/** The one-sided test the other way round, at the same level: its p is 1 − p of this one. */
-function isOpposite({ p, twoSided }: MethodResult, { confidence, margin }: Asked): boolean {
-  if (p !== null) return p > confidence;
-  const { lower = null, upper = null } = twoSided ?? {};
-  if (margin === null || lower === null || upper === null) return false;
-  return upper <= margin[0] || lower >= margin[1];
-}
+/** The whole interval lies below the margin, or ends on its lower bound. */
+const isBelow = (limits: Limits, { margin }: Asked): boolean =>
+  margin !== null && (limits?.upper ?? Infinity) <= margin[0];
+
+/** The whole interval lies above the margin, or begins on its upper bound. */
+const isAbove = (limits: Limits, { margin }: Asked): boolean =>
+  margin !== null && (limits?.lower ?? -Infinity) >= margin[1];

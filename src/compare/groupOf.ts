@@ -29,7 +29,7 @@ export function groupOf(
   readings?: Readings,
 ): Group {
   const { mean, ss } = sample.moments();
-  if (sample.n > 1 && !isUsable(ss, sample)) throw new Refusal('number-unusable', { label });
+  if (sample.n > 1 && !isUsable(ss, sample)) throw unusable(label, sample);
   return {
     label,
     n: sample.n,
@@ -50,4 +50,9 @@ function isUsable(ss: number, sample: Sample): boolean {
   if (ss !== 0) return false;
   const values = sample.sorted();
   return values[0] === values.at(-1);
+}
+
+function unusable(label: string, sample: Sample): Refusal {
+  const values = sample.sorted();
+  return new Refusal('number-unusable', { label, lowest: values[0] ?? null, highest: values.at(-1) ?? null });
 }

@@ -48,12 +48,26 @@ export function checkMargin(question: Question, margin: Request['margin'], confi
   }
 }
 
-/** Known standard deviations: both above 0, and there when the method takes them. */
-export function checkSigma(method: string, sigma: Request['sigma']): void {
+/**
+ * A difference of shares lies between −1 and 1: what it is held against, a margin and what matters have to lie inside.
+ * Refuses 'share-out-of-range', with the share that was meant where the number reads as percentage points.
+ */
+export function checkShares(measure: Measure, { against, matters, margin = [0, 0] }: Request): void {
+  if (measure !== 'proportion') return;
+  const outside = [against ?? 0, matters ?? 0, margin[1], margin[0]].find(value => Math.abs(value) >= 1);
+  if (outside === undefined) return;
+  const meant = Math.abs(outside) < 100 ? { meant: Number(`${outside}e-2`) } : {};
+  throw new Refusal('share-out-of-range', { value: outside, ...meant });
+}
+
+/** Known standard deviations: both above 0, there when the method takes them, and not said where none could take them. */
+export function checkSigma({ method, measure, relation }: Chosen, sigma: Request['sigma']): void {
   if (sigma === undefined) {
     if (method === 'known-sigma-z') throw new Refusal('sigma-needed', { method });
     return;
   }
   if (!sigma.every(value => value > 0 && Number.isFinite(value)))
     throw new Refusal('sigma-not-positive', { sigma });
+  if (measure !== 'mean' || relation.kind === 'pairs')
+    throw new Refusal('method-not-for-this', { method, needs: 'two-means' });
 }

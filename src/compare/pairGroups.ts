@@ -54,7 +54,7 @@ function rowsById(table: Table, selection: Selection, group: number): ReadonlyMa
       throw new Refusal(
         'pairs-repeated',
         { ...facts, lines },
-        { file: table.file(row), line: table.line(row), field: 0 },
+        { file: table.file(row), line: table.line(row), field: selection.idFields[0] ?? 0 },
       );
     }
     found.set(id, row);

@@ -20,6 +20,8 @@ export interface Selection {
   readonly measured: readonly Measured[];
   /** Unit columns outermost first, or the pair column. */
   readonly ids: readonly LabelColumn[];
+  /** Their fields in the table. */
+  readonly idFields: readonly number[];
   /** One entry a value: table row, index into groups, and Entry code. */
   readonly rows: Int32Array;
   readonly group: Uint16Array;
@@ -74,6 +76,7 @@ export function selectRows(table: Table, settings: Settings, tick: Ticker = noTi
     groups,
     measured: groups.map(label => columnOfGroup(measuredAt, grouping.labels.indexOf(label))),
     ids,
+    idFields: roles.ids,
     rows: rows.subarray(0, count),
     group: group.subarray(0, count),
     state: state.subarray(0, count),
@@ -135,35 +138,47 @@ function leftOutRows(table: Table, settings: Settings): ReadonlySet<number> {
 const TEXTS_NAMED = 5;
 
 function refuseText(table: Table, selection: Selection): void {
-  const { first, rows } = cellsInState(table, selection, [Cell.Text]);
-  if (first === null) return;
-  const written = selection.measured.flatMap(({ column }) => ('texts' in column ? column.texts : []));
-  const texts = new Set(written.filter(({ row }) => rows.has(row)).map(({ text }) => text));
-  throw new Refusal('text-in-measured', { texts: [...texts].slice(0, TEXTS_NAMED), count: rows.size }, first);
+  const cells = cellsInState(selection, [Cell.Text]);
+  const [first] = cells;
+  if (first === undefined) return;
+  const texts = new Set<string>();
+  for (const { row, measured } of cells) {
+    if (texts.size === TEXTS_NAMED) break;
+    const written = 'texts' in measured.column ? measured.column.texts : [];
+    texts.add(written.find(own => own.row === row)?.text ?? '');
+  }
+  throw new Refusal('text-in-measured', { texts: [...texts], count: cells.length }, placeOf(table, first));
 }
 
 function refuseCensored(table: Table, selection: Selection): void {
-  const { first, rows } = cellsInState(table, selection, [Cell.Below, Cell.Above]);
-  if (first !== null) throw new Refusal('censored-unanswered', { count: rows.size }, first);
+  const cells = cellsInState(selection, [Cell.Below, Cell.Above]);
+  const [first] = cells;
+  if (first !== undefined)
+    throw new Refusal('censored-unanswered', { count: cells.length }, placeOf(table, first));
 }
 
-/** The used rows whose cell is in one of the given states, and the place of the first. */
-function cellsInState(
-  table: Table,
-  selection: Selection,
-  states: readonly number[],
-): { readonly first: CellRef | null; readonly rows: ReadonlySet<number> } {
-  const found = new Set<number>();
-  let first: CellRef | null = null;
+interface MeasuredCell {
+  readonly row: number;
+  readonly measured: Measured;
+}
+
+const placeOf = (table: Table, { row, measured }: MeasuredCell): CellRef => ({
+  file: table.file(row),
+  line: table.line(row),
+  field: measured.field,
+});
+
+/** The used cells that are in one of the given states. */
+function cellsInState(selection: Selection, states: readonly number[]): readonly MeasuredCell[] {
+  const found: MeasuredCell[] = [];
   if (selection.measured.every(measured => measured.kind === 'outcomes' || measured.column.state === null)) {
-    return { first, rows: found };
+    return found;
   }
   selection.rows.forEach((row, at) => {
     const measured = selection.measured[selection.group[at] ?? 0];
     if (selection.state[at] !== Entry.Used || measured === undefined) return;
     if (!states.includes(cellState(measured, row))) return;
-    first ??= { file: table.file(row), line: table.line(row), field: measured.field };
-    found.add(row);
+    found.push({ row, measured });
   });
-  return { first, rows: found };
+  return found;
 }

@@ -78,7 +78,7 @@ export function reduce(session: Session, action: Action): Session {
     case 'merge labels':
       return advance(
         session,
-        { ...request, same: [...(request.same ?? []), [action.from, action.to]] },
+        patched(request, { same: [...(request.same ?? []), [action.from, action.to]] }),
         action.when,
       );
     case 'reason':

@@ -7,7 +7,7 @@ import { confidenceAsked } from './confidenceAsked';
 import { labelCounts, type LabelCount } from './labelCounts';
 import { layoutAsked, relationAsked } from './layoutAsked';
 import { measureAsked } from './measureAsked';
-import { checkMargin, checkMethod, checkSigma } from './methodChecks';
+import { checkMargin, checkMethod, checkShares, checkSigma } from './methodChecks';
 import type { Request } from './request';
 import { sidesOf } from './sides';
 import { plainSuccess } from './successAsked';
@@ -39,10 +39,12 @@ export function settle(
   const question = request.question ?? 'differs';
   const measure = measureAsked(request, fields, list);
   const { method, curve } = methodAsked(request, measure);
-  checkMethod({ method, measure, question, relation, layout }, list);
+  const chosen = { method, measure, question, relation, layout };
+  checkMethod(chosen, list);
   checkMargin(question, request.margin, confidence);
-  checkSigma(method, request.sigma);
+  checkSigma(chosen, request.sigma);
   checkNumbers(request);
+  checkShares(measure, request);
   const grouped = {
     files: request.files,
     layout,

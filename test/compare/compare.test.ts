@@ -296,6 +296,7 @@ describe('pairs', () => {
     expect(repeated).toMatchObject({
       code: 'pairs-repeated',
       facts: { id: 'mo', label: 'after', lines: [2, 10] },
+      where: { line: 10, field: 2 },
     });
     expect(
       refusal(() => ask('g,x,d\na,1,p\na,2,q\nb,1,r\nb,2,s', { measured: ['x'], label: 'g', pair: 'd' }))
@@ -393,6 +394,17 @@ describe('what cannot be computed', () => {
       code: 'text-in-measured',
       facts: { texts: ['soft', 'n. d.'], count: 2 },
       where: { file: 0, line: 4, field: 1 },
+    });
+  });
+
+  it('counts text by the cell where a row has one for each group, and names what stands at the place first', () => {
+    const found = refusal(() =>
+      ask('after,before\n1,gone\nsoft,lost\n3,4\n5,6', { columns: ['after', 'before'] }),
+    );
+    expect(found).toMatchObject({
+      code: 'text-in-measured',
+      facts: { texts: ['gone', 'soft', 'lost'], count: 3 },
+      where: { line: 2, field: 1 },
     });
   });
 
@@ -580,10 +592,29 @@ describe('shares', () => {
     expect(refusal(() => ask(mixed, { ...asked, per: ['firing'] }))).toMatchObject({
       code: 'units-disagree',
       facts: { column: 'firing', unit: '4' },
-      where: { line: 7 },
+      where: { line: 7, field: 1 },
     });
     const means = ask(mixed, { ...asked, measure: 'mean', success: '1', per: ['firing'] });
     expect(means.chosen.result?.estimate).toBe(0);
+  });
+
+  it('are decided at one level by a score and by an interval: not lower by 3 points, 60 of 100 against 75', () => {
+    // Both two-sided intervals end at −2.0 points, past the margin, though the one-sided p of the score is 0.965.
+    const found = ask(null, {
+      files: [],
+      typed: [
+        { label: 'new', x: 60, n: 100 },
+        { label: 'old', x: 75, n: 100 },
+      ],
+      question: 'not-lower',
+      margin: [-0.03, 0.03],
+    });
+    expect(found.whatIf.rows.map(({ id, decision }) => [id, decision])).toEqual([
+      ['proportion-z', null],
+      ['newcombe', 'not shown'],
+      ['miettinen-nurminen', 'not shown'],
+    ]);
+    expect(found.whatIf.depends).toBe('no');
   });
 
   it('of pairs are refused: no method here is right for them', () => {

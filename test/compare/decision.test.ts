@@ -32,10 +32,13 @@ describe('the word for a result', () => {
     ['equivalent', { p: 0.999, lower: -6, upper: -2 }, 'outside margin'],
     ['not-lower', { p: 0.01 }, 'not lower by the margin'],
     ['not-lower', { p: 0.3 }, 'not shown'],
-    ['not-lower', { p: 0.96 }, 'lower by at least the margin'],
+    ['not-lower', { p: 0.99, twoSided: { p: 0.9, lower: -8, upper: -2.5 } }, 'lower by at least the margin'],
+    ['not-lower', { p: 0.96, twoSided: { p: 0.9, lower: -8, upper: -1.9 } }, 'not shown'],
+    ['not-lower', { p: 0.01, twoSided: { p: 0.01, lower: 3.5, upper: 8 } }, 'not lower by the margin'],
     ['not-higher', { p: 0.01 }, 'not higher by the margin'],
     ['not-higher', { p: 0.3 }, 'not shown'],
-    ['not-higher', { p: 0.96 }, 'higher by at least the margin'],
+    ['not-higher', { p: 0.99, twoSided: { p: 0.9, lower: 3.5, upper: 8 } }, 'higher by at least the margin'],
+    ['not-higher', { p: 0.96, twoSided: { p: 0.9, lower: 2.9, upper: 8 } }, 'not shown'],
   ])('%s with %j: %s', (question, part, word) => {
     expect(decide(question, result(part), asked)).toBe(word);
   });
@@ -58,6 +61,7 @@ describe('the word for a result', () => {
       'lower by at least the margin',
     ],
     ['not-lower', { lower: -7, twoSided: { p: null, lower: -8, upper: -1 } }, 'not shown'],
+    ['not-lower', { lower: -2, twoSided: { p: null, lower: 4, upper: 8 } }, 'not shown'],
     [
       'not-higher',
       { upper: 9, twoSided: { p: null, lower: 3.5, upper: 10 } },
@@ -66,6 +70,10 @@ describe('the word for a result', () => {
   ])('%s without a p, from the interval %j: %s', (question, part, word) => {
     expect(decide(question, result(part), asked)).toBe(word);
   });
+});
+
+it('a p that is not a number is never taken for "not shown"', () => {
+  expect(() => decide('differs', result({ p: Number.NaN }), asked)).toThrow(RangeError);
 });
 
 describe('whether the decision depends on the choice', () => {

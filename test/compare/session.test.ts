@@ -105,6 +105,18 @@ describe('a change', () => {
     [{ per: ['plot'], variance: 'pooled' }, { pair: 'plot' }, { pair: 'plot' }],
     [{ pair: 'plot' }, { per: ['plot'] }, { per: ['plot'] }],
     [{ per: ['plot'] }, { pair: 'none' }, { per: ['plot'], pair: 'none' }],
+    [{ pair: 'plot', method: 'paired-t' }, { pair: 'none' }, { pair: 'none' }],
+    [{ pair: 'plot', method: 'paired-t' }, { per: 'none' }, { per: 'none' }],
+    [
+      { test: 'Slow', reference: 'b' },
+      { same: [['Slow', 'slow']] },
+      { reference: 'b', same: [['Slow', 'slow']] },
+    ],
+    [
+      { matters: 5, against: 1, margin: [-9, 9], sigma: [1, 2], variance: 'known' },
+      { measure: 'proportion' },
+      { measure: 'proportion' },
+    ],
     [{ test: 'a', reference: 'b' }, { label: 'site' }, { label: 'site' }],
     [{ test: 'a', reference: 'b' }, { label: 'g' }, { test: 'a', reference: 'b' }],
     [

@@ -94,6 +94,12 @@ describe('what is asked wrongly is refused', () => {
     [{ question: 'equivalent', margin: [-1, 1], confidence: 0.5 }, 'confidence-out-of-range'],
     [{ matters: 0 }, 'matters-invalid'],
     [{ method: 'median-test' }, 'method-unknown'],
+    [{ success: '1', margin: [-10, 10] }, 'share-out-of-range'],
+    [{ success: '1', question: 'not-lower', margin: [-1, 1] }, 'share-out-of-range'],
+    [{ success: '1', against: -1 }, 'share-out-of-range'],
+    [{ success: '1', matters: 5 }, 'share-out-of-range'],
+    [{ success: '1', sigma: [1, 1] }, 'method-not-for-this'],
+    [{ pair: 'x2', sigma: [1, 1] }, 'method-not-for-this'],
     [
       { method: 'proportion-z', success: '1', question: 'equivalent', margin: [-1, 1] },
       'question-not-for-method',
@@ -111,6 +117,14 @@ describe('what is asked wrongly is refused', () => {
   it('a confidence in percent comes with what was meant', () => {
     expect(refusal(() => settled({ confidence: 95 })).facts).toEqual({ confidence: 95, meant: 0.95 });
     expect(refusal(() => settled({ confidence: 99.9 })).facts).toEqual({ confidence: 99.9, meant: 0.999 });
+  });
+
+  it('a margin in percentage points comes with the share that was meant', () => {
+    expect(refusal(() => settled({ success: '1', margin: [-10, 10] })).facts).toEqual({
+      value: 10,
+      meant: 0.1,
+    });
+    expect(refusal(() => settled({ success: '1', matters: 250 })).facts).toEqual({ value: 250 });
   });
 
   it('pairs and units need values, not summaries', () => {

@@ -123,6 +123,16 @@ describe('a comparison', () => {
 });
 
 describe('an exported entry', () => {
+  it('prints a mean and a ratio of spreads that are small beside the other group with the digits they have', () => {
+    const typed = [
+      { label: 'tap', n: 12, mean: 4.25, sd: 0.21 },
+      { label: 'effluent', n: 12, mean: 81_000, sd: 9_600 },
+    ];
+    const text = textReport(shown(compared(null, { typed })));
+    expect(text).toMatch(/^mean +4\.25 +81000 /mu);
+    expect(text).toMatch(/^SD .* 0\.000022 times \(0\.000012 to 0\.000041\)/mu);
+  });
+
   it('ends with a settings block that can be found again', () => {
     expect(findBlocks(markdownReport(shown(firings())))[0]?.text).toBe(blockText);
     expect(htmlPage(shown(firings()))).toContain('# end of settings block');

@@ -56,6 +56,7 @@ export type ProblemCode =
   | 'margin-needed'
   | 'margin-invalid'
   | 'matters-invalid'
+  | 'share-out-of-range'
   | 'method-unknown'
   | 'method-not-for-this'
   | 'question-not-for-method'

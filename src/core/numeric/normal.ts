@@ -32,14 +32,16 @@ const FAR_DENOMINATOR = [
 ] as const;
 const INVERSE_SQRT_PI = 0.56418958354775628695;
 
-/** Density of the standard normal distribution at z. */
-export const normalDensity = (z: number): number => halfSquareExp(Math.abs(z)) / SQRT_2PI;
+/** Density of the standard normal distribution at z; 0 at ±∞. */
+export const normalDensity = (z: number): number =>
+  Math.abs(z) === Infinity ? 0 : halfSquareExp(Math.abs(z)) / SQRT_2PI;
 
 /** P(Z ≤ z). Both tails keep their relative accuracy: nothing is formed as 1 − tail. */
 export const normalLowerTail = (z: number): number => normalUpperTail(-z);
 
 /** P(Z ≥ z). Source: Cody 1969, Mathematics of Computation 23:631, with exp(−z²/2) split so that z² loses nothing. */
 export function normalUpperTail(z: number): number {
+  if (Math.abs(z) === Infinity) return z > 0 ? 0 : 1;
   const size = Math.abs(z);
   if (size <= INNER) return 0.5 - 0.5 * smallErf(z / Math.SQRT2);
   const tail = 0.5 * halfSquareExp(size) * scaledErfc(size / Math.SQRT2);

@@ -42,6 +42,17 @@ export const askingProblems = {
     message: t('The size that matters has to be a number above 0; given: {0}', number('matters') ?? '?'),
     fix: t('Give the smallest difference that matters in practice, in the units of the measured column.'),
   }),
+  'share-out-of-range': ({ t, number }) => ({
+    message: t('A difference of two shares lies between \u22121 and 1; given: {0}', number('value') ?? '?'),
+    fix:
+      number('meant') === null
+        ? t('Give a share: 0.1 stands for 10 percentage points.')
+        : t(
+            'Give a share: {0} stands for {1} percentage points.',
+            number('meant') ?? '?',
+            number('value') ?? '?',
+          ),
+  }),
   'method-unknown': ({ t, text, list }) => ({
     message: t('There is no method {0}', text('method') ?? ''),
     fix: t('The methods are: {0}.', list('methods') ?? ''),
@@ -84,6 +95,8 @@ function notForThis(
   const pair = text('pair');
   if (pair !== null && name === '')
     return t('Units ({0}) and pairs ({1}) cannot be used together', list('per') ?? '', pair);
+  if (text('needs') === 'two-means')
+    return t('Known standard deviations go with the means of two independent groups, not with {0}', name);
   if (text('needs') === 'pair') return t('{0} compares pairs, and no pair column is named', name);
   if (pair !== null) return t('{0} does not compare pairs ({1})', name, pair);
   if (text('measure') !== null) return t('{0} does not go with the measure {1}', name, text('measure') ?? '');

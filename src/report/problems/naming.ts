@@ -26,11 +26,11 @@ export const namingProblems = {
     message: t('It is not said which groups are compared'),
     fix: t('Name the test group and the reference group; the labels are: {0}.', list('labels') ?? ''),
   }),
-  'label-single-value': ({ t, text, list }) => ({
+  'label-single-value': ({ t, text, list, names }) => ({
     message: t('The label {0} occurs once: one value has no spread', text('label') ?? ''),
     fix:
-      list('labels') === null
-        ? t('Check whether it is another group misspelt, or choose another group.')
+      names('labels').length < 3
+        ? t('Check whether it is another group misspelt, or give it more values.')
         : t('Check whether it is another group misspelt, or choose among: {0}.', list('labels') ?? ''),
     flag: '--same "FROM -> TO"',
   }),

@@ -83,12 +83,14 @@ export const readingProblems = {
     ),
     flag: '--below zero, half or limit',
   }),
-  'number-unusable': ({ t, text }) => ({
+  'number-unusable': ({ t, text, number }) => ({
     message:
       text('text') === null
         ? t(
-            'The numbers of {0} cannot be used: they are not finite, or too large or too small to compute with',
+            'The spread of {0}, whose values run from {1} to {2}, cannot be computed: it is too large or too small',
             text('label') ?? t('a group'),
+            number('lowest') ?? '?',
+            number('highest') ?? '?',
           )
         : t('{0} cannot be used as a number', text('text') ?? ''),
     fix: t('Correct the number, give the column in other units, or leave the row out with a reason.'),

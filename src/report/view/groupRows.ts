@@ -1,6 +1,7 @@
 import type { Comparison } from '../../core/model/comparison';
 import type { Say } from '../../core/model/say';
 import { effectPlace, fullText, printAt, printThree } from '../numbersPrinted';
+import { significantPlace } from '../words/rounding';
 import { shareWords } from '../words/count';
 import { outcomeOf } from '../words/measuredName';
 import type { Scale } from '../words/scale';
@@ -45,7 +46,7 @@ export function groupRows(comparison: Comparison, scale: Scale, t: Say): readonl
     ...(shares
       ? [row('mean', outcomeOf(comparison) ?? t('share'), shareCell, difference)]
       : [
-          inUnit(row('mean', t('mean'), group => scale.number(group.mean), difference)),
+          inUnit(row('mean', t('mean'), group => scale.mean(group.mean, group.se), difference)),
           inUnit(
             row('sd', t('SD'), sdCell, spreadCell(comparison, t)),
             averaged ? t('SD of {0}', noun) : t('SD'),
@@ -107,7 +108,8 @@ function spreadCell({ design, chosen, groups, evidence }: Comparison, t: Say): P
   if (typeof value !== 'number' || !Number.isFinite(value)) return null;
   const interval = facts?.['interval'];
   const [lower = null, upper = null] = Array.isArray(interval) ? interval.map(Number) : [];
-  const place = effectPlace(value, lower, upper, [1]);
+  const least = Math.min(value, lower ?? value, upper ?? value);
+  const place = Math.max(effectPlace(value, lower, upper, [1]), least > 0 ? significantPlace(least, 1) : 0);
   const text = t('{0} times', printAt(value, place));
   const full = fullText(value);
   if (lower === null || upper === null) return { text, full };

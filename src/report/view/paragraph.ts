@@ -47,7 +47,7 @@ export function notebookParagraph(comparison: Comparison, context: ViewContext, 
 
 function groupWords(group: Comparison['groups'][number], label: string, scale: Scale, t: Say): string {
   if (group.count !== null) return t('{0} {1}', label, shareWords(group.count));
-  const mean = scale.number(group.mean).text;
+  const mean = scale.mean(group.mean, group.se).text;
   return Number.isFinite(group.sd)
     ? t('{0} (n = {1}, mean {2}, SD {3})', label, group.n, mean, printThree(group.sd))
     : t('{0} (n = {1}, value {2})', label, group.n, mean);

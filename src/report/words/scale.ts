@@ -4,7 +4,7 @@ import type { Say } from '../../core/model/say';
 import { boundsWords } from './boundsWords';
 import { clearOf, fullText, placeOf, printAt, withMinus } from '../numbersPrinted';
 import type { Printed } from '../view/shown';
-import { movedPoint, roundedText } from './rounding';
+import { firstDigitExponent, movedPoint, roundedText, significantPlace } from './rounding';
 
 /** How the values of one comparison are printed: one place for the difference, its limits and the means; one unit. */
 export interface Scale {
@@ -12,6 +12,8 @@ export interface Scale {
   readonly unit: string;
   /** A value or a difference without its unit. */
   readonly number: (value: number) => Printed;
+  /** The mean of a group: at the place of the difference, finer where that would leave fewer than three digits it has. */
+  readonly mean: (mean: number, se: number | null) => Printed;
   /** A value as observed, such as a median or an extreme: as written where it stands in the file. */
   readonly observed: (value: number) => Printed;
   readonly withUnit: (text: string) => string;
@@ -41,6 +43,7 @@ export function scaleOf(comparison: Comparison, t: Say): Scale {
   return {
     unit,
     number,
+    mean: (mean, se) => ({ text: printAt(mean, meanPlace(place, mean, se)), full: fullText(mean) }),
     observed: value => ({
       text: printAt(moved(value), observedPlace(comparison, place, value)),
       full: fullText(value),
@@ -86,6 +89,11 @@ function placeFor(
   const length = lower === null || upper === null ? null : (upper - lower) / LIMITS_APART;
   const se = result?.se ?? length;
   return placeOf(se === null ? null : moved(se), limits, special, decimalsOf(groups) + 1);
+}
+
+function meanPlace(place: number, mean: number, se: number | null): number {
+  if (se === null || !(se > 0) || mean === 0) return place;
+  return Math.max(place, Math.min(1 - firstDigitExponent(se), significantPlace(mean, 3)));
 }
 
 const decimalsOf = (groups: Comparison['groups']): number =>

@@ -93,6 +93,11 @@ describe('tails and quantiles', () => {
     );
   });
 
+  it('are 0 and 1 at the ends of the normal curve', () => {
+    expect([normalUpperTail(Infinity), normalUpperTail(-Infinity)]).toEqual([0, 1]);
+    expect([normalLowerTail(Infinity), normalLowerTail(-Infinity)]).toEqual([1, 0]);
+  });
+
   it('join t, F and the normal curve: t² is F on 1 and df, infinite df is normal', () => {
     fc.assert(
       fc.property(fc.double({ min: 0.001, max: 30, noNaN: true }), df, (t, n) => {
