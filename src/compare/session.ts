@@ -41,6 +41,8 @@ export type Action =
   | { readonly kind: 'take back'; readonly file: number; readonly line: number; readonly when: string }
   | { readonly kind: 'merge labels'; readonly from: string; readonly to: string; readonly when: string }
   | { readonly kind: 'reason'; readonly key: string; readonly reason: string }
+  /** The files bear other names now: so they do in everything that was asked of them, also what undo brings back. */
+  | { readonly kind: 'moved'; readonly files: readonly string[] }
   | { readonly kind: 'undo' }
   | { readonly kind: 'redo' }
   | { readonly kind: 'shown'; readonly when: string };
@@ -83,6 +85,15 @@ export function reduce(session: Session, action: Action): Session {
       );
     case 'reason':
       return { ...session, reasons: { ...session.reasons, [action.key]: action.reason } };
+    case 'moved': {
+      const renamed = (step: Step): Step => ({ ...step, request: { ...step.request, files: action.files } });
+      const { history, firstShown } = session;
+      return {
+        ...session,
+        history: history.map(renamed),
+        firstShown: firstShown === null ? null : renamed(firstShown),
+      };
+    }
     case 'undo':
       return canUndo(session) ? { ...session, at: session.at - 1 } : session;
     case 'redo':

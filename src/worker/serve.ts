@@ -41,7 +41,8 @@ export function serve(port: Port, platform: WorkerPlatform): void {
   };
 
   port.listen(message => {
-    const known = readToWorker(message);
+    const known = read(message, post);
+    if (known === null) return;
     if (known.type === 'start') {
       desk = makeDesk(platform, sayFrom(known.words), known.version);
       flags = known.flags;
@@ -49,6 +50,18 @@ export function serve(port: Port, platform: WorkerPlatform): void {
       void settle(known);
     }
   });
+}
+
+/** null for a message that cannot be understood: who sent it with a number is told so, and the worker lives on. */
+function read(message: unknown, post: (message: FromWorker) => void): ReturnType<typeof readToWorker> | null {
+  try {
+    return readToWorker(message);
+  } catch (error) {
+    const { call, revision } = message as { readonly call?: unknown; readonly revision?: unknown };
+    if (typeof call !== 'number' || typeof revision !== 'number') throw error;
+    post({ type: 'failed', call, revision, message: error instanceof Error ? error.message : String(error) });
+    return null;
+  }
 }
 
 function answer(call: WorkerCall, sitting: Sitting): Promise<AnyReply> {

@@ -43,6 +43,13 @@ describe('a session', () => {
     expect(reduce(start(request, at(0)), { kind: 'undo' }).at).toBe(0);
   });
 
+  it('keeps the names that the files have now, whatever is undone', () => {
+    const renamed = after(change({ confidence: 0.9 }, 1), shown(2), { kind: 'moved', files: ['b.csv'] });
+    expect(requestOf(renamed)).toEqual({ ...request, files: ['b.csv'], confidence: 0.9 });
+    expect(requestOf(reduce(renamed, { kind: 'undo' }))).toEqual({ ...request, files: ['b.csv'] });
+    expect(changedAfterShown(renamed)).toEqual([]);
+  });
+
   it('never changes what it was given', () => {
     const before = Object.freeze(start(Object.freeze({ ...request }), at(0)));
     reduce(before, change({ confidence: 0.9 }, 1));

@@ -57,6 +57,26 @@ const answerTo = (asked: Request, more: { files?: readonly FileInput[]; record?:
   }) as const;
 
 describe('the worker', () => {
+  it('lives on after a call it does not understand, and says so to who sent it', async () => {
+    const { ask } = makeWorker();
+    const odd = answerTo({ ...request, confidence: '0.9' as unknown as number });
+    expect((await ask(odd)).type).toBe('failed');
+    expect((await ask(answerTo(request))).type).toBe('answered');
+  });
+
+  it('computes typed numbers anew when something else is asked of them', async () => {
+    const { ask } = makeWorker();
+    const typed = [
+      { label: 'east', n: 9, mean: 840, sd: 12 },
+      { label: 'west', n: 9, mean: 820, sd: 14 },
+    ];
+    for (const confidence of [0.95, 0.99]) {
+      const asked = { ...answerTo({ files: [], wish: {}, typed, confidence }), files: [] };
+      const { numbers } = of('answered', await ask(asked));
+      expect(numbers?.['chosen']).toMatchObject({ confidence });
+    }
+  });
+
   it('surveys a file and says what a selection takes of it', async () => {
     const span = { startLine: 2, startCharacter: 3, endLine: 4, endCharacter: 0 };
     const { ask } = makeWorker();

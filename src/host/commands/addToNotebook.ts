@@ -1,4 +1,4 @@
-import { l10n, Position, Uri, ViewColumn, window, workspace, WorkspaceEdit } from 'vscode';
+import { FileSystemError, l10n, Position, Uri, ViewColumn, window, workspace, WorkspaceEdit } from 'vscode';
 import { lastPart } from '../files/root';
 import type { Host } from '../host';
 import { blockToHandOut, statedBy } from './blockToHandOut';
@@ -24,7 +24,8 @@ export const addToNotebook = (host: Host): Command => ({
       new Position(end.line, end.character),
       `${gap}${block.paragraph}\n\n${block.fenced}`,
     );
-    await workspace.applyEdit(edit);
+    if (!(await workspace.applyEdit(edit)))
+      throw new Error(l10n.t('the editor did not let {0} be changed', lastPart(notebook)));
     const editor = await window.showTextDocument(document, { viewColumn: ViewColumn.One, preview: false });
     editor.revealRange(document.lineAt(document.lineCount - 1).range);
   },
@@ -57,7 +58,8 @@ async function chooseNotebook(root: Uri): Promise<Uri | null> {
 async function existing(uri: Uri): Promise<Uri> {
   try {
     await workspace.fs.stat(uri);
-  } catch {
+  } catch (error) {
+    if (!(error instanceof FileSystemError) || error.code !== 'FileNotFound') throw error;
     await workspace.fs.writeFile(uri, new Uint8Array());
   }
   return uri;

@@ -1,5 +1,5 @@
-import { CancellationError, commands, l10n, window, type Disposable } from 'vscode';
-import { RefusedError } from '../compute/computeClient';
+import { commands, type Disposable } from 'vscode';
+import { failed } from '../failed';
 import type { Log } from '../log';
 
 /** One command of the extension: its id and what it does. */
@@ -18,22 +18,8 @@ export const register = (log: Log, list: readonly Command[]): Disposable[] =>
       try {
         return await execute(...args);
       } catch (error) {
-        if (error instanceof CancellationError) return undefined;
-        log.failed(id, error instanceof Error ? (error.stack ?? error.message) : String(error));
-        const message =
-          error instanceof RefusedError
-            ? `${error.problem.message} ${error.problem.fix}`
-            : l10n.t(
-                'Weighbeam could not do this: {0}',
-                error instanceof Error ? error.message : String(error),
-              );
-        void tell(message, log);
+        failed(id, error, log);
         return undefined;
       }
     }),
   );
-
-async function tell(message: string, log: Log): Promise<void> {
-  const showLog = l10n.t('Show log');
-  if ((await window.showErrorMessage(message, showLog)) === showLog) log.show();
-}

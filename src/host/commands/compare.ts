@@ -23,9 +23,11 @@ export const compare = (host: Host): Command => ({
     const { files } = targets;
     const root = rootOf(main);
     const base: Request = { files: files.map(uri => recordName(uri, root)), ...settingsFor(main) };
-    const request =
-      given === null ? await asked(host, targets, base) : { ...base, ...given, files: base.files };
-    await host.panels.show({ files, root }, request);
+    const { request, spans } =
+      given === null
+        ? await asked(host, targets, base)
+        : { request: { ...base, ...given, files: base.files }, spans: [] };
+    await host.panels.show({ files, root, spans }, request);
   },
 });
 
@@ -39,11 +41,15 @@ async function chosen(): Promise<Targets | null> {
 }
 
 /** What was asked; where the file cannot be read, what is known: the panel then says what is wrong with it. */
-async function asked(host: Host, { files, spans }: Targets, base: Request): Promise<Request> {
+async function asked(
+  host: Host,
+  { files, spans }: Targets,
+  base: Request,
+): Promise<{ readonly request: Request; readonly spans: Targets['spans'] }> {
   try {
-    return await askComparison(host, files, spans, base);
+    return { request: await askComparison(host, files, spans, base), spans: [] };
   } catch (error) {
-    if (error instanceof RefusedError) return base;
+    if (error instanceof RefusedError) return { request: base, spans };
     throw error;
   }
 }

@@ -31,7 +31,7 @@ export const recheckNotebook = (host: Host): Command => ({
       return [];
     }
     const document = await workspace.openTextDocument(uri);
-    const text = document.getText();
+    const [text, version] = [document.getText(), document.version];
     const { blocks } = await host.client.ask({ type: 'blocks', revision: 0, text });
     if (blocks.length === 0) {
       void window.showInformationMessage(l10n.t('No settings block stands in this text.'));
@@ -43,6 +43,15 @@ export const recheckNotebook = (host: Host): Command => ({
       l10n.t('Rechecking {0} settings blocks', blocks.length),
       options => host.client.ask({ type: 'recheck', revision: 0, text, files }, options),
     );
+    if (document.version !== version) {
+      host.diagnostics.delete(uri);
+      void window.showInformationMessage(
+        l10n.t(
+          'The text was edited while its settings blocks were rechecked. Recheck it again to have them marked.',
+        ),
+      );
+      return outcomes;
+    }
     host.diagnostics.set(
       uri,
       outcomes.flatMap(outcome => marked(outcome, document)),

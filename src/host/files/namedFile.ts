@@ -3,11 +3,11 @@ import { Refusal } from '../../core/model/problem';
 import type { NamedFile } from '../../protocol/toWorker';
 import { candidates } from '../../recheck/candidates';
 import { diskPath, followLinks } from '../platform/disk.node';
-import { openFile } from './openedFile';
+import { savedFile } from './openedFile';
 import { recordName, rootOf } from './root';
 
 /**
- * The file that a block of a notebook names: looked for from the root, then from the notebook's folder upwards. A name
+ * The file that a block of a notebook names, as it is stored: looked for from the root, then from the notebook's folder upwards. A name
  * that leads out of the root, by itself or through a link, is refused.
  */
 export async function findNamedFile(name: string, notebook: Uri): Promise<NamedFile> {
@@ -19,8 +19,7 @@ export async function findNamedFile(name: string, notebook: Uri): Promise<NamedF
     const uri = Uri.joinPath(root, place);
     if (!(await exists(uri))) continue;
     if (await leavesByLink(uri, root)) return { name, input: null, outside: true };
-    const { input } = await openFile(uri, name);
-    return { name, input, outside: false };
+    return { name, input: await savedFile(uri, name), outside: false };
   }
   return { name, input: null, outside: false };
 }

@@ -15,23 +15,34 @@ export const documentOf = (uri: Uri): TextDocument | undefined =>
   workspace.textDocuments.find(document => document.uri.toString() === uri.toString() && !document.isClosed);
 
 /**
- * A file as the worker gets it: the editor's text where that is not saved, a path where there is a disk, else its bytes.
- * Rejects with RefusedError when nothing is there.
+ * A file as the worker gets it: the editor's text where that is not saved, else as it is stored. Rejects with RefusedError
+ * when nothing is there.
  */
 export async function openFile(uri: Uri, name: string): Promise<OpenedFile> {
   const document = documentOf(uri);
-  if (document !== undefined && (document.isDirty || document.isUntitled)) {
-    const bytes = new TextEncoder().encode(document.getText());
-    return { input: { name, path: null, bytes, stamp: `text ${document.version}` }, unsaved: true };
-  }
+  if (document === undefined || !(document.isDirty || document.isUntitled))
+    return { input: await savedFile(uri, name), unsaved: false };
+  const bytes = new TextEncoder().encode(document.getText());
+  return { input: { name, path: null, bytes, stamp: await stampOf(uri, bytes) }, unsaved: true };
+}
+
+/** A file as it is stored: a path where there is a disk, else its bytes. Rejects with RefusedError. */
+export async function savedFile(uri: Uri, name: string): Promise<FileInput> {
   try {
     const { mtime, size } = await workspace.fs.stat(uri);
     const path = diskPath(uri);
-    const bytes = path === null ? await workspace.fs.readFile(uri) : null;
-    return { input: { name, path, bytes, stamp: `${uri.toString()} ${mtime} ${size}` }, unsaved: false };
+    if (path !== null) return { name, path, bytes: null, stamp: `${uri.toString()} ${mtime} ${size}` };
+    const bytes = await workspace.fs.readFile(uri);
+    return { name, path, bytes, stamp: await stampOf(uri, bytes) };
   } catch (error) {
     throw notThere(uri, error);
   }
+}
+
+/** Versions of a document begin anew when it is opened again, and a file system may not tell times: the bytes do. */
+async function stampOf(uri: Uri, bytes: Uint8Array): Promise<string> {
+  const digest = new Uint8Array(await crypto.subtle.digest('SHA-256', Uint8Array.from(bytes)));
+  return `${uri.toString()} ${Array.from(digest, byte => byte.toString(16).padStart(2, '0')).join('')}`;
 }
 
 function notThere(uri: Uri, error: unknown): RefusedError {

@@ -1,4 +1,11 @@
-import { CancellationError, CancellationTokenSource, EventEmitter, l10n, type Disposable } from 'vscode';
+import {
+  CancellationError,
+  CancellationTokenSource,
+  EventEmitter,
+  l10n,
+  type Disposable,
+  type Uri,
+} from 'vscode';
 import type { Request } from '../../compare/request';
 import { canRedo, canUndo, reduce, requestOf, type Action, type Session } from '../../compare/session';
 import type { Provenance } from '../../core/model/settings';
@@ -8,9 +15,10 @@ import type { ShownProblem } from '../../protocol/places';
 import type { Answered } from '../../protocol/fromWorker';
 import { RefusedError } from '../compute/computeClient';
 import { openFile } from '../files/openedFile';
-import { lastPart } from '../files/root';
+import { lastPart, recordName, rootOf } from '../files/root';
 import { now } from '../now';
 import type { Services } from '../services';
+import { asComputed, type FileState } from './fileState';
 import { afterLook } from './looks';
 import { keepSeen, seenBefore } from './seenBefore';
 import type { Shown } from './shown';
@@ -18,6 +26,8 @@ import type { Subject } from './subject';
 
 interface Opened {
   readonly files: readonly FileInput[];
+  /** How they are read. */
+  readonly wish: Request['wish'];
   readonly unsaved: boolean;
 }
 
@@ -89,10 +99,28 @@ export class Comparison implements Disposable {
     await this.run();
   }
 
-  /** The files lie elsewhere now; their names in the record follow. */
-  moveTo(subject: Subject, files: readonly string[], when: string): void {
-    this.subject = subject;
-    this.session = reduce(this.session, { kind: 'change', patch: { files }, when });
+  /** One of the files lies elsewhere now; its name in the record follows. */
+  moveTo(index: number, uri: Uri): void {
+    const files = this.subject.files.map((file, at) => (at === index ? uri : file));
+    const root = rootOf(files[0] ?? uri);
+    this.subject = { ...this.subject, files, root };
+    this.session = reduce(this.session, { kind: 'moved', files: files.map(file => recordName(file, root)) });
+  }
+
+  /** What became of the files since what is shown was computed: the first that is not as it was. */
+  async filesNow(): Promise<FileState> {
+    const { shown, subject, request } = this;
+    if (shown === null) return asComputed;
+    for (const [file, uri] of subject.files.entries()) {
+      try {
+        const { input, unsaved } = await openFile(uri, request.files[file] ?? '');
+        if (input.stamp !== shown.stamps[file]) return { kind: unsaved ? 'edited' : 'changed', file };
+      } catch (error) {
+        if (error instanceof RefusedError) return { kind: 'gone', file };
+        throw error;
+      }
+    }
+    return asComputed;
   }
 
   /** Computes what is asked now. A run that is overtaken by a later one shows nothing. */
@@ -121,7 +149,14 @@ export class Comparison implements Disposable {
     const opened = await Promise.all(
       this.subject.files.map((uri, index) => openFile(uri, names[index] ?? '')),
     );
-    return { files: opened.map(({ input }) => input), unsaved: opened.some(({ unsaved }) => unsaved) };
+    const unsaved = opened.some(own => own.unsaved);
+    const { wish } = this.request;
+    return { files: opened.map(({ input }) => input), wish: unsaved ? withoutEncoding(wish) : wish, unsaved };
+  }
+
+  /** What tells apart the contents of the files as they are now. */
+  async stamps(): Promise<readonly string[]> {
+    return stampsOf(await this.open());
   }
 
   dispose(): void {
@@ -141,10 +176,12 @@ export class Comparison implements Disposable {
       open: [],
       numbers: null,
     };
+    let stamps: readonly string[] = [];
     let unsaved = false;
     let restarted = false;
     try {
       const opened = await this.open();
+      stamps = stampsOf(opened);
       unsaved = opened.unsaved;
       const answered = await this.ask(opened, revision, source).catch((error: unknown) => {
         if (!(error instanceof OtherSideGone)) throw error;
@@ -152,18 +189,18 @@ export class Comparison implements Disposable {
         return this.ask(opened, revision, source);
       });
       const { view, blockText, open, numbers } = answered;
-      return { ...nothing, view, blockText, open, numbers, unsaved, restarted };
+      return { ...nothing, view, blockText, open, numbers, stamps, unsaved, restarted };
     } catch (error) {
       if (error instanceof RefusedError) {
         this.services.log.refused(error.problem.code);
-        return { ...nothing, problem: error.problem, unsaved, restarted };
+        return { ...nothing, problem: error.problem, stamps, unsaved, restarted };
       }
       if (error instanceof CancellationError) throw error;
       this.services.log.failed(
         'answer',
         error instanceof Error ? (error.stack ?? error.message) : String(error),
       );
-      return { ...nothing, problem: stoppedProblem(), unsaved, restarted };
+      return { ...nothing, problem: stoppedProblem(), stamps, unsaved, restarted };
     }
   }
 
@@ -176,7 +213,7 @@ export class Comparison implements Disposable {
           type: 'answer',
           revision,
           files: opened.files,
-          session: this.session,
+          session: readAs(this.session, opened.wish),
           provenance: this.provenance,
           written: now(),
           record: !opened.unsaved,
@@ -214,6 +251,8 @@ export class Comparison implements Disposable {
   }
 }
 
+const stampsOf = ({ files }: Opened): readonly string[] => files.map(({ stamp }) => stamp);
+
 /** What the panel says instead of computing for ever. */
 const stoppedProblem = (): ShownProblem => ({
   code: 'calculation-stopped',
@@ -221,6 +260,18 @@ const stoppedProblem = (): ShownProblem => ({
   where: null,
   fix: l10n.t('Run the comparison again; should it stop again, the log of Weighbeam says why.'),
   at: null,
+});
+
+/** Text from an editor comes as UTF-8, whatever its file is stored in: the encoding is seen anew. */
+const withoutEncoding = (wish: Request['wish']): Request['wish'] =>
+  Object.fromEntries(Object.entries(wish).filter(([key]) => key !== 'encoding'));
+
+/** A session that reads its files in this way now. */
+const readAs = (session: Session, wish: Request['wish']): Session => ({
+  ...session,
+  history: session.history.map((step, at) =>
+    at === session.at ? { ...step, request: { ...step.request, wish } } : step,
+  ),
 });
 
 /** Whether two requests say the same, in whatever order. */

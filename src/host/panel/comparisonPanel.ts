@@ -5,19 +5,21 @@ import {
   Uri,
   ViewColumn,
   window,
+  workspace,
   type Disposable,
   type WebviewPanel,
 } from 'vscode';
+import type { PanelAction } from '../../report/panel/action';
 import { readFromPanel } from '../../protocol/fromPanel';
 import type { Busy, Notice, Show, Tool } from '../../protocol/toPanel';
+import { failed } from '../failed';
 import { documentOf } from '../files/openedFile';
-import { lastPart, recordName, rootOf } from '../files/root';
+import { lastPart } from '../files/root';
 import { chooseFile } from '../selecting/chooseFile';
 import type { Services } from '../services';
-import { now } from '../now';
 import type { Comparison } from './comparison';
-import { watchFiles } from './fileWatch';
-import { noticesFor, type FileState } from './notices';
+import { FollowedFiles } from './followedFiles';
+import { noticesFor } from './notices';
 import { actOn, showProblemCell } from './panelActions';
 import { answerQuestion, questionLabel } from './openQuestions';
 import { panelHtml } from './panelHtml';
@@ -32,8 +34,7 @@ export class ComparisonPanel implements Disposable {
   readonly onDidClose = this.closed.event;
   /** The person did something in this panel: commands are about it from now on. */
   readonly onDidUse = this.used.event;
-  private watch: Disposable | null = null;
-  private fileState: FileState = 'as computed';
+  private readonly files: FollowedFiles;
   private busy: Busy | null = null;
   private listening = false;
 
@@ -43,6 +44,7 @@ export class ComparisonPanel implements Disposable {
     readonly panel: WebviewPanel,
   ) {
     const { extensionUri } = services.context;
+    this.files = new FollowedFiles(comparison, services.log, () => this.send());
     panel.webview.options = {
       enableScripts: true,
       enableForms: false,
@@ -56,7 +58,6 @@ export class ComparisonPanel implements Disposable {
       }),
       panel.onDidDispose(() => this.dispose()),
       comparison.onDidShow(() => {
-        this.fileState = 'as computed';
         this.busy = null;
         this.send();
       }),
@@ -70,7 +71,7 @@ export class ComparisonPanel implements Disposable {
   /** What befell the files or the calculation, as the panel says it. */
   get notices(): readonly Notice[] {
     const { shown, subject } = this.comparison;
-    return noticesFor(shown, this.fileState, subject);
+    return noticesFor(shown, this.files.state, subject);
   }
 
   reveal(): void {
@@ -78,7 +79,7 @@ export class ComparisonPanel implements Disposable {
   }
 
   dispose(): void {
-    this.watch?.dispose();
+    this.files.dispose();
     for (const disposable of this.disposables.splice(0)) disposable.dispose();
     this.comparison.dispose();
     this.closed.fire();
@@ -88,12 +89,7 @@ export class ComparisonPanel implements Disposable {
   }
 
   private receive(message: unknown): void {
-    this.handle(message).catch((error: unknown) => {
-      this.services.log.failed(
-        'panel',
-        error instanceof Error ? (error.stack ?? error.message) : String(error),
-      );
-    });
+    this.handle(message).catch((error: unknown) => failed('panel', error, this.services.log));
   }
 
   private async handle(received: unknown): Promise<void> {
@@ -106,8 +102,7 @@ export class ComparisonPanel implements Disposable {
         return;
       case 'act':
         // A click on numbers that have just been replaced means something else by now.
-        if (message.revision === this.comparison.shown?.revision)
-          await actOn(this.services, this.comparison, message.action);
+        if (message.revision === this.comparison.shown?.revision) await this.act(message.action);
         return;
       case 'notice':
         await this.onNotice(message.id);
@@ -121,18 +116,35 @@ export class ComparisonPanel implements Disposable {
     }
   }
 
+  /** A point stands for a row of the file as it was computed from: in another file its line may hold another row. */
+  private async act(action: PanelAction): Promise<void> {
+    if (action.kind === 'point' || action.kind === 'show') {
+      const state = (await this.files.look()).kind;
+      if (state === 'changed' || state === 'edited') {
+        void window.showWarningMessage(
+          l10n.t(
+            'The file is not as it was when these numbers were computed. Run the comparison again first.',
+          ),
+        );
+        return;
+      }
+    }
+    await actOn(this.services, this.comparison, action);
+  }
+
   private async onNotice(id: NonNullable<Notice['action']>['id']): Promise<void> {
     const { comparison } = this;
     switch (id) {
       case 'saveAndRunAgain':
-        await Promise.all(comparison.subject.files.map(async uri => documentOf(uri)?.save()));
+        for (const [index, uri] of comparison.subject.files.entries()) await this.save(index, uri);
         break;
       case 'runAgain':
         break;
       case 'chooseFile': {
+        const lost = this.files.state.kind === 'gone' ? this.files.state.file : 0;
         const uri = await chooseFile();
         if (uri === null) return;
-        this.replaceFile(0, uri);
+        this.replaceFile(lost, uri);
       }
     }
     await comparison.run();
@@ -140,34 +152,28 @@ export class ComparisonPanel implements Disposable {
 
   /** The file lies elsewhere now: the comparison, its record and what is watched go with it. */
   private replaceFile(index: number, uri: Uri): void {
-    const { comparison } = this;
-    const files = comparison.subject.files.map((file, at) => (at === index ? uri : file));
-    const root = rootOf(files[0] ?? uri);
-    comparison.moveTo(
-      { files, root },
-      files.map(file => recordName(file, root)),
-      now(),
-    );
+    this.comparison.moveTo(index, uri);
     this.follow();
   }
 
+  /** Saves the text of a file; one that was never saved has another name from then on. */
+  private async save(index: number, uri: Uri): Promise<void> {
+    const document = documentOf(uri);
+    if (document === undefined) return;
+    if (!document.isUntitled) {
+      await document.save();
+      return;
+    }
+    const saved = await workspace.save(uri);
+    if (saved !== undefined) this.replaceFile(index, saved);
+  }
+
   private follow(): void {
-    const { comparison, panel } = this;
-    this.watch?.dispose();
-    this.watch = watchFiles(
-      comparison.subject.files,
-      state => {
-        this.fileState = state;
-        this.send();
-      },
-      (from, to) => {
-        const index = comparison.subject.files.findIndex(file => file.toString() === from.toString());
-        if (index < 0) return;
-        this.replaceFile(index, to);
-        void comparison.run();
-      },
-    );
-    panel.title = l10n.t('Comparison: {0}', comparison.subject.files.map(lastPart).join(', '));
+    this.files.follow((index, to) => {
+      this.replaceFile(index, to);
+      void this.comparison.run();
+    });
+    this.panel.title = l10n.t('Comparison: {0}', this.comparison.subject.files.map(lastPart).join(', '));
   }
 
   /** Sends the whole of what is to be shown; never waits for it to arrive. */

@@ -107,9 +107,16 @@ async function read(services: Services, comparison: Comparison, wish: Request['w
 }
 
 async function askAll(services: Services, comparison: Comparison): Promise<void> {
-  const { files, wish, confidence } = comparison.request;
-  const base: Request = { files, wish, ...(confidence === undefined ? {} : { confidence }) };
-  await comparison.askAnew(await askComparison(services, comparison.subject.files, [], base));
+  const { files, wish, confidence, rows, where } = comparison.request;
+  const base: Request = {
+    files,
+    wish,
+    ...(confidence === undefined ? {} : { confidence }),
+    ...(rows === undefined ? {} : { rows }),
+    ...(where === undefined ? {} : { where }),
+  };
+  const { files: uris, spans } = comparison.subject;
+  await comparison.askAnew(await askComparison(services, uris, rows === undefined ? spans : [], base));
 }
 
 interface WishItem extends QuickPickItem {

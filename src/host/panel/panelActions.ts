@@ -5,6 +5,7 @@ import type { StepId } from '../../protocol/asking';
 import type { ChangeKey, PanelAction } from '../../report/panel/action';
 import { askAnalyst, askConfidence, askMatters, askSampling, askText } from '../asking/askText';
 import { showStep } from '../asking/showStep';
+import { lastPart } from '../files/root';
 import { showCell } from '../files/showCell';
 import type { Services } from '../services';
 import { now } from '../now';
@@ -38,19 +39,23 @@ export async function showProblemCell(services: Services, comparison: Comparison
 
 /** Goes to a cell of the comparison's files. */
 export async function showAt({ client }: Services, comparison: Comparison, at: CellRef): Promise<void> {
-  const { files } = await comparison.open();
+  const { files, wish } = await comparison.open();
   const [uri, input] = [comparison.subject.files[at.file], files[at.file]];
   if (uri !== undefined && input !== undefined) {
-    await showCell(client, { uri, input, wish: comparison.request.wish, at });
+    await showCell(client, { uri, input, wish, at });
   }
 }
 
-/** Offers to leave a row out; needs a reason. */
+/** Offers to leave a row out; needs a reason. A file that changes meanwhile may hold another row on that line. */
 export async function offerToLeaveOut(comparison: Comparison, { file, line }: CellRef): Promise<void> {
+  const offered = await comparison.stamps();
   const leaveOut = l10n.t('Leave line {0} out…', line);
+  const uri = comparison.subject.files[file];
+  const name = uri === undefined ? '' : lastPart(uri);
   const detail = l10n.t('The row stays in the file; the record names it with your reason');
   const picked = await window.showQuickPick([{ label: leaveOut, detail }], {
-    title: l10n.t('Line {0}', line),
+    title:
+      comparison.subject.files.length > 1 ? l10n.t('{0}, line {1}', name, line) : l10n.t('Line {0}', line),
   });
   if (picked === undefined) return;
   const reason = await askText({
@@ -59,7 +64,14 @@ export async function offerToLeaveOut(comparison: Comparison, { file, line }: Ce
     placeholder: l10n.t('for example: tile cracked on the saw'),
     required: true,
   });
-  if (reason !== null) await comparison.act({ kind: 'leave out', file, line, reason, when: now() });
+  if (reason === null) return;
+  if ((await comparison.stamps()).join() !== offered.join()) {
+    void window.showWarningMessage(
+      l10n.t('The file was changed meanwhile; nothing was left out. Choose the row again.'),
+    );
+    return;
+  }
+  await comparison.act({ kind: 'leave out', file, line, reason, when: now() });
 }
 
 async function state(comparison: Comparison, key: 'sampling' | 'analyst'): Promise<void> {
@@ -123,12 +135,12 @@ export async function askStep(
   request: Request,
   only: StepId,
 ): Promise<Partial<Request> | null> {
-  const { files } = await comparison.open();
+  const { files, wish } = await comparison.open();
   const { step } = await services.client.ask({
     type: 'nextStep',
     revision: 0,
     files,
-    request,
+    request: { ...request, wish },
     columns: null,
     remembered: null,
     answered: [],

@@ -57,7 +57,7 @@ export class PanelManager implements WebviewPanelSerializer, Disposable {
     const { request, provenance } = await this.recipeOf(recipe);
     const comparison = new Comparison(
       this.services,
-      { files, root },
+      { files, root, spans: [] },
       start({ ...request, files: recipe.request.files }, provenance.changed.at(-1)?.when ?? now()),
       provenance,
       true,
@@ -83,7 +83,6 @@ export class PanelManager implements WebviewPanelSerializer, Disposable {
   }
 
   private add(panel: ComparisonPanel): void {
-    this.panels.add(panel);
     this.bringForward(panel);
     panel.panel.onDidChangeViewState(({ webviewPanel }) => {
       if (webviewPanel.active) this.bringForward(panel);
@@ -97,6 +96,10 @@ export class PanelManager implements WebviewPanelSerializer, Disposable {
 
   private bringForward(panel: ComparisonPanel | null): void {
     this.front = panel;
+    if (panel !== null) {
+      this.panels.delete(panel); // the set keeps the order of use, so that the last one used comes next
+      this.panels.add(panel);
+    }
     void commands.executeCommand('setContext', 'weighbeam.hasComparison', panel !== null);
   }
 }

@@ -12,6 +12,8 @@ export interface Shown {
   readonly problem: ShownProblem | null;
   readonly open: readonly string[];
   readonly numbers: Answered['numbers'];
+  /** Of the files it was computed from, as the host stamped them; none where they could not be opened. */
+  readonly stamps: readonly string[];
   /** Computed from the editor's text, which is not saved. */
   readonly unsaved: boolean;
   /** The worker had died and was started again. */

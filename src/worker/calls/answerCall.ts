@@ -51,7 +51,7 @@ async function answeredBy(call: Answer, request: Request, { desk, tick }: Sittin
     async () => ({ request, answered: await answer(call.files.map(open), request, { tick, createHasher }) }),
   );
   const { table } = kept.answered;
-  if (kept.request === request || table === null) return kept.answered;
+  if (kept.request === request) return kept.answered;
   return { ...kept.answered, comparison: answerFrom(table, request, tick) };
 }
 
