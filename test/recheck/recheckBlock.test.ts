@@ -135,6 +135,41 @@ describe('a recheck', () => {
     expect([outcome.kind, outcome.reason?.facts['found']]).toEqual(['blocked', 2]);
   });
 
+  describe('of two left-out rows that are alike', () => {
+    const alike = EXPORT.replace('standard;4;b;;lost', 'slow cool;3;b;731,0;cracked\nstandard;4;b;;lost');
+    const left = (...at: readonly number[]) => ({
+      ...ASKED,
+      leaveOut: at.map(row => ({ file: 0, line: row, reason: 'tile cracked', afterResult: false })),
+    });
+    const moved = (text: string): string => text.replace('slow cool;1;a', ';;;;\nslow cool;1;a');
+
+    it('finds each on a line of its own', async () => {
+      const outcome = await recheck(await blockOf(alike, left(7, 12)), moved(alike));
+      expect([outcome.kind, outcome.changes]).toEqual(['same', []]);
+    });
+
+    it('is blocked when only one is there any more', async () => {
+      const outcome = await recheck(await blockOf(alike, left(7, 12)), EXPORT);
+      expect([outcome.kind, outcome.reason?.code, outcome.reason?.facts]).toEqual([
+        'blocked',
+        'left-out-row-gone',
+        { line: 12, value: '731,0', found: 0 },
+      ]);
+    });
+
+    it('is blocked, with how many there are, when a third has come and lines moved', async () => {
+      const third = alike.replace('standard;6', 'slow cool;3;b;731,0;cracked\nstandard;6');
+      const outcome = await recheck(await blockOf(alike, left(7, 12)), moved(third));
+      expect([outcome.kind, outcome.reason?.facts['found']]).toEqual(['blocked', 3]);
+    });
+
+    it('never takes one line for two of them', async () => {
+      const block = await blockOf(alike, left(7, 12));
+      const outcome = await recheck(block.replace('line = 12', 'line = 7'), EXPORT);
+      expect(outcome.reason?.code).toBe('left-out-row-gone');
+    });
+  });
+
   it('is blocked when the file is gone, or lies outside the root', async () => {
     const block = await blockOf(EXPORT);
     expect((await recheck(block, null)).reason?.code).toBe('file-not-found');
