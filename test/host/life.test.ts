@@ -102,6 +102,19 @@ suite('the panel', () => {
     assert.equal((await compare(uri, request)).problem, null, 'the next try is answered');
   });
 
+  test('shows the last of two requests that came at once, whichever is computed first', async function () {
+    this.timeout(60_000);
+    const uri = await write('overtaken.csv', many);
+    const overtaken = { ...request, confidence: 0.9 };
+    const first = vscode.commands.executeCommand('weighbeam.compare', uri, overtaken);
+    await until('the panel is open', () => panels().length === 1);
+    const shown = await compare(uri, { ...request, confidence: 0.99 });
+    await first;
+    const api = await weighbeam();
+    assert.match(shown.blockText ?? '', /^confidence = 0\.99$/m);
+    assert.equal(api.lastShown(), shown, 'the one that was overtaken shows nothing later');
+  });
+
   test('that was closed while it computed gives no answer to anybody', async () => {
     const uri = await write('closed.csv', long);
     const api = await weighbeam();

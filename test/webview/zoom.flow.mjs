@@ -17,11 +17,14 @@ export async function flow({ page, panel, openFile, run, answerAll, picture }) {
           .filter(part => part.getBoundingClientRect().right > innerWidth + 0.5)
           .map(part => part.tagName + ' ' + (part.getAttribute('class') ?? ''))`);
 
-  // Zoom in the editor leaves a page half of its pixels: so does a window of half the width.
-  await page.setViewportSize({ width: 690, height: 900 });
+  // What a browser does at 200 % zoom: half of the pixels each way, each of them drawn by four.
+  const session = await page.context().newCDPSession(page);
+  const zoomed = { width: 690, height: 450, deviceScaleFactor: 2, mobile: false };
+  await session.send('Emulation.setDeviceMetricsOverride', zoomed);
   await page.waitForTimeout(500);
   const narrow = await frame.evaluate('innerWidth');
   assert.ok(narrow <= 330, `the panel is ${narrow} px wide`);
+  assert.equal(await frame.evaluate('devicePixelRatio'), 2);
   await picture('narrow, all unfolded');
   assert.deepEqual(await tooWide(), [], `at ${narrow} px`);
 }
