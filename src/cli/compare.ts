@@ -18,7 +18,8 @@ import { compareFlags, formats } from './compareFlags';
 import { createHasher } from './hasher';
 import { helpPage } from './help';
 import { Exit, type ExitCode, type Io } from './io';
-import { laidOver, placeOf, recipeOf } from './like';
+import { placeOf, recipeOf } from './like';
+import { likeAsked } from './likeAsked';
 import { parseOptions, type Options } from './options';
 import { writeOut } from './output';
 import { nameFiles, type NamedFile } from './paths';
@@ -73,10 +74,11 @@ async function compareFiles(options: Options, named: readonly NamedFile[], io: I
   const like = options.text('like');
   const recipe = like === undefined ? null : await recipeOf(like, io.cwd);
   const [said, wish] = [saidBy(options, names), wishOf(options)];
-  const request =
-    recipe === null ? { files: names, wish, ...said } : laidOver(recipe.request, said, names, wish);
   const provenance = provenanceOf(options, recipe?.purpose);
-  const answered = await answer(sources, request, platform);
+  const answered =
+    recipe === null
+      ? await answer(sources, { files: names, wish, ...said }, platform)
+      : await likeAsked(recipe, said, wish, sources);
   const written = writtenAs(format, answered, provenance, offsetTime(io.now()));
 
   const read = [...options.words, ...(like === undefined ? [] : [placeOf(like).note])];

@@ -1,12 +1,11 @@
 import { readFile } from 'node:fs/promises';
 import path from 'node:path';
-import { patched } from '../compare/patched';
 import type { Request } from '../compare/request';
 import { Refusal } from '../core/model/problem';
+import type { Block } from '../settings/document';
 import { findBlocks } from '../settings/findBlocks';
 import { parseBlock } from '../settings/parseBlock';
 import { requestFrom } from '../settings/requestFrom';
-import type { Said } from './compareRequest';
 import { UsageError } from './usageError';
 
 /** Takes "NOTE.md:31" apart; the line is that of any line of the block. */
@@ -15,8 +14,9 @@ export function placeOf(like: string): { readonly note: string; readonly line: n
   return found === null ? { note: like, line: null } : { note: found[1] ?? like, line: Number(found[2]) };
 }
 
-/** What a block says to do, and the question it was done for. */
+/** A block, what it says to do, and the question it was done for. */
 export interface Recipe {
+  readonly block: Block;
   readonly request: Request;
   readonly purpose: string;
 }
@@ -49,27 +49,5 @@ export async function recipeOf(like: string, cwd: string): Promise<Recipe> {
     );
   }
   const parsed = parseBlock(block.text, block.firstLine).block;
-  return { request: requestFrom(parsed), purpose: parsed.purpose['question-in-words'] };
-}
-
-/**
- * A recipe on other files: what the command line says is laid over it. Rows left out in the block are rows of its own
- * file, so they are not carried to another; nor is the line of its header, which is found anew.
- */
-export function laidOver(
-  recipe: Request,
-  said: Said,
-  files: readonly string[],
-  wish: Request['wish'],
-): Request {
-  const sameFiles =
-    files.length === recipe.files.length && files.every((name, index) => name === recipe.files[index]);
-  const { header, ...reading } = recipe.wish;
-  const over = patched(recipe, said, sameFiles ? [] : ['leaveOut']);
-  return {
-    ...over,
-    ...(over.options === undefined ? {} : { options: { ...recipe.options, ...said.options } }),
-    files,
-    wish: { ...reading, ...(sameFiles && header !== undefined ? { header } : {}), ...wish },
-  };
+  return { block: parsed, request: requestFrom(parsed), purpose: parsed.purpose['question-in-words'] };
 }

@@ -10,11 +10,33 @@ import { scout } from '../readers/scout';
 const NEARBY = 10;
 
 /**
+ * What `attempt` gives under the first way of reading (see headerWishes) that it does not refuse; where it refuses all, the
+ * refusal of the likeliest is thrown.
+ */
+export async function underEachHeader<Given>(
+  request: Request,
+  sources: readonly ByteSource[],
+  list: readonly MethodDescriptor[],
+  attempt: (wish: ReadingWish) => Promise<Given>,
+): Promise<Given> {
+  let refused: Refusal | null = null;
+  for (const wish of await headerWishes(request, sources, list)) {
+    try {
+      return await attempt(wish);
+    } catch (error) {
+      if (!(error instanceof Refusal)) throw error;
+      refused ??= error;
+    }
+  }
+  throw refused ?? new RangeError('no way of reading was tried');
+}
+
+/**
  * The ways of reading under which a recipe can be asked again, the likeliest first: with the header on its recorded line,
  * on the line that the file itself shows, else on one nearby; each only where all the columns named stand in that line.
  * Falls back to the recorded line, so that the refusal names what is missing there.
  */
-export async function headerWishes(
+async function headerWishes(
   request: Request,
   sources: readonly ByteSource[],
   list: readonly MethodDescriptor[],
