@@ -21,7 +21,7 @@ import { Exit, type ExitCode, type Io } from './io';
 import { placeOf, recipeOf } from './like';
 import { likeAsked } from './likeAsked';
 import { parseOptions, type Options } from './options';
-import { writeOut } from './output';
+import { writeOut, type Output } from './output';
 import { nameFiles, type NamedFile } from './paths';
 import { platform } from './platform';
 import { complain } from './problems';
@@ -83,16 +83,14 @@ async function compareFiles(options: Options, named: readonly NamedFile[], io: I
 
   const read = [...options.words, ...(like === undefined ? [] : [placeOf(like).note])];
   const figure = options.text('figure');
-  if (figure !== undefined) {
-    const drawn = figureSvg(viewWith(answered, provenance, unprinted(answered)));
-    await writeOut('figure', figure, drawn, { cwd: io.cwd, read, keepsRecords: false });
-  }
   const out = options.text('out');
+  const drawn = figure === undefined ? '' : figureSvg(viewWith(answered, provenance, unprinted(answered)));
+  const outputs: readonly Output[] = [
+    ...(figure === undefined ? [] : [{ flag: 'figure', name: figure, text: drawn } as const]),
+    ...(out === undefined ? [] : [{ flag: 'out', name: out, text: written } as const]),
+  ];
+  await writeOut(outputs, { cwd: io.cwd, read });
   if (out === undefined) io.write(written);
-  else {
-    const keepsRecords = format === 'block' || format === 'markdown';
-    await writeOut('out', out, written, { cwd: io.cwd, read, keepsRecords });
-  }
   return Exit.Done;
 }
 

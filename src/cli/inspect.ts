@@ -148,7 +148,7 @@ export async function inspectCommand(argv: readonly string[], io: Io): Promise<E
     const written = (json ? asJson : asText)(named.name, surveyed, findings);
     const out = options.text('out');
     if (out === undefined) io.write(written);
-    else await writeOut('out', out, written, { cwd: io.cwd, read: [file], keepsRecords: false });
+    else await writeOut([{ flag: 'out', name: out, text: written }], { cwd: io.cwd, read: [file] });
     return Exit.Done;
   } catch (error) {
     return complain(error, io, json, [file]);

@@ -1,4 +1,4 @@
-import { readFile } from 'node:fs/promises';
+import { link, readFile, symlink } from 'node:fs/promises';
 import path from 'node:path';
 import { describe, expect, it } from 'vitest';
 import { demo, folderWith, mainCase, weighbeam } from './terminal';
@@ -240,14 +240,48 @@ describe('what is written', () => {
     expect(await readFile(path.join(temp.folder, 'firings-april.csv'))).toEqual(before);
   });
 
-  it('never goes over a notebook that holds records', async () => {
+  it('never goes over a file that was read through another name of it', async () => {
     await using temp = await folderWith('demo');
-    const asked = ['compare', ...mainCase, '--format', 'markdown', '--out', 'note.md'];
-    expect((await weighbeam(temp.folder, ...asked)).code).toBe(0);
+    const at = (name: string): string => path.join(temp.folder, name);
+    await link(at('firings-april.csv'), at('hard.csv'));
+    await symlink(at('hard.csv'), at('soft.csv'));
+    const before = await readFile(at('firings-april.csv'));
+    for (const name of ['hard.csv', 'soft.csv']) {
+      for (const argv of [
+        ['compare', ...mainCase, '--out', name],
+        ['compare', ...mainCase, '--figure', name],
+        ['inspect', 'firings-april.csv', '--out', name],
+      ]) {
+        const { code, err } = await weighbeam(temp.folder, ...argv);
+        expect([code, err]).toEqual([2, expect.stringContaining('is a file that was read')]);
+      }
+    }
+    expect(await readFile(at('firings-april.csv'))).toEqual(before);
+  });
+
+  it.each([
+    ...['text', 'json', 'block', 'markdown', 'html'].map(format => ['--format', format, '--out', 'note.md']),
+    ['--figure', 'note.md'],
+  ])('never goes over a notebook that holds records: %s %s %s %s', async (...argv) => {
+    await using temp = await folderWith('demo');
+    const asked = ['compare', ...mainCase];
+    expect((await weighbeam(temp.folder, ...asked, '--format', 'markdown', '--out', 'note.md')).code).toBe(0);
     const first = await readFile(path.join(temp.folder, 'note.md'), 'utf8');
-    const { code, err } = await weighbeam(temp.folder, ...asked);
+    const { code, err } = await weighbeam(temp.folder, ...asked, ...argv);
     expect([code, err]).toEqual([2, expect.stringContaining('settings blocks already')]);
+    const looked = await weighbeam(temp.folder, 'inspect', 'firings-april.csv', '--out', 'note.md');
+    expect([looked.code, looked.err]).toEqual([2, expect.stringContaining('settings blocks already')]);
     expect(await readFile(path.join(temp.folder, 'note.md'), 'utf8')).toBe(first);
+  });
+
+  it('may go over an earlier answer, but not over itself', async () => {
+    await using temp = await folderWith('demo');
+    const asked = ['compare', ...mainCase, '--figure', 'a.svg', '--format', 'html', '--out'];
+    expect((await weighbeam(temp.folder, ...asked, 'a.html')).code).toBe(0);
+    expect((await weighbeam(temp.folder, ...asked, 'a.html')).code).toBe(0);
+    const { code, err } = await weighbeam(temp.folder, ...asked, './a.svg');
+    expect([code, err]).toEqual([2, expect.stringMatching(/--out \.\/a\.svg and --figure a\.svg/)]);
+    expect(await readFile(path.join(temp.folder, 'a.svg'), 'utf8')).toMatch(/^<svg/);
   });
 
   it('says so when the place cannot be written to', async () => {
