@@ -25,6 +25,8 @@ export interface Outcome {
    * {lines of the records that replace it}.
    */
   readonly notes: readonly Reason[];
+  /** The data files that the block names; none where the block itself cannot be read. */
+  readonly files: readonly string[];
   /** Why it is blocked. */
   readonly reason: Refusal | null;
   readonly now: Comparison | null;

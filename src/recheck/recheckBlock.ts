@@ -13,6 +13,7 @@ import { parseBlock, type ParsedBlock } from '../settings/parseBlock';
 import { resultOf } from '../settings/resultOf';
 import { answerAgain } from './answerAgain';
 import { conclusionOf } from './conclusion';
+import { holdPlan } from './holdPlan';
 import type { Outcome, OutcomeChange, OutcomeKind } from './outcome';
 import { resultChanges } from './resultChanges';
 
@@ -37,18 +38,21 @@ export async function recheckBlock(
     reason: null,
     now: null,
   };
+  let files: readonly string[] = [];
   try {
     const parsed = parseBlock(found.text, found.firstLine, list);
-    const { result } = parsed.block;
-    if (result === undefined) return { ...nothing, kind: 'planned', notes: unknownNote(parsed) };
-    return { ...nothing, ...(await recomputed(parsed, result, open, platform, list)) };
+    const { result, data = [] } = parsed.block;
+    if (result === undefined) holdPlan(parsed, platform.createHasher);
+    files = data.map(({ file }) => file);
+    if (result === undefined) return { ...nothing, kind: 'planned', files, notes: unknownNote(parsed) };
+    return { ...nothing, files, ...(await recomputed(parsed, result, open, platform, list)) };
   } catch (error) {
     if (!(error instanceof Refusal)) throw error;
     const line =
       typeof error.facts['line'] === 'number' && error.code.startsWith('block-')
         ? error.facts['line']
         : found.firstLine;
-    return { ...nothing, kind: 'blocked', line, reason: error };
+    return { ...nothing, kind: 'blocked', line, files, reason: error };
   }
 }
 

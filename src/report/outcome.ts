@@ -35,10 +35,17 @@ function kindSentence(outcome: Outcome, t: Say): string {
       return t('no result yet');
     case 'blocked': {
       if (outcome.reason === null) return t('cannot be computed');
-      const { message, where, fix } = problemWords(outcome.reason, t, outcome.now?.settings.files ?? []);
-      return where === null ? `${message}. ${fix}` : `${message} (${where}). ${fix}`;
+      const { message, where, fix } = problemWords(outcome.reason, t, outcome.files);
+      const place = where ?? dataPlace(outcome.files, message);
+      return place === null ? `${message}. ${fix}` : `${message} (${place}). ${fix}`;
     }
   }
+}
+
+/** The data files, for a problem that names no place of its own. */
+function dataPlace(files: readonly string[], message: string): string | null {
+  const names = files.map(visible);
+  return names.length === 0 || names.some(name => message.includes(name)) ? null : names.join(', ');
 }
 
 /** ": p was 0.003, is 0.004; difference was …", or ''. */

@@ -122,9 +122,38 @@ describe('a block rechecked', () => {
 
   it('is planned while it has no result', async () => {
     await using note = await notebookWith();
-    await note.write('note.md', note.text.replace(/^\[result\][\s\S]*?(?=^\[by\])/m, ''));
+    const plan = note.text.replace(/^\[result\][\s\S]*?(?=^\[by\])/m, '').replace(/^cells = .*\n/m, '');
+    await note.write('note.md', plan);
     const said = await recheck(note.folder);
     expect([said.code, outcomeOf(said)]).toEqual([0, 'planned']);
+  });
+
+  it('is blocked, not planned, when only its result was deleted', async () => {
+    await using note = await notebookWith();
+    await note.write('note.md', note.text.replace(/^\[result\][\s\S]*?(?=^\[record\])/m, ''));
+    const said = await recheck(note.folder);
+    expect([said.code, outcomeOf(said)]).toEqual([1, 'blocked']);
+    expect(said.out).toContain('[result]');
+  });
+
+  it.each([
+    ['a row that was left out is gone', csv(rows.filter(([, value]) => value !== 11.9))],
+    ['a label is gone', csv().replaceAll('old', 'older')],
+    ['a column is gone', csv().replace('hardness', 'strength')],
+    ['it holds text', csv().replace('12.4', 'about 12')],
+    ['it is empty', ''],
+  ])('that is blocked because of the data names the file: %s', async (_, text) => {
+    await using note = await notebookWith('--leave-out', '4:cracked', '--test', 'new', '--reference', 'old');
+    await note.write('data.csv', text);
+    const said = await recheck(note.folder);
+    expect([said.code, outcomeOf(said)]).toEqual([1, 'blocked']);
+    expect(said.out).toMatch(/\(data\.csv[^)]*\)/);
+  });
+
+  it('that is blocked because of itself names no file', async () => {
+    await using note = await notebookWith();
+    await note.write('note.md', note.text.replace('against = 0', 'against = "zero"'));
+    expect((await recheck(note.folder)).out).not.toContain('data.csv');
   });
 
   it('is planned also when its file is not there yet and nothing of it is known', async () => {

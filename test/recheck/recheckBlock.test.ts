@@ -39,6 +39,10 @@ function resealed(block: string): string {
   return block.replace(/^id = ".*"$/mu, `id = "${recordId(block, platform.createHasher)}"`);
 }
 
+/** The block without what only a computation gives: a plan. */
+const planOf = (block: string): string =>
+  block.replace(/\[result\][^]*?(?=\[by\])/u, '').replace(/^cells = .*\n/gmu, '');
+
 describe('a recheck', () => {
   it('says same for an unchanged file', async () => {
     const outcome = await recheck(await blockOf(EXPORT), EXPORT);
@@ -106,9 +110,34 @@ describe('a recheck', () => {
   });
 
   it('says planned of a block without a result', async () => {
+    const plan = planOf(await blockOf(EXPORT));
+    expect((await recheck(plan, null)).kind).toBe('planned');
+    const record = '[record]\nid = ""\nreplaces = "none"\n[by]';
+    const sealed = resealed(plan.replace('[by]', record));
+    expect((await recheck(sealed, null)).kind).toBe('planned');
+  });
+
+  it('is blocked where a result was taken out of a record, so that none passes for a plan', async () => {
     const block = await blockOf(EXPORT);
-    const planned = block.replace(/\[result\][^]*?(?=\[by\])/u, '');
-    expect((await recheck(planned, null)).kind).toBe('planned');
+    const emptied = block.replace(/\[result\][^]*?(?=\[record\])/u, '');
+    const cases: readonly (readonly [text: string, line: string])[] = [
+      [emptied, 'id = '],
+      [emptied.replace(/^cells = .*\n/mu, ''), 'id = '],
+      [resealed(emptied), 'cells = '],
+      [block.replace(/\[result\][^]*?(?=\[by\])/u, ''), 'cells = '],
+    ];
+    for (const [text, line] of cases) {
+      const { kind, reason, line: at } = await recheck(text, EXPORT);
+      const expected = notebookOf(text)
+        .split('\n')
+        .findIndex(own => own.startsWith(line));
+      expect([kind, reason?.code, reason?.facts['expected'], at]).toEqual([
+        'blocked',
+        'block-not-readable',
+        expect.stringContaining('[result]'),
+        expected + 1,
+      ]);
+    }
   });
 
   it('finds a left-out row again on another line, and is blocked when it is gone', async () => {
