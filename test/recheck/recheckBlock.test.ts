@@ -90,8 +90,16 @@ describe('a recheck', () => {
     }
   });
 
-  it('says same, with a note, when only words of the block were edited', async () => {
-    const edited = (await blockOf(EXPORT)).replace('places by lot', 'places drawn by lot');
+  it.each([
+    ['sampling', 'places by lot', 'places drawn by lot'],
+    ['the question in words', 'harden the glaze', 'soften the glaze'],
+    ['a reason', 'tile cracked on the saw', 'outlier'],
+    ['the bytes of the file', /^bytes = \d+/mu, 'bytes = 1'],
+    ['the rows that were counted', /^counted = .*$/mu, 'counted = ["separate-t"]'],
+  ])('says same, with a note, when only %s was edited, which no number follows from', async (_, was, is) => {
+    const block = await blockOf(EXPORT);
+    const edited = block.replace(was, is);
+    expect(edited).not.toBe(block);
     const outcome = await recheck(edited, EXPORT);
     expect([outcome.kind, codes(outcome)]).toEqual(['same', ['text-edited']]);
   });
