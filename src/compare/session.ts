@@ -1,5 +1,5 @@
 import { Refusal } from '../core/model/problem';
-import type { Settings } from '../core/model/settings';
+import type { LeftOut, Settings } from '../core/model/settings';
 import { patched } from './patched';
 import type { Request } from './request';
 import { requestPatch } from './requestPatch';
@@ -43,6 +43,8 @@ export type Action =
   | { readonly kind: 'reason'; readonly key: string; readonly reason: string }
   /** The files bear other names now: so they do in everything that was asked of them, also what undo brings back. */
   | { readonly kind: 'moved'; readonly files: readonly string[] }
+  /** Where the rows left out now stand, in their order: the lines of the file they were on have moved. */
+  | { readonly kind: 'found'; readonly leaveOut: readonly LeftOut[] }
   | { readonly kind: 'undo' }
   | { readonly kind: 'redo' }
   | { readonly kind: 'shown'; readonly when: string };
@@ -94,6 +96,8 @@ export function reduce(session: Session, action: Action): Session {
         firstShown: firstShown === null ? null : renamed(firstShown),
       };
     }
+    case 'found':
+      return onLinesNow(session, action.leaveOut);
     case 'undo':
       return canUndo(session) ? { ...session, at: session.at - 1 } : session;
     case 'redo':
@@ -113,6 +117,28 @@ function leaveOut(session: Session, row: Extract<Action, { kind: 'leave out' }>)
   return {
     ...request,
     leaveOut: [...others, { file, line, reason, afterResult: session.firstShown !== null }],
+  };
+}
+
+/** Every request of the session named the rows by the lines of one and the same text: all of them move together. */
+function onLinesNow(session: Session, found: readonly LeftOut[]): Session {
+  const was = requestOf(session).leaveOut ?? [];
+  const now = (row: LeftOut): LeftOut => {
+    const at = was.findIndex(({ file, line }) => file === row.file && line === row.line);
+    const { line, digest } = found[at] ?? row;
+    return { ...row, line, ...(digest === undefined ? {} : { digest }) };
+  };
+  const moved = (step: Step): Step => {
+    const { leaveOut } = step.request;
+    return leaveOut === undefined
+      ? step
+      : { ...step, request: { ...step.request, leaveOut: leaveOut.map(now) } };
+  };
+  const { history, firstShown } = session;
+  return {
+    ...session,
+    history: history.map(moved),
+    firstShown: firstShown === null ? null : moved(firstShown),
   };
 }
 

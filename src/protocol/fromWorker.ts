@@ -1,12 +1,12 @@
 import * as v from 'valibot';
 import { checked } from './checked';
 import type { Request } from '../compare/request';
-import type { Provenance } from '../core/model/settings';
+import type { LeftOut, Provenance } from '../core/model/settings';
 import type { View } from '../report/view';
 import { stepSchema, type Step } from './asking';
 import { countSchema, lineSchema, shownProblemSchema, type ShownProblem } from './places';
 import { provenanceSchema } from './provenance';
-import { partialRequestSchema, requestSchema } from './request';
+import { leftOutSchema, partialRequestSchema } from './request';
 
 interface Reply {
   readonly call: number;
@@ -53,12 +53,13 @@ export interface Answered extends Reply {
   readonly cells: string;
   /** Ids of the questions that the data leave open. */
   readonly open: readonly string[];
+  /** The rows left out, in the order asked: the lines they stand on now, each with its digest. */
+  readonly leaveOut: readonly LeftOut[];
   readonly numbers: Readonly<Record<string, unknown>> | null;
 }
 
 export interface Restored extends Reply {
   readonly type: 'restored';
-  readonly request: Request;
   readonly provenance: Provenance;
 }
 
@@ -178,12 +179,12 @@ const fromWorkerSchema: v.GenericSchema<unknown, FromWorker> = v.variant('type',
     readings,
     cells: v.string(),
     open: v.array(v.string()),
+    leaveOut: leftOutSchema,
     numbers: v.nullable(v.record(v.string(), v.unknown())),
   }),
   v.strictObject({
     type: v.literal('restored'),
     ...reply,
-    request: requestSchema,
     provenance: provenanceSchema,
   }),
   v.strictObject({

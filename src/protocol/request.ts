@@ -18,6 +18,16 @@ const wishSchema = v.strictObject({
   below: v.exactOptional(v.picklist(['refuse', 'zero', 'half', 'limit'])),
 });
 
+export const leftOutSchema = v.array(
+  v.strictObject({
+    file: countSchema,
+    line: lineSchema,
+    reason: text,
+    afterResult: v.boolean(),
+    digest: v.exactOptional(text),
+  }),
+);
+
 const typedSchema = v.union([
   v.strictObject({ label: text, n: v.number(), mean: v.number(), sd: v.number() }),
   v.strictObject({ label: text, x: v.number(), n: v.number() }),
@@ -49,16 +59,7 @@ const told = {
   confidence: v.exactOptional(v.number()),
   rows: v.exactOptional(v.array(v.tuple([lineSchema, lineSchema]))),
   where: v.exactOptional(v.array(pair)),
-  leaveOut: v.exactOptional(
-    v.array(
-      v.strictObject({
-        file: countSchema,
-        line: lineSchema,
-        reason: text,
-        afterResult: v.boolean(),
-      }),
-    ),
-  ),
+  leaveOut: v.exactOptional(leftOutSchema),
   same: v.exactOptional(v.array(pair)),
   onlyChosen: v.exactOptional(v.boolean()),
   options: v.exactOptional(

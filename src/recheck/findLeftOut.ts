@@ -17,7 +17,7 @@ const TICK_EVERY = 0x1000;
  * left out have that digest, or more, so that it cannot be said which of them were meant.
  */
 export async function findLeftOut(
-  rows: readonly BlockLeftOut[],
+  rows: readonly Pick<BlockLeftOut, 'row-sha256' | 'value'>[],
   asked: readonly LeftOut[],
   sources: readonly ByteSource[],
   wish: ReadingWish,

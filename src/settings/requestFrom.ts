@@ -108,6 +108,7 @@ function leftOutOf(block: Block): readonly LeftOut[] {
     line: row.line,
     reason: row.reason,
     afterResult: row['after-result'],
+    digest: row['row-sha256'],
   }));
 }
 

@@ -50,6 +50,18 @@ describe('a session', () => {
     expect(changedAfterShown(renamed)).toEqual([]);
   });
 
+  it('names the rows left out by the lines they stand on now, whatever is undone', () => {
+    const left = after(out(31, 1), shown(2), out(12, 3));
+    const found = [
+      { file: 0, line: 33, reason: 'cracked', afterResult: false, digest: 'd31' },
+      { file: 0, line: 14, reason: 'cracked', afterResult: true, digest: 'd12' },
+    ];
+    const moved = reduce(left, { kind: 'found', leaveOut: found });
+    expect(requestOf(moved).leaveOut).toEqual(found);
+    expect(requestOf(reduce(moved, { kind: 'undo' })).leaveOut).toEqual([found[0]]);
+    expect(changedAfterShown(moved)).toEqual([]);
+  });
+
   it('never changes what it was given', () => {
     const before = Object.freeze(start(Object.freeze({ ...request }), at(0)));
     reduce(before, change({ confidence: 0.9 }, 1));

@@ -58,6 +58,27 @@ suite('the files of a comparison', () => {
     }
   });
 
+  test('may grow lines: a row left out is found again on its new line, and undo knows it there', async () => {
+    const uri = await write('grown.csv', long);
+    const all = await compare(uri, request);
+    const leaveOut = [{ file: 0, line: 3, reason: 'chipped', afterResult: true }];
+    const without = await compare(uri, { ...request, leaveOut });
+    await write('grown.csv', long.replace('east,2.31', ',\neast,2.31'));
+    const api = await weighbeam();
+    const again = await compare(uri, request);
+    assert.match(again.blockText ?? '', /^line = 4$/m);
+    const chosen = (shown: typeof again | null) => shown?.numbers?.['chosen'];
+    assert.deepEqual(chosen(again), chosen(without));
+    await vscode.commands.executeCommand('weighbeam.undo');
+    assert.deepEqual(chosen(api.lastShown()), chosen(all));
+    await vscode.commands.executeCommand('weighbeam.redo');
+    assert.deepEqual(chosen(api.lastShown()), chosen(without));
+    await write('grown.csv', long.replace('east,2.35\n', ''));
+    const { problem } = await compare(uri, request);
+    assert.equal(problem?.code, 'left-out-row-gone');
+    assert.match(problem.message, /chipped/);
+  });
+
   test('keep the name they have now when something is undone', async () => {
     const uri = await write('named.csv', long);
     await compare(uri, request);

@@ -96,6 +96,7 @@ describe('messages from the worker', () => {
       readings: [],
       cells: '',
       open: [],
+      leaveOut: [],
       numbers: null,
     };
     expect(() => readFromWorker({ ...answered, view: 'words' })).toThrow(/view/);

@@ -5,6 +5,8 @@ import type { Provenance } from '../../src/core/model/settings';
 import { giveUp, makeCancelFlags } from '../../src/protocol/cancelFlags';
 import type { FileInput } from '../../src/protocol/files';
 import type { WorkerReply } from '../../src/protocol/fromWorker';
+import { parseBlock } from '../../src/settings/parseBlock';
+import { requestFrom } from '../../src/settings/requestFrom';
 import { fileOf, makeWorker } from './fakePort';
 
 const when = '2031-04-02T09:31:00+02:00';
@@ -189,21 +191,22 @@ describe('the worker', () => {
 });
 
 describe('blocks', () => {
-  it('are found, and give back the request and the words they were made from', async () => {
+  it('are found, and hold the request and give back the words they were made from', async () => {
     const { ask } = makeWorker();
     const { blockText } = of('answered', await ask(answerTo(request)));
     const note = `Kilns\n\n\`\`\`toml\n${blockText ?? ''}\`\`\`\n`;
     const found = of('blocksFound', await ask({ type: 'blocks', text: note }));
     expect(found.blocks).toMatchObject([{ firstLine: 4, files: [file.name] }]);
     const restored = of('restored', await ask({ type: 'restore', blockText: blockText ?? '' }));
-    expect(restored.request).toMatchObject({
+    const held = requestFrom(parseBlock(blockText ?? '', 1).block);
+    expect(held).toMatchObject({
       measured: ['hardness'],
       test: 'east',
       reference: 'west',
       per: 'none',
     });
     expect(restored.provenance).toMatchObject({ sampling: 'drawn by lot', analyst: 'R. Kolb' });
-    const again = of('answered', await ask(answerTo(restored.request)));
+    const again = of('answered', await ask(answerTo(held)));
     expect(again.blockText).toBe(blockText);
   });
 

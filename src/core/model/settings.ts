@@ -28,6 +28,8 @@ export interface LeftOut {
   readonly line: number;
   readonly reason: string;
   readonly afterResult: boolean;
+  /** SHA-256 of the cells of the row that was meant, once it is known: by it the row is found again on another line. */
+  readonly digest?: string;
 }
 
 /** Everything that can change a number, and nothing else. Columns are exact header texts, or '#3'. */

@@ -223,6 +223,8 @@ export class Comparison implements Disposable {
       );
     const answered = await askOnce();
     log.read(answered.readings, performance.now() - started);
+    if (revision === this.revision)
+      this.session = reduce(this.session, { kind: 'found', leaveOut: answered.leaveOut });
     const again = this.countLook(answered.cells);
     return again ? askOnce() : answered;
   }

@@ -1,5 +1,6 @@
 import { commands, Uri, type Disposable, type WebviewPanel, type WebviewPanelSerializer } from 'vscode';
 import type { Request } from '../../compare/request';
+import type { Provenance } from '../../core/model/settings';
 import { start } from '../../compare/session';
 import { readPanelState, type Recipe } from '../../protocol/panelState';
 import { rootOf } from '../files/root';
@@ -44,7 +45,7 @@ export class PanelManager implements WebviewPanelSerializer, Disposable {
     await there.comparison.askAnew(request);
   }
 
-  /** Brings back a panel after the window was reloaded, from the settings block or the request that it kept. */
+  /** Brings back a panel after the window was reloaded, from the request that it kept and its settings block. */
   async deserializeWebviewPanel(panel: WebviewPanel, kept: unknown): Promise<void> {
     const state = readPanelState(kept);
     if (state === null) {
@@ -54,11 +55,11 @@ export class PanelManager implements WebviewPanelSerializer, Disposable {
     const { recipe } = state;
     const files = recipe.files.map(file => Uri.parse(file, true));
     const root = rootOf(files[0] ?? panel.webview.asWebviewUri(this.services.context.extensionUri));
-    const { request, provenance } = await this.recipeOf(recipe);
+    const provenance = await this.provenanceOf(recipe);
     const comparison = new Comparison(
       this.services,
       { files, root, spans: [] },
-      start({ ...request, files: recipe.request.files }, provenance.changed.at(-1)?.when ?? now()),
+      start(recipe.request, provenance.changed.at(-1)?.when ?? now()),
       provenance,
       true,
     );
@@ -70,15 +71,13 @@ export class PanelManager implements WebviewPanelSerializer, Disposable {
     for (const panel of [...this.panels]) panel.dispose();
   }
 
-  private async recipeOf({ blockText, request }: Recipe): Promise<{
-    request: Request;
-    provenance: typeof freshProvenance;
-  }> {
-    if (blockText === null) return { request, provenance: freshProvenance };
+  /** What the block says of its own making; a block of another version says nothing that could be kept. */
+  private async provenanceOf({ blockText }: Recipe): Promise<Provenance> {
+    if (blockText === null) return freshProvenance;
     try {
-      return await this.services.client.ask({ type: 'restore', revision: 0, blockText });
+      return (await this.services.client.ask({ type: 'restore', revision: 0, blockText })).provenance;
     } catch {
-      return { request, provenance: freshProvenance }; // a block of another version: what was asked is kept beside it
+      return freshProvenance;
     }
   }
 

@@ -1,4 +1,4 @@
-import { answer, answerFrom, type Answered } from '../../compare/answer';
+import { answerFrom, type Answered } from '../../compare/answer';
 import { changedAfterShown } from '../../compare/changedAfterShown';
 import type { Request } from '../../compare/request';
 import { requestOf } from '../../compare/session';
@@ -9,6 +9,7 @@ import { viewOf } from '../../report/view';
 import { blockFrom, type Block } from '../../settings/block';
 import { cellsDigest } from '../../settings/digests';
 import { printBlock } from '../../settings/printBlock';
+import { answerWhereRowsStand, rowsLeftOut } from '../answerWhereRowsStand';
 import { changesKept } from '../changesKept';
 import type { Sitting } from '../desk';
 import { filesKey } from '../filesAtHand';
@@ -39,6 +40,7 @@ export async function answerCall(call: Answer, sitting: Sitting): Promise<Reply<
     ),
     cells: cellsOf(block) ?? digestOf(answered, sitting),
     open: comparison.open,
+    leaveOut: rowsLeftOut(answered, desk.platform.createHasher),
     numbers: call.numbers ? { ...jsonReport(comparison, t) } : null,
   };
 }
@@ -48,11 +50,15 @@ async function answeredBy(call: Answer, request: Request, { desk, tick }: Sittin
   const { open, createHasher } = desk.platform;
   const kept = await desk.answers.get(
     shelfKey(filesKey(call.files, request.wish), readingPart(request)),
-    async () => ({ request, answered: await answer(call.files.map(open), request, { tick, createHasher }) }),
+    async () => ({
+      request,
+      answered: await answerWhereRowsStand(call.files.map(open), request, { tick, createHasher }),
+    }),
   );
   const { table } = kept.answered;
   if (kept.request === request) return kept.answered;
-  return { ...kept.answered, comparison: answerFrom(table, request, tick) };
+  const leaveOut = kept.answered.comparison.settings.leftOut; // where they were found
+  return { ...kept.answered, comparison: answerFrom(table, { ...request, leaveOut }, tick) };
 }
 
 /** What asks something else of the same table; the rest decides which columns and rows are read. */
