@@ -11,6 +11,7 @@ import { blockFrom } from '../settings/block';
 import { printBlock } from '../settings/printBlock';
 import { offsetTime } from '../settings/offsetTime';
 import { provenanceOf, saidBy, wishOf } from './compareRequest';
+import { refuseContradictions } from './contradictions';
 import { diskSource } from './diskSource';
 import { untied, withFlags } from './answerFlags';
 import { english } from './english';
@@ -25,6 +26,7 @@ import { writeOut, type Output } from './output';
 import { nameFiles, type NamedFile } from './paths';
 import { platform } from './platform';
 import { complain } from './problems';
+import { refuseUnheard } from './unheard';
 import { UsageError } from './usageError';
 
 const example = `for example
@@ -79,6 +81,7 @@ async function compareFiles(options: Options, named: readonly NamedFile[], io: I
     recipe === null
       ? await answer(sources, { files: names, wish, ...said }, platform)
       : await likeAsked(recipe, said, wish, sources);
+  refuseUnheard(said, answered);
   const written = writtenAs(format, answered, provenance, offsetTime(io.now()));
 
   const read = [...options.words, ...(like === undefined ? [] : [placeOf(like).note])];
@@ -105,6 +108,7 @@ export async function compareCommand(argv: readonly string[], io: Io): Promise<E
   if (files.length === 0) {
     throw new UsageError('No file was named', 'Write weighbeam compare FILE; see --help.');
   }
+  refuseContradictions(options);
   const named = await nameFiles(files, io.cwd, options.text('root'));
   try {
     return await compareFiles(options, named, io);

@@ -3,6 +3,7 @@ import type { LeftOut, OptionValue, Provenance } from '../core/model/settings';
 import { MISSING_WORDS, type ReadingWish } from '../readers/readingWish';
 import { around, namesOf, numberOf, rangesOf, twoNumbersOf, wholeNumberOf } from './flagValues';
 import { declaredFlags } from './compareFlags';
+import { refuseTwice } from './contradictions';
 import type { Options } from './options';
 import { UsageError } from './usageError';
 
@@ -110,6 +111,14 @@ function marginOf(text: string | undefined): readonly [number, number] | undefin
   return [-margin, margin];
 }
 
+function columnsOf(texts: readonly string[]): readonly string[] {
+  const columns = namesOf('columns', texts);
+  const twice = columns.find((name, index) => columns.indexOf(name) !== index);
+  if (twice !== undefined)
+    throw new UsageError(`--columns names ${twice} twice`, 'Name each column once: each is a group.');
+  return columns;
+}
+
 /** Numbers, names and rows of the flags as a request; `files` are the names of the data files, for leave-outs. */
 export function saidBy(options: Options, files: readonly string[]): Said {
   const number = (flag: string) => {
@@ -126,7 +135,7 @@ export function saidBy(options: Options, files: readonly string[]): Said {
   return said<Said>({
     measured: listed('of', texts => texts),
     label: options.text('by'),
-    columns: listed('columns', texts => namesOf('columns', texts)),
+    columns: listed('columns', columnsOf),
     summary: options.has('summary') ? true : undefined,
     test: options.text('test'),
     reference: options.text('reference'),
@@ -153,9 +162,21 @@ export function saidBy(options: Options, files: readonly string[]): Said {
     confidence: number('confidence'),
     rows: listed('rows', texts => rangesOf('rows', texts)),
     where: listed('where', texts => texts.map(text => around('where', '=', text, '"site=North"'))),
-    leaveOut: listed('leave-out', texts => texts.map(text => leaveOutOf(text, files))),
+    leaveOut: listed('leave-out', texts =>
+      refuseTwice(
+        'leave-out',
+        texts,
+        texts.map(text => leaveOutOf(text, files)),
+        ({ file, line }) => `${file} ${line}`,
+      ),
+    ),
     same: listed('same', texts =>
-      texts.map(text => around('same', ' -> ', text, '"Slow cool -> slow cool"')),
+      refuseTwice(
+        'same',
+        texts,
+        texts.map(text => around('same', ' -> ', text, '"Slow cool -> slow cool"')),
+        ([from]) => from,
+      ),
     ),
     onlyChosen: options.has('only-chosen') ? true : undefined,
     options: Object.keys(values).length === 0 ? undefined : values,
@@ -164,13 +185,13 @@ export function saidBy(options: Options, files: readonly string[]): Said {
 
 /** What the record shall say beside the numbers; `purpose` is that of a recipe. */
 export function provenanceOf(options: Options, purpose = ''): Provenance {
+  const texts = options.texts('reason');
+  const reasons = texts.map(text => around('reason', '=', text, '"method=protocol 12"'));
   return {
     questionInWords: options.text('purpose') ?? purpose,
     sampling: options.text('sampling') ?? '',
     analyst: options.text('analyst') ?? '',
-    reasons: Object.fromEntries(
-      options.texts('reason').map(text => around('reason', '=', text, '"method=protocol 12"')),
-    ),
+    reasons: Object.fromEntries(refuseTwice('reason', texts, reasons, ([key]) => key)),
     changed: [],
     looks: 1,
     plan: null,

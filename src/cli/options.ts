@@ -93,6 +93,8 @@ export function parseOptions(argv: readonly string[], command: string, flags: re
     if (flag.repeats !== true && given.length > 1) {
       throw new UsageError(`--${flag.name} stands twice (${given.join(', ')})`, 'Give it once.');
     }
+    if (flag.value === null && flag.name !== 'help' && (values[flag.name]?.length ?? 0) > 1)
+      throw new UsageError(`--${flag.name} stands twice`, 'Give it once.');
     for (const text of given) checkChoice(flag, text);
   }
   return {

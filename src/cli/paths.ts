@@ -2,6 +2,7 @@ import { realpath } from 'node:fs/promises';
 import path from 'node:path';
 import { Refusal } from '../core/model/problem';
 import { candidates } from '../recheck/candidates';
+import { UsageError } from './usageError';
 
 /** A file by its place on disk and by its name from the root, with / between folders. */
 export interface NamedFile {
@@ -35,7 +36,7 @@ const commonFolder = (files: readonly string[]): string =>
 
 /**
  * Names data files as a settings block will: from the root, which is `root` or else the current directory. A file
- * outside a root that was given is refused, after links are resolved; outside the current directory the folder that
+ * outside a root that was given is refused, after links are resolved, and so is a file that is named twice; outside the current directory the folder that
  * holds the files becomes the root. Errors: file-not-found, file-outside-root.
  */
 export async function nameFiles(
@@ -45,6 +46,11 @@ export async function nameFiles(
 ): Promise<readonly NamedFile[]> {
   const base = await real(path.resolve(cwd, root ?? '.'), root ?? '.');
   const reals = await Promise.all(files.map(file => real(path.resolve(cwd, file), file)));
+  const twice = reals.findIndex((file, index) => reals.indexOf(file) !== index);
+  if (twice >= 0) {
+    const first = files[reals.indexOf(reals[twice] ?? '')] ?? '';
+    throw new UsageError(`${first} and ${files[twice] ?? ''} are the same file`, 'Name each file once.');
+  }
   const outside = reals.findIndex(file => !isInside(base, file));
   if (outside >= 0 && root !== undefined) {
     throw new Refusal('file-outside-root', { name: files[outside] ?? '', root }, files[outside] ?? null);
