@@ -17,7 +17,10 @@ export interface OptionSpec {
   says(t: Say): string;
 }
 
-/** What is asked of a method. */
+/** A ratio is 1 where the groups are alike, the chance that a value of the test group is the larger 0.5. */
+export type Estimates = 'difference' | 'ratio' | 'chance';
+
+/** What is asked of a method. `against` and `margin` are in units of its measure: for `ratio` and `spread` they are ratios. */
 export interface Ask {
   readonly question: Question;
   readonly confidence: number;
@@ -54,6 +57,8 @@ export interface MethodDescriptor<Id extends string = string, D extends keyof De
   readonly version: number;
   readonly design: D;
   readonly measure: Measure;
+  /** What the estimate is, and with it the value it has when the groups are alike; absent: a difference, and 0. */
+  readonly estimates?: Estimates;
   readonly questions: readonly Question[];
   /** Name of the statistic as printed: t, z, F, … */
   readonly statistic: string;
