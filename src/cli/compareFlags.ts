@@ -66,7 +66,7 @@ const asking: readonly Flag[] = [
   {
     name: 'measure',
     value: 'WORD',
-    choices: ['mean', 'ratio', 'proportion', 'rank', 'spread'],
+    choices: [...new Set(methods.map(({ measure }) => measure))],
     says: 'what is compared',
     about: 'the comparison',
   },

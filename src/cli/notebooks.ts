@@ -1,5 +1,6 @@
 import { readdir, stat } from 'node:fs/promises';
 import path from 'node:path';
+import { refusePipe } from './regularFile';
 import { UsageError } from './usageError';
 
 const notebookNames = /\.(?:md|markdown|txt|qmd|rmd|tex|rst|adoc)$/i;
@@ -55,6 +56,7 @@ export async function findNotebooks(words: readonly string[], cwd: string): Prom
   const found = new Set<string>();
   for (const word of words) {
     const absolute = path.resolve(cwd, word);
+    await refusePipe(absolute, word);
     const kind = await stat(absolute).catch(() => null);
     const files =
       kind === null

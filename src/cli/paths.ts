@@ -1,7 +1,8 @@
-import { realpath } from 'node:fs/promises';
+import { realpath, stat } from 'node:fs/promises';
 import path from 'node:path';
 import { Refusal } from '../core/model/problem';
 import { candidates } from '../recheck/candidates';
+import { refusePipe } from './regularFile';
 import { UsageError } from './usageError';
 
 /** A file by its place on disk and by its name from the root, with / between folders. */
@@ -18,7 +19,18 @@ const isInside = (folder: string, file: string): boolean => {
 
 const slashes = (name: string): string => name.split(path.sep).join('/');
 
+/** The folder that --root names, without links. Throws UsageError where it is none. */
+async function realRoot(cwd: string, root: string): Promise<string> {
+  const folder = await realpath(path.resolve(cwd, root)).catch(() => null);
+  if (folder !== null && (await stat(folder)).isDirectory()) return folder;
+  throw new UsageError(
+    `--root ${root} is no folder`,
+    'Name the folder that file names in blocks start from; it is looked for from the current one.',
+  );
+}
+
 async function real(file: string, name: string): Promise<string> {
+  await refusePipe(file, name);
   return realpath(file).catch(() => {
     throw new Refusal('file-not-found', { name }, name);
   });
@@ -44,7 +56,7 @@ export async function nameFiles(
   cwd: string,
   root: string | undefined,
 ): Promise<readonly NamedFile[]> {
-  const base = await real(path.resolve(cwd, root ?? '.'), root ?? '.');
+  const base = root === undefined ? await realpath(cwd) : await realRoot(cwd, root);
   const reals = await Promise.all(files.map(file => real(path.resolve(cwd, file), file)));
   const twice = reals.findIndex((file, index) => reals.indexOf(file) !== index);
   if (twice >= 0) {
@@ -79,7 +91,7 @@ export async function findNamed(name: string, root: string, notebook: string): P
 
 /** The root of a recheck: what was given, else the current directory, else (notebook elsewhere) the notebook's folder. */
 export async function rootOf(notebook: string, cwd: string, given: string | undefined): Promise<string> {
-  if (given !== undefined) return path.resolve(cwd, given);
+  if (given !== undefined) return realRoot(cwd, given);
   const here = await realpath(cwd);
   const folder = path.dirname(await realpath(notebook));
   return isInside(here, folder) ? here : folder;

@@ -1,4 +1,7 @@
+import { execFileSync } from 'node:child_process';
+import path from 'node:path';
 import { describe, expect, it } from 'vitest';
+import { methods } from '../../src/core/methods/index';
 import { folderWith, weighbeam, type Said } from './terminal';
 
 const good = 'site,mass\nNorth,1.2\nNorth,1.4\nNorth,1.3\nSouth,2.1\nSouth,2.4\nSouth,2.2\n';
@@ -151,10 +154,44 @@ describe('what is asked for is checked', () => {
     expect(err).toContain(words);
   });
 
+  it('a measure with no method is not among the words, also where every measure is known', async () => {
+    const { code, err } = await about(good, ...compare, '--measure', 'rnk');
+    expect([code, err]).toEqual([2, expect.stringMatching(/--measure rnk.*mean, /)]);
+    for (const measure of ['mean', 'ratio', 'proportion', 'rank', 'spread']) {
+      if (methods.some(method => method.measure === measure)) continue;
+      const said = await about(good, ...compare, '--measure', measure);
+      expect([said.code, said.err]).toEqual([2, expect.stringContaining(`--measure ${measure}`)]);
+    }
+  });
+
+  it.each(['nowhere', 'data.csv'])('a root that is no folder, %s, is named with its flag', async root => {
+    await using temp = await folderWith({ 'data.csv': good, 'note.md': '' });
+    for (const argv of [compare, ['recheck', 'note.md']]) {
+      const { code, out, err } = await weighbeam(temp.folder, ...argv, '--root', root);
+      expect([code, out]).toEqual([2, '']);
+      expect(err).toMatch(new RegExp(`^usage: .*--root ${root.replace('.', '\\.')}\\b`));
+    }
+  });
+
   it('a line to leave out that holds no row', async () => {
     const { code, err } = await about(good, ...compare, '--leave-out', '99:cracked');
     expect(code).toBe(3);
     expect(err).toContain('99');
+  });
+
+  it.each([
+    ['compare', ['--of', 'mass', '--by', 'site']],
+    ['inspect', []],
+    ['recheck', []],
+  ] as const)('%s of standard input or of a pipe says that a file is needed', async (command, asked) => {
+    await using temp = await folderWith({});
+    const pipe = path.join(temp.folder, 'pipe');
+    execFileSync('mkfifo', [pipe]);
+    for (const name of ['-', 'pipe', '/dev/null']) {
+      const { code, out, err } = await weighbeam(temp.folder, command, name, ...asked);
+      expect([code, out]).toEqual([2, '']);
+      expect(err).toMatch(/^usage: .*(?:standard input|no file on a disk).*Save/);
+    }
   });
 
   it('a file that is not there, and a folder in its place', async () => {
