@@ -25,4 +25,9 @@ describe('a problem says what happened and what to do', () => {
     expect(problemWords(refusal, english).fix).toBe('Name the delimiter.');
     expect(problemWithFlag(refusal, english).fix).toBe('Name the delimiter (--delimiter C).');
   });
+
+  it('and of a measure without a method, that there is none', () => {
+    const refusal = new Refusal('method-not-for-this', { measure: 'rank' });
+    expect(problemWords(refusal, english).message).toBe('There is no method for the measure rank');
+  });
 });

@@ -99,6 +99,8 @@ function notForThis(
     return t('Known standard deviations go with the means of two independent groups, not with {0}', name);
   if (text('needs') === 'pair') return t('{0} compares pairs, and no pair column is named', name);
   if (pair !== null) return t('{0} does not compare pairs ({1})', name, pair);
+  if (text('measure') !== null && name === '')
+    return t('There is no method for the measure {0}', text('measure') ?? '');
   if (text('measure') !== null) return t('{0} does not go with the measure {1}', name, text('measure') ?? '');
   return t('These do not go together: {0}', name);
 }
