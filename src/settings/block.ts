@@ -8,6 +8,7 @@ import type { MethodDescriptor } from '../core/model/methods';
 import { Refusal } from '../core/model/problem';
 import type { Provenance, Settings } from '../core/model/settings';
 import { MISSING_WORDS } from '../readers/readingWish';
+import { holdNumbers } from './holdNumbers';
 import { cellsDigest, recordId, rowDigest } from './digests';
 import type { Block, BlockComparison, BlockData, BlockGroups, BlockLeftOut, BlockSummary } from './document';
 import { printBlock } from './printBlock';
@@ -26,7 +27,7 @@ export interface Stamp {
 
 /**
  * The record of a comparison. Throws Refusal 'answer-needed' while a question of the data is open: a record is made of
- * what was decided, never of what was guessed.
+ * what was decided, never of what was guessed; and 'number-unusable' for a setting that is no finite number, with its key.
  */
 export function blockFrom(
   answered: Answered,
@@ -60,6 +61,7 @@ export function blockFrom(
       written: stamp.written,
     },
   };
+  holdNumbers(block);
   const id = recordId(printBlock(block), stamp.createHasher);
   return { ...block, record: { id, replaces: replaces ?? 'none' } };
 }
@@ -170,7 +172,13 @@ const summaryOf = (
 ): BlockSummary =>
   'x' in group
     ? { label: group.label, n: group.n, x: group.x }
-    : { label: group.label, n: group.n, mean: group.mean, sd: group.sd };
+    : {
+        label: group.label,
+        n: group.n,
+        mean: group.mean,
+        // One value has none.
+        ...(Number.isNaN(group.sd) ? {} : { sd: group.sd }),
+      };
 
 /** Arrays of settings are readonly; those of a block are its own. */
 const plain = (value: string | number | boolean | readonly number[]): string | number | boolean | number[] =>

@@ -1,5 +1,6 @@
 import fc from 'fast-check';
 import { describe, expect, it } from 'vitest';
+import type { Request } from '../../src/compare/request';
 import { Refusal } from '../../src/core/model/problem';
 import { blockFrom } from '../../src/settings/block';
 import { fenced } from '../../src/settings/fenced';
@@ -273,6 +274,79 @@ describe('a settings block', () => {
     expect(await blockOf(EXPORT, { ...ASKED, question: 'higher' })).toMatch(
       /^interval = \[-?\d[^,]*, inf\]$/mu,
     );
+  });
+
+  it('never holds a number that is none, whatever was computed, and reads back to the same text', async () => {
+    const answered = await answerOf(EXPORT);
+    const any = fc.oneof(fc.double(), fc.constantFrom(NaN, Infinity, -Infinity));
+    const maybe = fc.option(any);
+    const results = fc.record({
+      ...{ estimate: maybe, statistic: maybe, p: maybe, lower: maybe, upper: maybe },
+      df: fc.oneof(maybe, fc.tuple(any, any)),
+    });
+    fc.assert(
+      fc.property(results, fc.array(any, { minLength: 4, maxLength: 4 }), (numbers, [a, b, c, d]) => {
+        const { comparison } = answered;
+        const { chosen, whatIf, groups } = comparison;
+        const computed = <R extends typeof chosen>(row: R): R =>
+          row.result === null ? row : { ...row, result: { ...row.result, ...numbers } };
+        const found = [
+          { mean: a, sd: b },
+          { mean: c, sd: d },
+        ];
+        const printed = printBlock(
+          blockFrom(
+            {
+              ...answered,
+              comparison: {
+                ...comparison,
+                chosen: computed(chosen),
+                whatIf: { ...whatIf, rows: whatIf.rows.map(computed) },
+                groups: groups.map((group, index) => ({ ...group, ...found[index] })),
+              },
+            },
+            provenance,
+            STAMP,
+          ),
+        );
+        const openEnds = printed.replaceAll(/interval = \[(?:-inf, [-\d]|[-\d][^,\]]*, inf\])/gu, '');
+        expect(openEnds).not.toMatch(/[=[,] ?[+-]?(?:nan|inf)\b/u);
+        expect(printBlock(parseBlock(printed, 1).block)).toBe(printed);
+      }),
+      { numRuns: 300 },
+    );
+  });
+
+  it('holds no SD of a typed group of one value, and asks the same again without it', async () => {
+    const asked: Request = {
+      files: [],
+      wish: {},
+      typed: [
+        { label: 'mill A', n: 1, mean: 31.4, sd: NaN },
+        { label: 'mill B', n: 10, mean: 30.2, sd: 0.9 },
+      ],
+      variance: 'known',
+      sigma: [1, 1],
+    };
+    const printed = await blockOf('', asked);
+    expect(printed).not.toMatch(/nan/u);
+    const request = requestFrom(parseBlock(printed, 1).block);
+    expect(await blockOf('', request)).toBe(printed);
+  });
+
+  it('is refused where a setting is no number, with its key', async () => {
+    const answered = await answerOf(EXPORT);
+    for (const [key, options] of [
+      ['comparison.seed', { seed: NaN }],
+      ['comparison.sigma[1]', { sigma: [1, -Infinity] }],
+    ] as const) {
+      const { comparison } = answered;
+      const settings = { ...comparison.settings, options };
+      const error = refusalOf(() =>
+        blockFrom({ ...answered, comparison: { ...comparison, settings } }, provenance, STAMP),
+      );
+      expect([error.code, error.where]).toEqual(['number-unusable', key]);
+    }
   });
 
   it('holds counts and shares of a column of two outcomes', async () => {
