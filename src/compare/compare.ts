@@ -44,10 +44,12 @@ export function compare(
   const prepared = prepare(table, settings, tick);
   const chosenId = chosenMethod(settings, prepared.groups);
   const only = options.onlyChosen === true ? [] : (options.counted ?? null);
-  const { rows, chosen } = runRows(table, settings, prepared, { chosen: chosenId, list, only, tick });
+  const method = methodById(chosenId, list);
+  if (method === undefined) throw new RangeError(`the settings name a method that is not there: ${chosenId}`);
+  const { rows, chosen } = runRows(table, settings, prepared, { chosen: method, list, only, tick });
   refuseUncomputed(table, prepared, chosen);
 
-  const design = methodById(chosenId, list)?.design ?? prepared.design;
+  const { design } = method;
   const { two } = prepared.designs;
   const groups = design === 'two' && two !== undefined ? [two.test, two.reference] : prepared.groups;
   const checks = options.onlyChosen === true ? [] : (options.evidence ?? evidenceChecks);
@@ -67,7 +69,7 @@ export function compare(
     pairs: prepared.pairs,
     chosen,
     whatIf: whatIfOf(rows, chosen, settings.confidence),
-    effects: prepared.counts === null ? effectsOf(prepared, design, chosen, column, numbered) : [],
+    effects: settings.measure === 'mean' ? effectsOf(prepared, design, chosen, column, numbered) : [],
     ...lookAtData({ table, groups, settings, rows }, checks, tick),
     leftOut:
       table === null || prepared.selection === null ? [] : leftOutRows(table, settings, prepared.selection),

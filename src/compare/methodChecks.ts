@@ -36,12 +36,20 @@ export function checkMethod(chosen: Chosen, list: readonly MethodDescriptor[]): 
   return descriptor;
 }
 
-/** The margin of a question that needs one: 0 strictly inside it, and for `equivalent` room for an interval. */
-export function checkMargin(question: Question, margin: Request['margin'], confidence: number): void {
+/**
+ * The margin of a question that needs one: the value of groups that are alike strictly inside it, ratios above 0, and for
+ * `equivalent` room for an interval.
+ */
+export function checkMargin(
+  question: Question,
+  margin: Request['margin'],
+  confidence: number,
+  alike: number,
+): void {
   const needsOne = question === 'equivalent' || question === 'not-lower' || question === 'not-higher';
   if (needsOne && margin === undefined) throw new Refusal('margin-needed', { question });
-  if (margin !== undefined && !(margin[0] < 0 && margin[1] > 0)) {
-    throw new Refusal('margin-invalid', { low: margin[0], high: margin[1] });
+  if (margin !== undefined && !(margin[0] < alike && margin[1] > alike && (alike === 0 || margin[0] > 0))) {
+    throw new Refusal('margin-invalid', { low: margin[0], high: margin[1], alike });
   }
   if (question === 'equivalent' && bothTailsConfidence(confidence) <= 0) {
     throw new Refusal('confidence-out-of-range', { confidence, question });

@@ -3,6 +3,8 @@ import type { Designs } from '../core/model/groups';
 import type { Ask, MethodDescriptor } from '../core/model/methods';
 import type { Ticker } from '../core/model/problem';
 import type { Reason } from '../core/model/say';
+import { inOneUnit } from '../core/methods/alike';
+import { askFor } from './askFor';
 import { decide } from './decision';
 
 /** Rough operations above which a row waits to be asked for. */
@@ -13,29 +15,43 @@ export type DesignData = { readonly [D in keyof Designs]?: Designs[D] };
 export interface RowAsk {
   readonly ask: Ask;
   readonly data: string;
-  readonly chosen: string;
+  readonly chosen: MethodDescriptor;
   /** Ids that the person ruled out, with a reason kept elsewhere. */
   readonly ruledOut: ReadonlySet<string>;
   readonly tick: Ticker;
 }
 
-/** Whether a method has a row at all beside data of this design: pairs and unpaired groups are each other's neighbours. */
-export function standsBeside(method: MethodDescriptor, design: keyof Designs): boolean {
-  if (method.design === design) return true;
-  const two: readonly (keyof Designs)[] = ['two', 'pairs'];
-  return two.includes(method.design) && two.includes(design);
+/**
+ * Whether a method has a row at all beside the chosen one: pairs and unpaired groups are each other's neighbours, and so
+ * are means, ratios and ranks, which are other questions about the same values.
+ */
+export function standsBeside(
+  method: MethodDescriptor,
+  chosen: MethodDescriptor,
+  design: keyof Designs,
+): boolean {
+  const near = <T>(one: T, other: T, neighbours: readonly T[]): boolean =>
+    one === other || (neighbours.includes(one) && neighbours.includes(other));
+  return (
+    near(method.design, design, ['two', 'pairs']) &&
+    near(method.measure, chosen.measure, ['mean', 'ratio', 'rank'])
+  );
 }
 
 /** One row under other assumptions: computed, or saying why not; counted, or saying why not. */
 export function runRow(method: MethodDescriptor, designs: DesignData, asked: RowAsk): Row {
-  const { ask, data } = asked;
+  const { data, chosen } = asked;
   const own = designs[method.design];
-  const absent = own === undefined ? missingDesign(method, designs) : whyNot(method, own, designs, asked);
-  if (own === undefined || absent !== null) return notComputed(method.id, data, absent);
+  const ask = askFor(method, chosen, asked.ask);
+  if (own === undefined) return notComputed(method.id, data, missingDesign(method, designs));
+  if (ask === null) return notComputed(method.id, data, reasonOf('other-unit'));
+  const absent = whyNot(method, own, designs, { ...asked, ask });
+  if (absent !== null) return notComputed(method.id, data, absent);
   const result = method.run(own, ask, asked.tick);
   const unpaired = designs.pairs !== undefined && method.design === 'two';
   const reason = unpaired ? reasonOf('pairs-given') : (method.doubts(own, ask) ?? ruledOut(method.id, asked));
-  const counted = method.counted && reason === null;
+  const sameQuantity = method.measure === chosen.measure && inOneUnit(method, chosen);
+  const counted = method.counted && sameQuantity && reason === null;
   return {
     id: method.id,
     data,
@@ -53,10 +69,10 @@ function whyNot(
   designs: DesignData,
   { ask, chosen }: RowAsk,
 ): Reason | null {
-  if (designs.pairs !== undefined && method.design === 'two' && method.id !== chosen)
+  if (designs.pairs !== undefined && method.design === 'two' && method !== chosen)
     return reasonOf('pairs-given');
   if (!method.questions.includes(ask.question)) return reasonOf('question-not-for-method');
-  if (method.id !== chosen && method.work(sizeOf(own), ask) > WORK_BUDGET) return reasonOf('too-much-work');
+  if (method !== chosen && method.work(sizeOf(own), ask) > WORK_BUDGET) return reasonOf('too-much-work');
   return method.applies(own, ask);
 }
 

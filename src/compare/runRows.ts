@@ -10,9 +10,9 @@ import { variantsOf } from './variants';
 
 /** Which rows are wanted and where they come from. */
 export interface Wanted {
-  readonly chosen: string;
+  readonly chosen: MethodDescriptor;
   readonly list: readonly MethodDescriptor[];
-  /** Ids to compute; null: every method of the measure. */
+  /** Ids to compute; null: every method that stands beside it. */
   readonly only: readonly string[] | null;
   readonly tick: Ticker;
 }
@@ -34,10 +34,10 @@ export function runRows(
   let answer: Row | null = null;
   const rows: Row[] = [];
   for (const method of list) {
-    if (method.measure !== settings.measure || !standsBeside(method, prepared.design)) continue;
-    if (only !== null && method.id !== chosen && !only.includes(method.id)) continue;
+    if (!standsBeside(method, chosen, prepared.design)) continue;
+    if (only !== null && method !== chosen && !only.includes(method.id)) continue;
     const row = runRow(method, prepared.designs, { ...asked, data });
-    if (method.id !== chosen) {
+    if (method !== chosen) {
       rows.push(row);
       continue;
     }
@@ -52,7 +52,7 @@ export function runRows(
     );
   }
   if (answer === null)
-    throw new Refusal('method-not-for-this', { method: chosen, measure: settings.measure });
+    throw new Refusal('method-not-for-this', { method: chosen.id, measure: settings.measure });
   return { rows, chosen: answer };
 }
 

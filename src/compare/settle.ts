@@ -1,3 +1,4 @@
+import { alikeOf } from '../core/methods/alike';
 import { methods } from '../core/methods/index';
 import type { Table } from '../core/model/cells';
 import type { MethodDescriptor } from '../core/model/methods';
@@ -40,10 +41,10 @@ export function settle(
   const measure = measureAsked(request, fields, list);
   const { method, curve } = methodAsked(request, measure);
   const chosen = { method, measure, question, relation, layout };
-  checkMethod(chosen, list);
-  checkMargin(question, request.margin, confidence);
+  const alike = alikeOf(checkMethod(chosen, list));
+  checkMargin(question, request.margin, confidence, alike);
   checkSigma(chosen, request.sigma);
-  checkNumbers(request);
+  checkNumbers(request, alike);
   checkShares(measure, request);
   const grouped = {
     files: request.files,
@@ -69,7 +70,7 @@ export function settle(
     method,
     question,
     confidence,
-    against: request.against ?? 0,
+    against: request.against ?? alike,
     margin: request.margin ?? null,
     matters: request.matters ?? null,
     options: optionsOf(request, curve),
@@ -103,10 +104,12 @@ function leftOutAsked(request: Request): Settings['leftOut'] {
   return leftOut;
 }
 
-function checkNumbers({ matters, against }: Request): void {
+function checkNumbers({ matters, against, method }: Request, alike: number): void {
   if (matters !== undefined && !(matters > 0 && Number.isFinite(matters))) {
     throw new Refusal('matters-invalid', { matters });
   }
+  if (matters !== undefined && alike !== 0)
+    throw new Refusal('method-not-for-this', { method: method ?? '', needs: 'difference' });
   if (against !== undefined && !Number.isFinite(against)) throw new Refusal('number-unusable', { against });
 }
 

@@ -18,8 +18,12 @@ const TABLE: readonly (VarianceWords & { readonly method: string })[] = [
   { variance: 'known', df: null, curve: 'normal', method: 'known-sigma-z' },
 ];
 
-/** The method of each measure when nothing else is said. */
-const DEFAULT_METHOD: Readonly<Partial<Record<Measure, string>>> = { proportion: 'miettinen-nurminen' };
+/** The method of each measure but the mean when nothing else is said, and that of pairs. */
+const DEFAULT_METHOD: Readonly<
+  Partial<Record<Measure, { readonly usual: string; readonly pairs: string | null }>>
+> = {
+  proportion: { usual: 'miettinen-nurminen', pairs: null },
+};
 
 /** The words behind a method id, or null when the method makes no such assumption. */
 export function wordsOf(method: string): VarianceWords | null {
@@ -43,9 +47,12 @@ export function methodAsked(
     return { method, curve: ruleOf(request) };
   }
   if (measure !== 'mean') {
-    const usual = DEFAULT_METHOD[measure];
-    if (spoken || usual === undefined) throw notForThis(request, { measure });
-    return { method: usual, curve: null };
+    const byDefault = DEFAULT_METHOD[measure];
+    if (spoken || byDefault === undefined) throw notForThis(request, { measure });
+    const { usual, pairs } = byDefault;
+    const own = pair === undefined || pair === 'none' ? usual : pairs;
+    if (own === null) throw notForThis({ ...request, method: usual }, { pair: pair ?? '' });
+    return { method: own, curve: null };
   }
   const row = TABLE.find(words => agrees(words, { ...request, variance: request.variance ?? 'separate' }));
   if (row === undefined) throw notForThis(request);

@@ -11,7 +11,7 @@ import { recordOf } from './view/record';
 import type { ButtonWords, View } from './view/shown';
 import { severalTables } from './view/severalTables';
 import { whatIfOf } from './view/whatIf';
-import { differenceName } from './words/groupLabels';
+import { estimateName } from './words/estimates';
 import { measuredName } from './words/measuredName';
 import { scaleOf } from './words/scale';
 
@@ -43,7 +43,7 @@ export function viewOf(comparison: Comparison, context: ViewContext): View {
 
 /** "hardness: slow cool − standard". */
 function titleOf(comparison: Comparison, t: Say): string {
-  const labels = differenceName(comparison);
+  const labels = estimateName(comparison, t);
   return comparison.measured === '' ? labels : t('{0}: {1}', measuredName(comparison), labels);
 }
 

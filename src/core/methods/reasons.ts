@@ -49,6 +49,8 @@ export function commonWhy({ code, facts }: Reason, t: Say): string {
       return t('not for this kind of data');
     case 'question-not-for-method':
       return t('this method does not answer that question');
+    case 'other-unit':
+      return t('it answers in another unit than the one that was asked in');
     case 'ruled-out':
       return t('ruled out by a stated reason');
     case 'variant-refused':

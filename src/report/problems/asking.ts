@@ -30,13 +30,23 @@ export const askingProblems = {
     flag: '--margin 5 or --margin=-3,5',
   }),
   'margin-invalid': ({ t, number }) => ({
-    message: t(
-      'A margin runs from below 0 to above 0; given: {0} to {1}',
-      number('low') ?? '?',
-      number('high') ?? '?',
-    ),
-    fix: t('Give one number above 0, or both bounds.'),
-    flag: '--margin=-3,5',
+    message:
+      number('alike') === 1
+        ? t(
+            'A margin of ratios runs from between 0 and 1 to above 1; given: {0} to {1}',
+            number('low') ?? '?',
+            number('high') ?? '?',
+          )
+        : t(
+            'A margin runs from below 0 to above 0; given: {0} to {1}',
+            number('low') ?? '?',
+            number('high') ?? '?',
+          ),
+    fix:
+      number('alike') === 1
+        ? t('Give both ratios, such as 0.8 and 1.25.')
+        : t('Give one number above 0, or both bounds.'),
+    flag: number('alike') === 1 ? '--margin 0.8,1.25' : '--margin=-3,5',
   }),
   'matters-invalid': ({ t, number }) => ({
     message: t('The size that matters has to be a number above 0; given: {0}', number('matters') ?? '?'),
@@ -97,6 +107,8 @@ function notForThis(
     return t('Units ({0}) and pairs ({1}) cannot be used together', list('per') ?? '', pair);
   if (text('needs') === 'two-means')
     return t('Known standard deviations go with the means of two independent groups, not with {0}', name);
+  if (text('needs') === 'difference')
+    return t('A size that matters is a difference, and this measure gives none');
   if (text('needs') === 'pair') return t('{0} compares pairs, and no pair column is named', name);
   if (pair !== null) return t('{0} does not compare pairs ({1})', name, pair);
   if (text('measure') !== null && name === '')

@@ -3,7 +3,8 @@ import type { Say } from '../../core/model/say';
 import { cautionsFor, quietCaution } from '../cautions';
 import { printDf, printThree, sayP } from '../numbersPrinted';
 import { shareWords } from '../words/count';
-import { differenceName, groupLabel } from '../words/groupLabels';
+import { estimateName } from '../words/estimates';
+import { groupLabel } from '../words/groupLabels';
 import { assumptionPhrase, reasonWords, statisticName } from '../words/methodWords';
 import { noteWords } from '../words/noteWords';
 import { outcomeOf } from '../words/measuredName';
@@ -78,5 +79,5 @@ function differenceOf(comparison: Comparison, scale: Scale, t: Say): string | nu
   const estimate = result?.estimate ?? null;
   if (estimate === null || decision === 'differs' || decision === 'higher' || decision === 'lower')
     return null;
-  return t('{0} is {1}', differenceName(comparison), scale.difference(estimate));
+  return t('{0} is {1}', estimateName(comparison, t), scale.difference(estimate));
 }

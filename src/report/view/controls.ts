@@ -5,6 +5,7 @@ import type { Measure, Question } from '../../core/model/settings';
 import type { MethodDescriptor } from '../../core/model/methods';
 import type { Say } from '../../core/model/say';
 import { printPercent } from '../numbersPrinted';
+import { estimatesOf } from '../words/estimates';
 import type { Scale } from '../words/scale';
 import { marginText } from './marginHeadline';
 import type { ControlShown } from './shown';
@@ -22,7 +23,13 @@ export function controlsOf(comparison: Comparison, scale: Scale, t: Say): readon
     scales().length > 1 && measure !== 'proportion'
       ? { key: 'measure', label: t('scale'), value: measureWords(measure, t) }
       : null,
-    { key: 'matters', label: t('matters'), value: matters === null ? t('not stated') : scale.typed(matters) },
+    estimatesOf(comparison.chosen) === 'difference'
+      ? {
+          key: 'matters',
+          label: t('matters'),
+          value: matters === null ? t('not stated') : scale.typed(matters),
+        }
+      : null,
     margin === null
       ? null
       : { key: 'margin', label: t('margin'), value: marginText(scale, margin[0], margin[1], t) },

@@ -5,7 +5,8 @@ import type { CellRef } from '../../core/model/problem';
 import type { Say } from '../../core/model/say';
 import { withMinus } from '../numbersPrinted';
 import { shareWords } from '../words/count';
-import { differenceName, groupLabel } from '../words/groupLabels';
+import { estimateName, estimatesOf } from '../words/estimates';
+import { groupLabel } from '../words/groupLabels';
 import { showLabel } from '../words/label';
 import { measuredName, outcomeOf } from '../words/measuredName';
 import { measuredField, placeWords } from '../words/places';
@@ -104,16 +105,16 @@ function differenceFigure(comparison: Comparison, scale: Scale, t: Say): FigureS
   const estimate = result?.estimate ?? null;
   if (result === null || estimate === null) return null;
   const drawn: IntervalShown = { estimate, lower: result.lower, upper: result.upper };
-  const label = differenceName(comparison);
+  const label = estimateName(comparison, t);
   return {
     ...drawn,
     label,
     axis: scale.unit === '' ? label : `${label}, ${scale.unit}`,
     unit: scale.unit,
-    power: design === 'counts' || design === 'pairedCounts' ? 2 : 0,
+    power: scale.unit !== '' && (design === 'counts' || design === 'pairedCounts') ? 2 : 0,
     rules: rulesOf(comparison, scale, t),
     points:
-      design === 'pairs' && !tooManyPoints(groups)
+      design === 'pairs' && estimatesOf(chosen) === 'difference' && !tooManyPoints(groups)
         ? pairLines(groups).map(([value, other]) => value - other)
         : [],
   };

@@ -3,7 +3,7 @@ import type { CellRef } from '../../core/model/problem';
 /** A value marked on an axis: 0, what matters, a margin. */
 export interface RuleShown {
   readonly at: number;
-  /** '' for 0, which the axis names. */
+  /** '' for the value of groups that are alike, which the axis names. */
   readonly label: string;
   readonly kind: 'zero' | 'against' | 'matters' | 'margin';
 }

@@ -1,23 +1,28 @@
 import type { Comparison } from '../../core/model/comparison';
 import type { Say } from '../../core/model/say';
-import { differenceName, groupLabels } from '../words/groupLabels';
+import { alikeValue, estimateName } from '../words/estimates';
+import { groupLabels } from '../words/groupLabels';
 import { subjectOf } from '../words/measuredName';
 import type { Scale } from '../words/scale';
-import { marginHeadline } from './marginHeadline';
+import { otherDecided, otherKind, otherNotSettled } from './otherHeadline';
+import { marginBelow, marginHeadline } from './marginHeadline';
 
 /** The answer in one sentence, in the words of the decision, with the labels and the size. */
 export function headline(comparison: Comparison, scale: Scale, t: Say): string {
   const { chosen } = comparison;
   const subject = subjectOf(comparison, t);
+  const kind = otherKind(comparison);
   switch (chosen.decision) {
     case null:
       return t('{0}: no decision can be given', subject);
     case 'differs':
     case 'higher':
     case 'lower':
-      return decidedHeadline(comparison, scale, t);
+      return kind === null ? decidedHeadline(comparison, scale, t) : otherDecided(comparison, kind, scale, t);
     case 'not settled':
-      return notSettled(comparison, scale, t);
+      return kind === null || comparison.design === 'several'
+        ? notSettled(comparison, scale, t)
+        : otherNotSettled(comparison, kind, scale, t);
     case 'not shown':
       return notShown(comparison, scale, t);
     case 'some differ':
@@ -44,7 +49,7 @@ function decidedHeadline(comparison: Comparison, scale: Scale, t: Say): string {
     return estimate > 0
       ? t('{0} is higher in {1} than in {2} by {3}', subject, test, reference, size)
       : t('{0} is lower in {1} than in {2} by {3}', subject, test, reference, size);
-  const names = differenceName(comparison);
+  const names = estimateName(comparison, t);
   const held = scale.typed(against);
   return estimate > against
     ? t(
@@ -78,7 +83,7 @@ function notSettled(comparison: Comparison, scale: Scale, t: Say): string {
     'Not settled: differences in {0} from {1} ({2}) are compatible with these data',
     subject,
     range,
-    differenceName(comparison),
+    estimateName(comparison, t),
   );
 }
 
@@ -93,7 +98,7 @@ function notShown(comparison: Comparison, scale: Scale, t: Say): string {
         subject,
         test,
         reference,
-        scale.typed(-(margin?.[0] ?? 0)),
+        marginBelow(comparison, scale),
       );
     case 'not-higher':
       return t(
@@ -104,23 +109,23 @@ function notShown(comparison: Comparison, scale: Scale, t: Say): string {
         scale.typed(margin?.[1] ?? 0),
       );
     case 'higher':
-      return against === 0
+      return against === alikeValue(comparison)
         ? t('Not shown that {0} is higher in {1} than in {2}', subject, test, reference)
         : t(
             'Not shown for {0} that {1} lies above {2}',
             subject,
-            differenceName(comparison),
+            estimateName(comparison, t),
             scale.typed(against),
           );
     case 'lower':
     case 'differs':
     case 'equivalent':
-      return against === 0
+      return against === alikeValue(comparison)
         ? t('Not shown that {0} is lower in {1} than in {2}', subject, test, reference)
         : t(
             'Not shown for {0} that {1} lies below {2}',
             subject,
-            differenceName(comparison),
+            estimateName(comparison, t),
             scale.typed(against),
           );
   }

@@ -1,6 +1,8 @@
 import type { Comparison } from '../../core/model/comparison';
+import type { Estimates } from '../../core/model/methods';
 import type { Say } from '../../core/model/say';
 import { printPercent } from '../numbersPrinted';
+import { estimatesOf } from '../words/estimates';
 import type { Scale } from '../words/scale';
 
 /** "95% interval 8.6 to 36.6 MPa", or the bound of a one-sided question; null: the chosen row has none. */
@@ -10,10 +12,21 @@ export function intervalSentence({ chosen, settings }: Comparison, scale: Scale,
   const percent = printPercent(result.confidence);
   const text = scale.withUnit(scale.interval(result).text);
   if (result.lower === null || result.upper === null)
-    return t('{0}% bound: the difference is {1}', percent, text);
+    return boundSentence(estimatesOf(chosen), percent, text, t);
   return settings.question === 'equivalent'
     ? t('{0}% interval {1} ({2}% on each side)', percent, text, printPercent(oneSide(result.confidence)))
     : t('{0}% interval {1}', percent, text);
+}
+
+function boundSentence(estimates: Estimates, percent: string, text: string, t: Say): string {
+  switch (estimates) {
+    case 'difference':
+      return t('{0}% bound: the difference is {1}', percent, text);
+    case 'ratio':
+      return t('{0}% bound: the ratio is {1}', percent, text);
+    case 'chance':
+      return t('{0}% bound: the chance is {1}', percent, text);
+  }
 }
 
 /** The two-sided interval that stands beside a bound or beside the interval of a margin question. */

@@ -39,7 +39,7 @@ const groupIndex = ({ groups }: Comparison, row: LeftOutRow): number =>
 function leftOutSentence(row: LeftOutRow, place: string, scale: Scale, t: Say): string {
   const unit = row.unit.map(([column, id]) => `${showLabel(column)} ${showLabel(id)}`);
   const where = [place, ...unit].join(', ');
-  const value = /\d/.test(row.value) ? scale.withUnit(visible(row.value)) : showLabel(row.value);
+  const value = /\d/.test(row.value) ? scale.valueWithUnit(visible(row.value)) : showLabel(row.value);
   return row.afterResult
     ? t('{0}, {1}: {2} (after the result was seen)', where, value, visible(row.reason))
     : t('{0}, {1}: {2} (before the result)', where, value, visible(row.reason));

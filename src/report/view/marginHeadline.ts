@@ -1,5 +1,6 @@
 import type { Comparison, Decision } from '../../core/model/comparison';
 import type { Say } from '../../core/model/say';
+import { alikeValue, estimateName, estimatesOf } from '../words/estimates';
 import { groupLabels } from '../words/groupLabels';
 import { subjectOf } from '../words/measuredName';
 import type { Scale } from '../words/scale';
@@ -20,8 +21,17 @@ export function marginHeadline(
   const margin = marginText(scale, low, high, t);
   const subject = subjectOf(comparison, t);
   const [test = '', reference = ''] = groupLabels(comparison);
-  const below = scale.typed(-low);
+  const below = marginBelow(comparison, scale);
   const above = scale.typed(high);
+  if (estimatesOf(comparison.chosen) === 'ratio') {
+    const name = estimateName(comparison, t);
+    if (decision === 'within margin')
+      return t('{0}: {1} lies within the margin of {2}', subject, name, margin);
+    if (decision === 'outside margin')
+      return t('{0}: {1} lies outside the margin of {2}', subject, name, margin);
+    if (decision === 'not shown within margin')
+      return t('Not shown for {0} that {1} lies within the margin of {2}', subject, name, margin);
+  }
   switch (decision) {
     case 'within margin':
       return t(
@@ -68,6 +78,12 @@ export function marginHeadline(
         above,
       );
   }
+}
+
+/** The lower bound of the margin as people say it: a size below 0, or a ratio. */
+export function marginBelow(comparison: Comparison, scale: Scale): string {
+  const [low] = comparison.settings.margin ?? [0, 0];
+  return scale.typed(alikeValue(comparison) === 0 ? -low : low);
 }
 
 /** "−5 to 5 MPa". */

@@ -1,6 +1,7 @@
 import { mattersPlace, type MattersPlace } from '../../compare/mattersPlace';
 import type { Comparison } from '../../core/model/comparison';
 import type { Say } from '../../core/model/say';
+import { estimatesOf } from '../words/estimates';
 import { groupLabels } from '../words/groupLabels';
 import type { Scale } from '../words/scale';
 
@@ -17,6 +18,7 @@ export interface MattersWords {
 export function mattersSentence(comparison: Comparison, scale: Scale, t: Say): MattersWords {
   const { settings, chosen } = comparison;
   const { matters, against, question, margin } = settings;
+  if (estimatesOf(chosen) !== 'difference') return { full: '', short: '' };
   if (matters === null)
     return margin !== null && question !== 'differs'
       ? { full: '', short: '' }

@@ -1,6 +1,7 @@
 import type { Comparison } from '../../core/model/comparison';
 import type { Say } from '../../core/model/say';
-import { differenceName, groupLabels } from '../words/groupLabels';
+import { estimateName } from '../words/estimates';
+import { groupLabels } from '../words/groupLabels';
 import { measuredName } from '../words/measuredName';
 import type { Scale } from '../words/scale';
 import { groupRows } from './groupRows';
@@ -19,7 +20,7 @@ export function numbersTable(comparison: Comparison, scale: Scale, t: Say): Numb
       measured === '' ? t('Numbers of each group') : t('Numbers of {0} by group', measuredName(comparison)),
     quantity: t('quantity'),
     inUnit: unit === null ? '' : t('in {0}', unit),
-    columns: hasDifference ? [...labels, differenceName(comparison)] : labels,
+    columns: hasDifference ? [...labels, estimateName(comparison, t)] : labels,
     rows: hasDifference ? rows : rows.map(withoutDifference).filter(hasCells),
     percent: percentSentence(comparison, t),
     more: moreNumbers(comparison, t),

@@ -2,7 +2,8 @@ import type { Comparison } from '../../core/model/comparison';
 import type { Say } from '../../core/model/say';
 import { printPercent, printThree, sayP } from '../numbersPrinted';
 import { shareWords } from '../words/count';
-import { differenceName, groupLabel } from '../words/groupLabels';
+import { estimateName } from '../words/estimates';
+import { groupLabel } from '../words/groupLabels';
 import { visible } from '../words/label';
 import { measuredName, subjectOf } from '../words/measuredName';
 import { assumptionPhrase } from '../words/methodWords';
@@ -67,7 +68,7 @@ function differenceSentence(comparison: Comparison, scale: Scale, t: Say): strin
     printPercent(result.confidence),
     scale.interval(result).text,
   );
-  const size = t('{0} = {1} ({2})', differenceName(comparison), scale.difference(estimate), interval);
+  const size = t('{0} = {1} ({2})', estimateName(comparison, t), scale.difference(estimate), interval);
   const statistic = statisticOf(comparison, t);
   const p = result.p === null ? null : sayP(result.p, settings.confidence);
   const held = p === null ? statistic : statistic === null ? p : `${p} (${statistic})`;

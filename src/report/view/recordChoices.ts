@@ -1,7 +1,7 @@
 import type { Comparison } from '../../core/model/comparison';
 import type { Say } from '../../core/model/say';
 import type { Layout, Relation, Settings } from '../../core/model/settings';
-import { differenceName } from '../words/groupLabels';
+import { estimateName } from '../words/estimates';
 import { showLabel, visible } from '../words/label';
 import { methodAssumes } from '../words/methodWords';
 import type { ViewContext } from './context';
@@ -17,7 +17,7 @@ export function designRows(comparison: Comparison, { t, provenance }: ViewContex
   return [
     ...layoutRows(settings.layout, t),
     [t('unit'), unit ?? t('not stated')],
-    [t('difference'), differenceName(comparison)],
+    [t('difference'), estimateName(comparison, t)],
     ...settings.same.map(
       ([from, to]) => [t('labels declared the same'), `${showLabel(from)} \u2192 ${showLabel(to)}`] as const,
     ),

@@ -1,5 +1,6 @@
 import type { Comparison } from '../../core/model/comparison';
 import type { Say } from '../../core/model/say';
+import { alikeValue } from '../words/estimates';
 import type { Scale } from '../words/scale';
 import type { RuleShown } from './figureShown';
 
@@ -9,6 +10,7 @@ import type { RuleShown } from './figureShown';
  */
 export function rulesOf(comparison: Comparison, scale: Scale, t: Say): readonly RuleShown[] {
   const { against, margin, question } = comparison.settings;
+  const alike = alikeValue(comparison);
   const bounds =
     margin === null
       ? []
@@ -18,8 +20,8 @@ export function rulesOf(comparison: Comparison, scale: Scale, t: Say): readonly 
           ? [margin[1]]
           : margin;
   return [
-    ...(against === 0 ? [] : [{ at: 0, label: '', kind: 'zero' as const }]),
-    { at: against, label: against === 0 ? '' : scale.typedNumber(against), kind: 'against' },
+    ...(against === alike ? [] : [{ at: alike, label: '', kind: 'zero' as const }]),
+    { at: against, label: against === alike ? '' : scale.typedNumber(against), kind: 'against' },
     ...mattersOf(comparison).map(at => ({
       at,
       label: t('{0} matters', scale.typedNumber(at)),

@@ -2,6 +2,7 @@ import type { Comparison, Row } from '../../core/model/comparison';
 import type { Say } from '../../core/model/say';
 import { printP, printSignificant } from '../numbersPrinted';
 import { decisionWords } from '../words/decisionWords';
+import { alikeValue } from '../words/estimates';
 import { groupLabel } from '../words/groupLabels';
 import type { Scale } from '../words/scale';
 import { rowTitle } from './rowTitle';
@@ -49,7 +50,7 @@ export const isSame = (row: Row, chosen: Row): boolean => row.id === chosen.id &
 
 function agreement(comparison: Comparison, rows: readonly Row[], scale: Scale, t: Say): string {
   const against = comparison.settings.against;
-  const zero = against === 0 ? t('zero') : scale.typed(against);
+  const zero = heldAgainst(comparison, scale, t);
   const withInterval = rows.filter(
     ({ result }) => result !== null && (result.lower !== null || result.upper !== null),
   );
@@ -80,6 +81,13 @@ function agreement(comparison: Comparison, rows: readonly Row[], scale: Scale, t
   return t('{0}: "{1}" in all {2} counted rows.', opening, word, rows.length);
 }
 
+/** What every interval is held against, in words. */
+function heldAgainst(comparison: Comparison, scale: Scale, t: Say): string {
+  const { against } = comparison.settings;
+  if (against === 0) return t('zero');
+  return against === alikeValue(comparison) ? scale.typedNumber(against) : scale.typed(against);
+}
+
 /** "in all 3 rows that have one", "in all 3 rows", "in both rows". */
 function howMany(withInterval: number, without: number, t: Say): string {
   if (withInterval === 1) return t('in the one row that has one');
@@ -101,7 +109,7 @@ const holds = ({ result }: Row, value: number): boolean =>
 
 function disagreement(comparison: Comparison, rows: readonly Row[], scale: Scale, t: Say): string {
   const { settings } = comparison;
-  const zero = settings.against === 0 ? t('zero') : scale.typed(settings.against);
+  const zero = heldAgainst(comparison, scale, t);
   const titles = (list: readonly Row[]): string => list.map(row => rowTitle(row, comparison, t)).join(', ');
   const advice = t(
     'Report the row chosen beforehand together with this sentence; choose from how the measurements were made, not from these rows.',

@@ -1,8 +1,9 @@
 import type { Comparison, Row } from '../../core/model/comparison';
 import type { Say } from '../../core/model/say';
 import { decisionWords } from '../words/decisionWords';
+import { onOneAxis } from '../words/estimates';
 import { methodAssumes, reasonWords, usuallyCounted } from '../words/methodWords';
-import type { Scale } from '../words/scale';
+import { intervalOfRow, type Scale } from '../words/scale';
 import { rulesOf } from './rules';
 import { putsBack, rowTitle } from './rowTitle';
 import type { RowShown, WhatIfShown } from './shown';
@@ -57,7 +58,7 @@ export function whatIfOf(comparison: Comparison, scale: Scale, t: Say): WhatIfSh
 function isBound(row: Row, chosen: Row): boolean {
   const estimate = row.result?.estimate ?? null;
   const same = estimate !== null && row.data === chosen.data && estimate === chosen.result?.estimate;
-  return same && row.applies && !usuallyCounted(row.id);
+  return same && row.applies && onOneAxis(row, chosen) && !usuallyCounted(row.id);
 }
 
 /** Counted on other data, but something speaks against it on these. */
@@ -67,7 +68,8 @@ function rowOf(row: Row, comparison: Comparison, scale: Scale, t: Say): RowShown
   const { chosen } = comparison;
   const isChosen = isSame(row, chosen);
   const { result } = row;
-  const hasInterval = result !== null && (result.lower !== null || result.upper !== null);
+  const hasInterval =
+    result !== null && (result.lower !== null || result.upper !== null) && onOneAxis(row, chosen);
   return {
     id: row.id,
     data: row.data,
@@ -75,7 +77,7 @@ function rowOf(row: Row, comparison: Comparison, scale: Scale, t: Say): RowShown
     chosen: isChosen,
     chosenWord: isChosen ? t('chosen') : '',
     counted: row.counted,
-    interval: scale.interval(result),
+    interval: intervalOfRow(row, comparison, scale, t),
     decision: row.decision === null || (!row.counted && !isChosen) ? '' : decisionWords(row.decision, t),
     note:
       reasonWords(row, t) ??

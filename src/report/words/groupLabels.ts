@@ -9,6 +9,3 @@ export const groupLabels = (comparison: Comparison): readonly string[] =>
 export function groupLabel(label: string, { settings, unit }: Pick<Comparison, 'settings' | 'unit'>): string {
   return settings.layout.kind === 'wide' ? withoutUnit(label, unit) : showLabel(label);
 }
-
-/** "slow cool − standard". */
-export const differenceName = (comparison: Comparison): string => groupLabels(comparison).join(' \u2212 ');

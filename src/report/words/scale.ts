@@ -1,7 +1,9 @@
-import type { Comparison } from '../../core/model/comparison';
+import { alikeOf } from '../../core/methods/alike';
+import type { Comparison, Row } from '../../core/model/comparison';
 import type { MethodResult } from '../../core/model/methods';
 import type { Say } from '../../core/model/say';
 import { boundsWords } from './boundsWords';
+import { estimatesOf, onOneAxis } from './estimates';
 import { clearOf, fullText, placeOf, printAt, withMinus } from '../numbersPrinted';
 import type { Printed } from '../view/shown';
 import { firstDigitExponent, movedPoint, roundedText, significantPlace } from './rounding';
@@ -16,7 +18,10 @@ export interface Scale {
   readonly mean: (mean: number, se: number | null) => Printed;
   /** A value as observed, such as a median or an extreme: as written where it stands in the file. */
   readonly observed: (value: number) => Printed;
+  /** An estimate or a limit of it, already printed, with its unit. */
   readonly withUnit: (text: string) => string;
+  /** A value of the measured column, as written, with its unit. */
+  readonly valueWithUnit: (text: string) => string;
   /** A difference with its unit: "22.6 MPa". */
   readonly difference: (value: number) => string;
   /** A number as it was typed, with the unit: "15 MPa". */
@@ -30,24 +35,59 @@ export interface Scale {
 const LIMITS_APART = 4;
 
 export function scaleOf(comparison: Comparison, t: Say): Scale {
+  const { chosen, groups } = comparison;
+  return { ...valueScale(comparison), ...estimateScale(comparison, chosen, decimalsOf(groups) + 1, t) };
+}
+
+/** The words for the interval of a row: those of the comparison, or of its own unit where it estimates something else. */
+export const intervalOfRow = (row: Row, comparison: Comparison, scale: Scale, t: Say): Printed =>
+  onOneAxis(row, comparison.chosen)
+    ? scale.interval(row.result)
+    : withOwnUnit(row, estimateScale(comparison, row, 2, t));
+
+function withOwnUnit({ result }: Row, { interval, withUnit }: EstimateScale): Printed {
+  const { text, full } = interval(result);
+  const hasOne = result !== null && (result.lower !== null || result.upper !== null);
+  return { text: hasOne ? withUnit(text) : text, full };
+}
+
+type ValueScale = Pick<Scale, 'mean' | 'observed' | 'valueWithUnit'>;
+type EstimateScale = Omit<Scale, keyof ValueScale>;
+
+/** How values of the measured column are printed: at the place of the difference of their means. */
+function valueScale(comparison: Comparison): ValueScale {
+  const { chosen, groups } = comparison;
+  const inUnits = estimatesOf(chosen) === 'difference';
+  const ses = groups.map(({ se }) => se ?? 0);
+  const place = inUnits
+    ? placeFor(chosen, value => value, specialValues(comparison), decimalsOf(groups) + 1)
+    : placeOf(Math.hypot(...ses), [], [], decimalsOf(groups) + 1);
+  return {
+    mean: (mean, se) => ({ text: printAt(mean, meanPlace(place, mean, se)), full: fullText(mean) }),
+    observed: value => ({
+      text: printAt(value, observedPlace(comparison, place, value)),
+      full: fullText(value),
+    }),
+    valueWithUnit: text => (comparison.unit === null ? text : `${text} ${comparison.unit}`),
+  };
+}
+
+function estimateScale(comparison: Comparison, row: Row, fallback: number, t: Say): EstimateScale {
   const shares = comparison.design === 'counts' || comparison.design === 'pairedCounts';
-  const power = shares ? 2 : 0;
+  const estimates = estimatesOf(row);
+  const power = shares && estimates === 'difference' ? 2 : 0;
   const moved = (value: number): number => (power === 0 ? value : movedPoint(value, power));
-  const special = specialValues(comparison).map(moved);
-  const place = placeFor(comparison, moved, special);
-  const unit = shares ? t('percentage points') : (comparison.unit ?? '');
+  const special = [alikeOf({ estimates }), ...specialValues(comparison)].map(moved);
+  const place = placeFor(row, moved, special, fallback);
+  const unit = estimates !== 'difference' ? '' : shares ? t('percentage points') : (comparison.unit ?? '');
 
   const number = (value: number): Printed => ({ text: printAt(moved(value), place), full: fullText(value) });
-  const withUnit = (text: string): string => (unit === '' ? text : `${text} ${unit}`);
+  const withUnit = (text: string): string =>
+    estimates === 'ratio' ? t('{0} times', text) : unit === '' ? text : `${text} ${unit}`;
   const typedNumber = (value: number): string => withMinus(String(moved(value)));
   return {
     unit,
     number,
-    mean: (mean, se) => ({ text: printAt(mean, meanPlace(place, mean, se)), full: fullText(mean) }),
-    observed: value => ({
-      text: printAt(moved(value), observedPlace(comparison, place, value)),
-      full: fullText(value),
-    }),
     withUnit,
     difference: value => withUnit(number(value).text),
     typed: value => withUnit(typedNumber(value)),
@@ -78,17 +118,18 @@ function specialValues({ settings }: Pick<Comparison, 'settings'>): readonly num
   return [0, against, ...(matters === null ? [] : [matters, -matters]), ...(margin ?? [])];
 }
 
+/** A ratio has the place of its limits' distance, as it has no standard error in its own unit. */
 function placeFor(
-  { chosen, groups }: Comparison,
+  { id, result }: Row,
   moved: (value: number) => number,
   special: readonly number[],
+  fallback: number,
 ): number {
-  const result = chosen.result;
   const { lower, upper } = result ?? { lower: null, upper: null };
   const limits = [lower, upper].map(limit => (limit === null ? null : moved(limit)));
   const length = lower === null || upper === null ? null : (upper - lower) / LIMITS_APART;
-  const se = result?.se ?? length;
-  return placeOf(se === null ? null : moved(se), limits, special, decimalsOf(groups) + 1);
+  const se = estimatesOf({ id }) === 'ratio' ? length : (result?.se ?? length);
+  return placeOf(se === null ? null : moved(se), limits, special, fallback);
 }
 
 function meanPlace(place: number, mean: number, se: number | null): number {

@@ -20,6 +20,7 @@ const REASONS: readonly Reason[] = [
   { code: 'pairs-given', facts: {} },
   { code: 'not-this-design', facts: {} },
   { code: 'question-not-for-method', facts: {} },
+  { code: 'other-unit', facts: {} },
   { code: 'ruled-out', facts: {} },
   { code: 'too-much-work', facts: {} },
   { code: 'variant-refused', facts: { problem: 'pairs-none' } },
