@@ -186,7 +186,7 @@ describe('what is asked for is checked', () => {
   ] as const)('%s of standard input or of a pipe says that a file is needed', async (command, asked) => {
     await using temp = await folderWith({});
     const pipe = path.join(temp.folder, 'pipe');
-    execFileSync('mkfifo', [pipe]);
+    execFileSync('/usr/bin/mkfifo', [pipe]);
     for (const name of ['-', 'pipe', '/dev/null']) {
       const { code, out, err } = await weighbeam(temp.folder, command, name, ...asked);
       expect([code, out]).toEqual([2, '']);
