@@ -15,7 +15,7 @@ import { valueGroups } from './valueGroups';
 /** The data of one comparison, ready for the methods. */
 export interface Prepared {
   readonly selection: Selection | null;
-  readonly design: 'two' | 'pairs' | 'counts';
+  readonly design: 'two' | 'pairs' | 'several' | 'counts';
   readonly designs: DesignData;
   readonly groups: readonly Group[];
   /** For shares: the counts behind the groups. */
@@ -25,13 +25,14 @@ export interface Prepared {
 
 /** Takes the values that `settings` names and puts them into the designs that methods work on. Throws Refusal. */
 export function prepare(table: Table | null, settings: Settings, tick: Ticker): Prepared {
-  if (table === null) return fromSummaries(typedSummaries(settings), null);
+  if (table === null) return fromSummaries(typedSummaries(settings), settings, null);
   const selection = selectRows(table, settings, tick);
   if (settings.layout.kind === 'summary')
-    return fromSummaries(summaryRows(table, selection, settings), selection);
+    return fromSummaries(summaryRows(table, selection, settings), settings, selection);
   if (settings.measure === 'proportion') return fromOutcomes(table, selection, settings);
   const groups = valueGroups(selection, settings);
   refuseEmpty(groups);
+  if (settings.test === null) return ofSeveral(groups, settings, selection);
   const [test, reference] = groups;
   if (test === undefined || reference === undefined)
     throw new Refusal('groups-too-few', { labels: selection.groups });
@@ -67,10 +68,17 @@ function fromOutcomes(table: Table, selection: Selection, settings: Settings): P
   );
 }
 
-function fromSummaries(summaries: readonly (Summary | Count)[], selection: Selection | null): Prepared {
+function fromSummaries(
+  summaries: readonly (Summary | Count)[],
+  settings: Settings,
+  selection: Selection | null,
+): Prepared {
   const counts = summaries.filter(summary => 'x' in summary);
   if (counts.length === summaries.length) return ofCounts(counts, counts.map(groupOfCount), selection);
-  const [test, reference] = summaries.filter(summary => 'mean' in summary).map(groupOfSummary);
+  const summarised = summaries.filter(summary => 'mean' in summary).map(groupOfSummary);
+  if (settings.test === null && summarised.length === summaries.length)
+    return ofSeveral(summarised, settings, selection);
+  const [test, reference] = summarised;
   if (test === undefined || reference === undefined) throw new Refusal('summary-invalid', { what: 'mixed' });
   const groups = [test, reference];
   return {
@@ -81,6 +89,12 @@ function fromSummaries(summaries: readonly (Summary | Count)[], selection: Selec
     counts: null,
     pairs: null,
   };
+}
+
+function ofSeveral(groups: readonly Group[], { reference }: Settings, selection: Selection | null): Prepared {
+  const at = groups.findIndex(({ label }) => label === reference);
+  const several = { groups, reference: at < 0 ? null : at };
+  return { selection, design: 'several', designs: { several }, groups, counts: null, pairs: null };
 }
 
 function ofCounts(counts: readonly Count[], groups: readonly Group[], selection: Selection | null): Prepared {
@@ -96,10 +110,11 @@ function ofCounts(counts: readonly Count[], groups: readonly Group[], selection:
   };
 }
 
-/** The typed groups named as test and reference, in that order. */
+/** The typed groups named as test and reference, in that order, or all of them. */
 function typedSummaries({ layout, test, reference }: Settings): readonly (Summary | Count)[] {
   if (layout.kind !== 'typed') throw new RangeError('only typed numbers can do without a table');
-  return [test, reference].map(label => {
+  const labels = test === null ? layout.groups.map(({ label }) => label) : [test, reference];
+  return labels.map(label => {
     const group = layout.groups.find(typed => typed.label === label);
     if (group === undefined)
       throw new Refusal('label-unknown', { label, labels: layout.groups.map(own => own.label) });

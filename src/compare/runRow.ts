@@ -1,4 +1,4 @@
-import type { Row } from '../core/model/comparison';
+import type { Decision, Row } from '../core/model/comparison';
 import type { Designs } from '../core/model/groups';
 import type { Ask, MethodDescriptor } from '../core/model/methods';
 import type { Ticker } from '../core/model/problem';
@@ -59,9 +59,12 @@ export function runRow(method: MethodDescriptor, designs: DesignData, asked: Row
     applies: true,
     counted,
     reason,
-    decision: decide(ask.question, result, ask),
+    decision: decided(method, decide(ask.question, result, ask)),
   };
 }
+
+const decided = ({ design }: MethodDescriptor, decision: Decision): Decision =>
+  design === 'several' && decision === 'differs' ? 'some differ' : decision;
 
 function whyNot(
   method: MethodDescriptor,

@@ -2,6 +2,7 @@ import { Cell, type LabelColumn, type Table } from '../core/model/cells';
 import { Refusal, type CellRef, type Ticker } from '../core/model/problem';
 import type { Settings } from '../core/model/settings';
 import { groupingOf } from './grouping';
+import { labelCounts } from './labelCounts';
 import { cellState, measuredValues, type Measured } from './measuredValues';
 import { rolesOf, type Roles } from './roles';
 import { rowFilter } from './rowFilter';
@@ -14,7 +15,7 @@ export const Entry = { Used: 0, Missing: 1, LeftOut: 2, NoId: 3 } as const;
  * selection makes the groups and the digest of the cells used.
  */
 export interface Selection {
-  /** Labels after merging: the test group, then the reference group. */
+  /** Labels after merging: the test group, then the reference group; several groups in order of first appearance. */
   readonly groups: readonly string[];
   /** The measured column of each group. */
   readonly measured: readonly Measured[];
@@ -43,7 +44,7 @@ export function selectRows(table: Table, settings: Settings, tick: Ticker = noTi
   const grouping = groupingOf(table, settings, roles);
   const taken = rowFilter(table, settings, roles);
   const leftOut = leftOutRows(table, settings);
-  const groups = [settings.test, settings.reference].filter(label => label !== null);
+  const groups = groupsCompared(table, settings);
   const groupOfLabel = Int32Array.from(grouping.labels, label => groups.indexOf(label));
   const measuredAt = measuredFields(roles).map(field => measuredValues(table, settings, field));
   const ids = roles.ids.map(field => table.labels(field));
@@ -124,6 +125,11 @@ function entryOf(measured: Measured | undefined, ids: readonly LabelColumn[], ro
   if (measured === undefined || cellState(measured, row) === Cell.Missing) return Entry.Missing;
   return ids.some(id => (id.codes[row] ?? 0) === 0) ? Entry.NoId : Entry.Used;
 }
+
+const groupsCompared = (table: Table, settings: Settings): readonly string[] =>
+  settings.test === null || settings.reference === null
+    ? labelCounts(table, settings).map(({ label }) => label)
+    : [settings.test, settings.reference];
 
 function leftOutRows(table: Table, settings: Settings): ReadonlySet<number> {
   return new Set(

@@ -10,7 +10,8 @@ import { layoutAsked, relationAsked } from './layoutAsked';
 import { measureAsked } from './measureAsked';
 import { checkMargin, checkMethod, checkShares, checkSigma } from './methodChecks';
 import type { Request } from './request';
-import { sidesOf } from './sides';
+import { severalAsked } from './severalAsked';
+import { sidesOf, sidesOfSeveral } from './sides';
 import { plainSuccess } from './successAsked';
 import { methodAsked } from './varianceAssumption';
 
@@ -39,13 +40,6 @@ export function settle(
   const confidence = confidenceAsked(request.confidence);
   const question = request.question ?? 'differs';
   const measure = measureAsked(request, fields, list);
-  const { method, curve } = methodAsked(request, measure);
-  const chosen = { method, measure, question, relation, layout };
-  const alike = alikeOf(checkMethod(chosen, list));
-  checkMargin(question, request.margin, confidence, alike);
-  checkSigma(chosen, request.sigma);
-  checkNumbers(request, alike);
-  checkShares(measure, request);
   const grouped = {
     files: request.files,
     layout,
@@ -54,12 +48,21 @@ export function settle(
     rows: request.rows ?? 'all',
     where: request.where ?? [],
   } as const;
-  const sides = sidesOf(
-    presentLabels(table, grouped),
-    request.test,
-    request.reference,
-    layout.kind === 'long' || layout.kind === 'summary' ? layout.label : '',
-  );
+  const present = presentLabels(table, grouped);
+  const { method: usual, curve } = methodAsked(request, measure);
+  const several = curve === null ? severalAsked(request, usual, relation, present, list) : null;
+  const method = several ?? usual;
+  const chosen = { method, measure, question, relation, layout };
+  const alike = alikeOf(checkMethod(chosen, list));
+  checkMargin(question, request.margin, confidence, alike);
+  checkSigma(chosen, request.sigma);
+  checkNumbers(request, alike);
+  checkShares(measure, request);
+  const column = layout.kind === 'long' || layout.kind === 'summary' ? layout.label : '';
+  const sides =
+    several === null
+      ? sidesOf(present, request.test, request.reference, column)
+      : sidesOfSeveral(present, request.reference, column);
   const settings: Settings = {
     ...grouped,
     ...sides,

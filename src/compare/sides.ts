@@ -18,11 +18,8 @@ export function sidesOf(
   column: string,
 ): Sides {
   const labels = present.map(({ label }) => label);
-  const facts = { column, labels, counts: present.map(({ count }) => count) };
-  for (const named of [test, reference]) {
-    if (named !== undefined && !labels.includes(named))
-      throw new Refusal('label-unknown', { label: named, ...facts });
-  }
+  const facts = factsOf(present, column);
+  refuseUnknown([test, reference], labels, facts);
   if (test !== undefined && test === reference) throw new Refusal('groups-too-few', facts);
   if (test !== undefined && reference !== undefined) return { test, reference };
   const [first, second] = labels;
@@ -31,4 +28,43 @@ export function sidesOf(
   const other = (named: string): string => (named === first ? second : first);
   if (test !== undefined) return { test, reference: other(test) };
   return reference === undefined ? { test: first, reference: second } : { test: other(reference), reference };
+}
+
+/**
+ * Several groups: all of them, none of which is the test group; against the reference where one is named. Refuses a label
+ * that is not there ('label-unknown') and fewer than two labels ('groups-too-few').
+ */
+export function sidesOfSeveral(
+  present: readonly LabelCount[],
+  reference: string | undefined,
+  column: string,
+): { readonly test: null; readonly reference: string | null } {
+  const labels = present.map(({ label }) => label);
+  const facts = factsOf(present, column);
+  refuseUnknown([reference], labels, facts);
+  if (labels.length < 2) throw new Refusal('groups-too-few', facts);
+  return { test: null, reference: reference ?? null };
+}
+
+type LabelFacts = {
+  readonly column: string;
+  readonly labels: readonly string[];
+  readonly counts: readonly number[];
+};
+
+const factsOf = (present: readonly LabelCount[], column: string): LabelFacts => ({
+  column,
+  labels: present.map(({ label }) => label),
+  counts: present.map(({ count }) => count),
+});
+
+function refuseUnknown(
+  named: readonly (string | undefined)[],
+  labels: readonly string[],
+  facts: LabelFacts,
+): void {
+  for (const label of named) {
+    if (label !== undefined && !labels.includes(label))
+      throw new Refusal('label-unknown', { label, ...facts });
+  }
 }
