@@ -27,7 +27,7 @@ export function checkMethod(chosen: Chosen, list: readonly MethodDescriptor[]): 
   }
   if (forPairs && relation.kind !== 'pairs')
     throw new Refusal('method-not-for-this', { method, needs: 'pair' });
-  if (relation.kind === 'pairs' && descriptor.design === 'counts') {
+  if (relation.kind === 'pairs' && (descriptor.design === 'counts' || descriptor.design === 'several')) {
     throw new Refusal('method-not-for-this', { method, pair: relation.column });
   }
   if (!descriptor.questions.includes(question)) {
