@@ -1,55 +1,29 @@
 import { alikeLabels } from '../core/evidence/alikeLabels';
-import { footerFindings, footerRow } from '../core/evidence/footerRow';
+import { footerFindings } from '../core/evidence/footerRow';
+import { passedOver } from '../core/evidence/passedOver';
+import { longRows, shortRows } from '../core/evidence/raggedRows';
+import { takenOtherwise } from '../core/evidence/readOtherwise';
+import { groupedNumbers } from '../core/evidence/thousandsMarks';
+import type { Finding } from '../core/model/comparison';
 import type { Say } from '../core/model/say';
 import { parseDecimal } from '../core/numeric/decimal';
 import { fieldName } from '../readers/findField';
 import type { Survey } from '../readers/survey';
+import { findingSentence } from '../report/view/findings';
 import { quoted } from '../report/words/label';
 
 /** Something about a file that a person should look at before comparing anything. */
 export interface InspectionFinding {
   readonly id: string;
-  readonly level: 'ask' | 'warn' | 'note';
+  readonly level: Finding['level'];
   readonly sentence: string;
   /** The first 20 lines it is about; empty where it is about a column. */
   readonly lines: readonly number[];
 }
 
 const NAMED = 10;
-const LINES = 20;
 
 type Column = Survey['columns'][number];
-
-/** What was met while reading, in words: one sentence a kind, `count` of them. */
-const metWords: Readonly<Record<string, (count: number, text: string, t: Say) => string>> = {
-  'blank-line': (count, _, t) => t('blank lines: {0}, passed over.', count),
-  'ragged-short': (count, _, t) =>
-    t('rows with fewer cells than columns: {0}; the cells that are not there count as missing.', count),
-  'ragged-long': (count, _, t) =>
-    t('rows with more cells than columns: {0}; the cells beyond the last column are not used.', count),
-  'quote-inside': (count, _, t) =>
-    t('rows with a quotation mark inside a cell: {0}, taken as part of the text.', count),
-  'encoding-fallback': (_, encoding, t) =>
-    t('The bytes are not UTF-8 from here on: read as {0}. If letters look wrong, say --encoding.', encoding),
-};
-
-function metFindings({ reading }: Survey, t: Say): readonly InspectionFinding[] {
-  return Object.entries(metWords).flatMap(([what, words]) => {
-    const met = reading.met.filter(one => one.what === what);
-    const [first] = met;
-    if (first === undefined) return [];
-    const count = reading.metCounts[what] ?? met.length;
-    const level = what === 'blank-line' ? 'note' : 'warn';
-    return [
-      {
-        id: what,
-        level,
-        sentence: words(count, first.text, t),
-        lines: met.slice(0, LINES).map(({ at }) => at.line),
-      },
-    ];
-  });
-}
 
 const listed = (texts: readonly { readonly label: string; readonly count: number }[]): string =>
   texts
@@ -120,17 +94,31 @@ function columnFindings(
 
 /** What a file shows before anything is compared: rows passed over, text among numbers, limits, spellings of a label. */
 export function inspectionFindings(survey: Survey, t: Say): readonly InspectionFinding[] {
-  const footers = footerFindings(survey.reading, 0, survey.fields).map(finding => ({
-    id: finding.id,
-    level: 'warn' as const,
-    sentence: footerRow.say(finding, t),
-    lines: finding.cells.map(({ line }) => line),
-  }));
+  const { reading, fields } = survey;
+  const told = [
+    ...footerFindings(reading, 0, fields),
+    ...longRows(reading, passedOver(reading, 'ragged-long')),
+    ...shortRows(passedOver(reading, 'ragged-short')),
+    ...takenOtherwise(reading),
+    ...groupedNumbers(reading),
+  ];
   return [
-    ...survey.columns.flatMap(column =>
-      columnFindings(column, fieldName(survey.fields, column.field), survey, t),
-    ),
-    ...footers,
-    ...metFindings(survey, t),
+    ...survey.columns.flatMap(column => columnFindings(column, fieldName(fields, column.field), survey, t)),
+    ...told.map(finding => ({
+      id: finding.id,
+      level: finding.level,
+      sentence: findingSentence(finding, t),
+      lines: finding.cells.map(({ line }) => line),
+    })),
+    ...blankLines(survey, t),
+  ];
+}
+
+function blankLines({ reading }: Survey, t: Say): readonly InspectionFinding[] {
+  const met = passedOver(reading, 'blank-line');
+  if (met === null) return [];
+  const lines = met.met.map(({ at }) => at.line);
+  return [
+    { id: 'blank-line', level: 'note', sentence: t('blank lines: {0}, passed over.', met.count), lines },
   ];
 }

@@ -50,9 +50,9 @@ describe('inspect', () => {
     const { findings } = await json('site,mass,note\nN,1.2,a\nN,about 1,b\n\nS,2.1\nS,2.2,c,d\nS,2.3,e\n');
     expect(findings.map(({ id, lines }) => [id, lines])).toEqual([
       ['text-in-measured', []],
+      ['ragged-rows', [6]],
+      ['ragged-rows', [5]],
       ['blank-line', [4]],
-      ['ragged-short', [5]],
-      ['ragged-long', [6]],
     ]);
     expect(findings[0]?.sentence).toContain('“about 1” (1)');
   });
@@ -61,7 +61,8 @@ describe('inspect', () => {
     const latin = Buffer.from('site,mass\nKöln,1\nB,2\nB,3\n', 'latin1');
     const { reading, findings } = await json(latin);
     expect(reading['encoding']).toBe('windows-1252');
-    expect(findings.map(({ id }) => id)).toContain('encoding-fallback');
+    expect(findings.map(({ id }) => id)).toContain('read-otherwise');
+    expect(findings[0]?.sentence).toContain('read as windows-1252');
   });
 
   it('reads as it is told', async () => {

@@ -3,14 +3,20 @@ import { brownForsythe } from './brownForsythe';
 import { constant } from './constant';
 import { footerRow } from './footerRow';
 import { labelVariants } from './labelVariants';
+import { raggedRows } from './raggedRows';
+import { readOtherwise } from './readOtherwise';
 import { sharedUnit } from './sharedUnit';
+import { thousandsMarks } from './thousandsMarks';
 import { varianceRatio } from './varianceRatio';
 
 /** Every check of what the file shows, in the order in which findings of one level are printed. */
 export const evidenceChecks = [
   labelVariants,
   sharedUnit,
+  raggedRows,
   footerRow,
+  readOtherwise,
+  thousandsMarks,
   constant,
   varianceRatio,
   brownForsythe,

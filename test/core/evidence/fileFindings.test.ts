@@ -84,3 +84,63 @@ describe('a totals row at the foot', () => {
     expect(saidOf(found)).toBe('Line 9 reads "Mean" under tile: taken as a totals row, not as data.');
   });
 });
+
+describe('rows that have not as many cells as there are columns', () => {
+  const plain = 'site,mass\nnorth,1.5\nnorth,1.6\nnorth,1.4\nsouth,2.5\nsouth,2.4\nsouth,2\n';
+  const about = async (text: string, request: Partial<Request> = {}) =>
+    (await findings(text, request)).filter(({ id }) => id === 'ragged-rows');
+
+  it('are asked about where a decimal comma could have split a number, until they are left out', async () => {
+    const text = plain.replace('south,2\n', 'south,2,7\n');
+    const [found] = await about(text);
+    expect(found).toMatchObject({
+      level: 'ask',
+      facts: { what: 'split', text: 'south,2,7', count: 1 },
+      cells: [{ file: 0, line: 7 }],
+    });
+    expect(saidOf(found)).toContain('"south,2,7"');
+    const leaveOut = [{ file: 0, line: 7, reason: 'two numbers', afterResult: false }];
+    expect(await about(text, { leaveOut })).toEqual([]);
+  });
+
+  it('are a warning where the cells too many are no part of a number, or too few', async () => {
+    const [long] = await about(plain.replace('south,2\n', 'south,2,wet\n'));
+    expect(long).toMatchObject({ level: 'warn', facts: { what: 'long', count: 1 } });
+    const [short] = await about(
+      plain
+        .replace('site,mass', 'site,mass,note')
+        .replaceAll(/(\d)\n/g, '$1,x\n')
+        .replace('2.4,x', '2.4'),
+    );
+    expect(short).toMatchObject({ level: 'warn', facts: { what: 'short', count: 1 }, cells: [{ line: 6 }] });
+    expect(saidOf(short)).toMatch(/^1 row has fewer cells/);
+  });
+
+  it('are no matter where only empty cells are too many', async () => {
+    expect(await about(plain.replace('south,2\n', 'south,2,,\n'))).toEqual([]);
+  });
+});
+
+describe('cells and lines that are read otherwise than they look', () => {
+  const of = async (id: string, text: string, request: Partial<Request> = {}) =>
+    (await findings(text, request)).filter(own => own.id === id);
+  const many = 'site;mass\nnorth;1.234,5\nnorth;1.236,0\nsouth;1.301,5\nsouth;1.299,0\n';
+
+  it('have their thousands marks taken off with a note', async () => {
+    const [found] = await of('thousands-marks', many);
+    expect(found).toMatchObject({ level: 'note', count: 4 });
+    expect(saidOf(found)).toContain('"1.234,5"');
+    expect(await of('thousands-marks', many.replaceAll('1.', '1'))).toEqual([]);
+  });
+
+  it('are named: quotation marks inside a cell, comment lines', async () => {
+    const text = 'site,mass\nnorth,1.5\n# scale changed\n"nor"th",1.6\nnorth,1.7\nsouth,2.5\nsouth,2.6\n';
+    const found = await of('read-otherwise', text, { test: 'north', reference: 'south' });
+    expect(found.map(({ level, facts }) => [level, facts['what']])).toEqual([
+      ['warn', 'quote-inside'],
+      ['note', 'comment-line'],
+    ]);
+    expect(saidOf(found[1])).toBe('1 comment line was passed over: "# scale changed".');
+    expect(await of('read-otherwise', 'site,mass\nnorth,1.5\nnorth,1.6\nsouth,2.5\nsouth,2.6\n')).toEqual([]);
+  });
+});
