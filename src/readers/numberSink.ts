@@ -13,6 +13,8 @@ export interface CellOrigin {
   readonly format: CellFormat;
   readonly met: Met;
   readonly field: number;
+  /** Whether a row is kept as it stands because a person named it: what it holds is no reason to refuse the file. */
+  readonly isKept: (line: number) => boolean;
 }
 
 /** Gathers a column of numbers. */
@@ -58,13 +60,16 @@ export class NumberSink implements CellSink {
     this.rows++;
   }
 
-  /** @throws Refusal number-unusable for a number that no double can hold */
+  /** @throws Refusal number-unusable for a number that no double can hold, but in a row that is kept */
   private takeText(text: string, line: number): void {
     if (this.origin === null) throw new RangeError('cells without an origin');
-    const { format, met, field } = this.origin;
-    const { kind, value, thousands, unclear } = readCellText(text, format);
+    const { format, met, field, isKept } = this.origin;
+    const read = readCellText(text, format);
+    const { value, thousands, unclear } = read;
     const at: CellRef = { file: met.file, line, field };
-    if (kind === UNUSABLE) throw new Refusal('number-unusable', { text: text.trim() }, at);
+    if (read.kind === UNUSABLE && !isKept(line))
+      throw new Refusal('number-unusable', { text: text.trim() }, at);
+    const kind = read.kind === UNUSABLE ? Cell.Text : read.kind;
     if (value === null || kind === Cell.Text) this.builder.addNothing();
     else this.builder.addInteger(value.digits, value.decimals);
     if (kind !== Cell.Value) this.setState(kind);

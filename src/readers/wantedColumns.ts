@@ -16,12 +16,19 @@ export interface BuiltColumns {
 export class WantedColumns {
   private readonly numbers: ReadonlyMap<number, NumberSink>;
   private readonly labels: ReadonlyMap<number, LabelSink>;
+  private readonly isKept: (line: number) => boolean;
 
   constructor(
     private readonly fields: readonly Field[],
-    wanted: { readonly numbers: readonly number[]; readonly labels: readonly number[] },
+    wanted: {
+      readonly numbers: readonly number[];
+      readonly labels: readonly number[];
+      readonly keepLines?: ReadonlySet<number> | 'all';
+    },
     expectedRows: number,
   ) {
+    const kept = wanted.keepLines ?? new Set<number>();
+    this.isKept = line => kept === 'all' || kept.has(line);
     this.numbers = new Map(wanted.numbers.map(field => [field, new NumberSink(expectedRows)]));
     this.labels = new Map(wanted.labels.map(field => [field, new LabelSink(expectedRows)]));
   }
@@ -34,7 +41,7 @@ export class WantedColumns {
     const sinks: (CellSink | null)[] = fields.map(() => null);
     for (const [field, sink] of this.numbers) {
       const place = this.placeOf(field, fields, met.file);
-      sink.from({ format, met, field: place });
+      sink.from({ format, met, field: place, isKept: this.isKept });
       sinks[place] = sink;
     }
     for (const [field, sink] of this.labels) {

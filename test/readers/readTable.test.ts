@@ -108,6 +108,14 @@ describe('two files', () => {
     const refusal = await refusalOf(readTable(files, heads, { numbers: [1], labels: [] }));
     expect([refusal?.code, refusal?.where]).toEqual(['number-unusable', { file: 1, line: 2, field: 1 }]);
   });
+
+  it('do not refuse a file for a number in a row that a person named to leave it out', async () => {
+    const files = [source('a,b\n1,2\n2,1e400\n3,4\n5,6\n', 'one.csv')];
+    const heads = await headsOf(files);
+    const wanted = { numbers: [1], labels: [], keepLines: new Set([3]) };
+    const table = await readTable(files, heads, wanted);
+    expect(table.numbers(1).texts).toEqual([{ row: 1, text: '1e400' }]);
+  });
 });
 
 describe('an encoding that shows only far down', () => {

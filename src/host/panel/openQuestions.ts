@@ -57,7 +57,7 @@ export function questionLabel({ problem, open }: Shown): string | null {
 export async function answerQuestion(services: Services, comparison: Comparison): Promise<void> {
   const { shown } = comparison;
   if (shown === null) return;
-  if (shown.problem === null) return answerFinding(services, comparison, shown.open);
+  if (shown.problem === null) return answerFinding(services, comparison, shown);
   const { code, at } = shown.problem;
   switch (answers[code]) {
     case 'below':
@@ -84,9 +84,15 @@ export async function answerQuestion(services: Services, comparison: Comparison)
 async function answerFinding(
   services: Services,
   comparison: Comparison,
-  open: readonly string[],
+  { open, view }: Shown,
 ): Promise<void> {
   const [id] = open;
+  if (id === 'ragged-rows') {
+    const at = view?.findings.open.find(finding => finding.id === id)?.cells[0]?.at;
+    if (at === undefined) return;
+    await showAt(services, comparison, at);
+    return offerToLeaveOut(comparison, at);
+  }
   const patch =
     id === undefined ? null : await askStep(services, comparison, comparison.request, steps[id] ?? 'units');
   if (patch === null || Object.keys(patch).length === 0) return;
