@@ -1,4 +1,16 @@
-import { FileSystemError, l10n, Position, Uri, ViewColumn, window, workspace, WorkspaceEdit } from 'vscode';
+import {
+  FileSystemError,
+  l10n,
+  Position,
+  Range,
+  Selection,
+  TextEditorRevealType,
+  Uri,
+  ViewColumn,
+  window,
+  workspace,
+  WorkspaceEdit,
+} from 'vscode';
 import { lastPart } from '../files/root';
 import type { Host } from '../host';
 import { blockToHandOut, statedBy } from './blockToHandOut';
@@ -27,7 +39,12 @@ export const addToNotebook = (host: Host): Command => ({
     if (!(await workspace.applyEdit(edit)))
       throw new Error(l10n.t('the editor did not let {0} be changed', lastPart(notebook)));
     const editor = await window.showTextDocument(document, { viewColumn: ViewColumn.One, preview: false });
-    editor.revealRange(document.lineAt(document.lineCount - 1).range);
+    const added = new Position(end.line + (gap.split('\n').length - 1), 0);
+    editor.selection = new Selection(added, added);
+    editor.revealRange(new Range(added, added), TextEditorRevealType.AtTop);
+    void window.showInformationMessage(
+      l10n.t('The answer and its settings block stand at the end of {0}, not saved yet.', lastPart(notebook)),
+    );
   },
 });
 

@@ -212,8 +212,8 @@ function toolsFor({ canUndo, canRedo, shown }: Comparison): readonly Tool[] {
   const question = shown === null ? null : questionLabel(shown);
   const possible: readonly (readonly [boolean, Tool])[] = [
     [question !== null, { id: 'answer', label: question ?? '' }],
-    [canUndo, { id: 'undo', label: l10n.t('Undo') }],
-    [canRedo, { id: 'redo', label: l10n.t('Redo') }],
+    [canUndo, { id: 'undo', label: l10n.t('Undo the last change') }],
+    [canRedo, { id: 'redo', label: l10n.t('Redo it') }],
     [shown !== null && shown.blockText !== null, { id: 'addToNotebook', label: l10n.t('Add to notebook…') }],
   ];
   return possible.flatMap(([isPossible, tool]) => (isPossible ? [tool] : []));

@@ -109,6 +109,12 @@ function unsetBy(key: ChangeKey, patch: Partial<Request>): readonly (keyof Reque
   return [];
 }
 
+/** The unit of the difference that is shown; null where it has none. */
+function unitOf({ shown }: Comparison): string | null {
+  const unit = shown?.view?.figure?.difference?.unit ?? '';
+  return unit === '' ? null : unit;
+}
+
 async function askPatch(
   services: Services,
   comparison: Comparison,
@@ -120,7 +126,7 @@ async function askPatch(
     return confidence === null ? null : { confidence };
   }
   if (key === 'matters') {
-    const matters = await askMatters(request.matters ?? null, null);
+    const matters = await askMatters(request.matters ?? null, unitOf(comparison));
     if (matters === null) return null;
     return matters === 'none' ? {} : { matters };
   }

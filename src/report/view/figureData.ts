@@ -129,15 +129,31 @@ function axisLabel(comparison: Comparison, t: Say): string {
 
 function captionOf(comparison: Comparison, crowded: boolean, t: Say): string {
   const { groups, settings, design } = comparison;
-  const bar = t('The bar right shows the difference, not either group.');
-  if (holdsShares(groups)) return bar;
-  if (crowded)
-    return `${t('Shaded: how many values lie where; every value outside the middle 99% is a point.')} ${bar}`;
-  if (design === 'pairs') return `${t('Each line joins the two values of a pair.')} ${bar}`;
-  if (settings.relation.kind === 'units' && groups.some(group => group.units !== null)) {
-    const { many } = columnNoun(settings.relation.columns.at(-1) ?? '', t);
-    return `${t('Large marks are {0}, small ones their readings.', many)} ${bar}`;
+  const hasDifference = (comparison.chosen.result?.estimate ?? null) !== null;
+  const bar = hasDifference
+    ? t('The bar on an axis of its own shows the difference, not either group.')
+    : null;
+  const open = groups.some(group => hasFar(group))
+    ? t('Hollow marks lie far from the middle half of their group.')
+    : null;
+  const lines = [marksSentence(), crowded ? null : open, bar];
+  return lines.filter(line => line !== null).join(' ');
+
+  function marksSentence(): string | null {
+    if (holdsShares(groups)) return null;
+    if (crowded)
+      return t('Shaded: how many values lie where; every value outside the middle 99% is a point.');
+    if (design === 'pairs') return t('Each line joins the two values of a pair.');
+    if (settings.relation.kind === 'units' && groups.some(group => group.units !== null)) {
+      const { many } = columnNoun(settings.relation.columns.at(-1) ?? '', t);
+      return t('Large marks are {0}, small ones their readings.', many);
+    }
+    return groups.every(group => group.sample === null) ? t('Only means and SDs were given.') : null;
   }
-  if (groups.every(group => group.sample === null)) return `${t('Only means and SDs were given.')} ${bar}`;
-  return bar;
 }
+
+/** Whether any value drawn for the group lies outside its fences. */
+const hasFar = (group: Group): boolean =>
+  [group.sample, group.readingSample].some(
+    sample => sample !== null && sample.values().some(value => isFar(value, group)),
+  );

@@ -13,7 +13,8 @@ import type { ViewContext } from './context';
 import { designSentence } from './designSentence';
 import { headline } from './headline';
 import { leftOutOf } from './leftOut';
-import { statedOr } from './stated';
+import { mattersSentence } from './matters';
+import { isStated } from './stated';
 import { verdictSentence } from './verdictSentence';
 
 /** The comparison in one paragraph that stands for itself in a notebook. */
@@ -38,9 +39,15 @@ export function notebookParagraph(comparison: Comparison, context: ViewContext, 
     designSentence(comparison, t),
     differenceSentence(comparison, scale, t),
     `${headline(comparison, scale, t)}.`,
+    comparison.settings.matters === null ? '' : mattersSentence(comparison, scale, t).full,
     verdictSentence(comparison, scale, t),
     excluded,
-    t('Not examined by this analysis: how the samples were drawn: {0}.', statedOr(provenance.sampling, t)),
+    isStated(provenance.sampling)
+      ? t(
+          'How the samples were drawn, as stated and not examined by this analysis: {0}.',
+          visible(provenance.sampling),
+        )
+      : t('How the samples were drawn was not stated, nor examined by this analysis.'),
   ]
     .filter(sentence => sentence !== '')
     .join(' ');

@@ -88,14 +88,14 @@ function heldAgainst(comparison: Comparison, scale: Scale, t: Say): string {
   return against === alikeValue(comparison) ? scale.typedNumber(against) : scale.typed(against);
 }
 
-/** "in all 3 rows that have one", "in all 3 rows", "in both rows". */
+/** "in all 3 counted rows that have one", "in all 3 counted rows", "in both counted rows". */
 function howMany(withInterval: number, without: number, t: Say): string {
   if (withInterval === 1) return t('in the one row that has one');
   if (without > 0)
     return withInterval === 2
-      ? t('in both rows that have one')
-      : t('in all {0} rows that have one', withInterval);
-  return withInterval === 2 ? t('in both rows') : t('in all {0} rows', withInterval);
+      ? t('in both counted rows that have one')
+      : t('in all {0} counted rows that have one', withInterval);
+  return withInterval === 2 ? t('in both counted rows') : t('in all {0} counted rows', withInterval);
 }
 
 function rangeWords(ends: readonly number[], scale: Scale, t: Say): string {
