@@ -1,7 +1,7 @@
 import type { Table } from '../core/model/cells';
 import type { Comparison } from '../core/model/comparison';
 import type { Hasher } from '../core/model/hasher';
-import type { Ticker } from '../core/model/problem';
+import { Refusal, type Ticker } from '../core/model/problem';
 import type { ByteSource } from '../readers/byteSource';
 import { readTable } from '../readers/readTable';
 import { scout, type Scouted } from '../readers/scout';
@@ -47,7 +47,7 @@ export async function answer(
   const scouted: Scouted[] = [];
   for (const [file, source] of sources.entries()) scouted.push(await scout(source, request.wish, file));
   const wanted = {
-    ...columnsNeeded(request, scouted[0]?.fields ?? [], options.methods),
+    ...columnsIn(request, scouted[0], options),
     keepLines: new Set((request.leaveOut ?? []).map(({ line }) => line)),
   };
   const hashers = sources.map(() => platform.createHasher());
@@ -65,6 +65,21 @@ export async function answer(
     sha256: hashers[file]?.hex() ?? '',
   }));
   return { comparison: answerFrom(table, request, platform.tick, options), table, files };
+}
+
+/** The columns needed; one that is not there is missing from the line of the header. */
+function columnsIn(
+  request: Request,
+  scouted: Scouted | undefined,
+  { methods }: CompareOptions,
+): ReturnType<typeof columnsNeeded> {
+  try {
+    return columnsNeeded(request, scouted?.fields ?? [], methods);
+  } catch (error) {
+    if (!(error instanceof Refusal) || scouted === undefined || scouted.reading.headerLine === 0) throw error;
+    if (error.code !== 'column-unknown' && error.code !== 'column-ambiguous') throw error;
+    throw new Refusal(error.code, error.facts, { file: 0, line: scouted.reading.headerLine, field: 0 });
+  }
 }
 
 /** The same for a table that is already read: what a panel does when something is changed that needs no other column. */

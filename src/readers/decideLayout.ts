@@ -56,6 +56,7 @@ export function decideLayout(head: HeadBytes, wish: ReadingWish, name: string, f
   }
   refuseWithoutRows(best, head.whole, wish, name, file);
   refuseUndecidable(best, candidates, name, file);
+  if (wish.decimal === undefined && wish.thousands === undefined) refuseGroupedPoints(best, name, file);
   refuseEqualLayouts(best, candidates, name);
   const rows = best.head.records.slice(best.place.data);
   const thousands =
@@ -117,6 +118,35 @@ function refuseUndecidable(best: Candidate, all: readonly Candidate[], name: str
       const facts = { name, text, asDecimal: text.replace(',', '.'), asThousands: grouped.text };
       throw new Refusal('decimal-undecidable', facts, { file, line: record.line, field: column });
     }
+  }
+}
+
+const WHOLE_BELOW_1000 = /^[+\-\u2212]?\d{1,3}$/;
+const POINT = /^[+\-\u2212]?\d+\.\d+$/;
+
+/**
+ * Where commas do not part the cells, a point before exactly three digits beside whole numbers below 1000 parts thousands as
+ * well as decimals: 1.234 is 1234 where 345 stands under it.
+ */
+function refuseGroupedPoints(
+  { head, place, delimiter, decimal }: Candidate,
+  name: string,
+  file: number,
+): void {
+  if (delimiter === ',' || decimal !== '.') return;
+  for (const column of place.numeric) {
+    const cells = head.records.slice(place.data).flatMap(({ cells: own, line }) => {
+      const text = (own[column] ?? '').trim();
+      return text === '' ? [] : [{ text, line }];
+    });
+    const points = cells.filter(({ text }) => POINT.test(text));
+    const grouped = points.filter(({ text }) => readGrouped(text, ',')?.ambiguous === true);
+    const [first] = grouped;
+    const isMixed = cells.some(({ text }) => WHOLE_BELOW_1000.test(text));
+    if (first === undefined || !isMixed || grouped.length < points.length) continue;
+    const { text, line } = first;
+    const facts = { name, text, asDecimal: text, asThousands: readGrouped(text, ',')?.text ?? text };
+    throw new Refusal('decimal-undecidable', facts, { file, line, field: column });
   }
 }
 

@@ -16,10 +16,14 @@ export interface HeadBytes {
 }
 
 /**
- * The first bytes of a file as UTF-8.
+ * The first bytes of a file as UTF-8; `file` is its index, for problems.
  * @throws Refusal file-empty, file-binary, encoding-invalid
  */
-export async function readHead(source: ByteSource, encoding: string | undefined): Promise<HeadBytes> {
+export async function readHead(
+  source: ByteSource,
+  encoding: string | undefined,
+  file: number,
+): Promise<HeadBytes> {
   const parts: Uint8Array[] = [];
   let length = 0;
   let whole = true;
@@ -40,7 +44,11 @@ export async function readHead(source: ByteSource, encoding: string | undefined)
   if (length === 0) throw new Refusal('file-empty', { name: source.name }, source.name);
   const choice = decideEncoding(head, encoding);
   if (choice === null)
-    throw new Refusal('file-binary', { name: source.name, byte: null, line: null }, source.name);
+    throw new Refusal(
+      'file-binary',
+      { name: source.name, byte: head.indexOf(0), line: lineOfFirst(head, byte => byte === 0) },
+      { file, line: lineOfFirst(head, byte => byte === 0), field: 0 },
+    );
   const bytes = utf8Head(head, choice.encoding, choice.skip, source.name);
   return { bytes, whole, choice, fallbackLine: choice.fallback ? lineOfFirst(head, byte => byte > 0x7f) : 0 };
 }

@@ -36,7 +36,7 @@ export interface Scouted {
  * layouts-equal, header-not-found
  */
 export async function scout(source: ByteSource, wish: ReadingWish, file = 0): Promise<Scouted> {
-  const head = await readHead(source, wish.encoding);
+  const head = await readHead(source, wish.encoding, file);
   const layout = decideLayout(head, wish, source.name, file);
   const { records } = layout.head;
   const { header, units, data, numeric } = layout.place;

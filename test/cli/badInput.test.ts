@@ -55,6 +55,19 @@ describe('a file that cannot be compared gets a problem that says where and what
     ],
     ['values too large to compute with', good.replace(/(\d\.\d)/g, '$1e300'), 'number-unusable', ['North']],
     ['values too small to compute with', good.replace(/(\d\.\d)/g, '$1e-300'), 'number-unusable', ['North']],
+    [
+      'points that part thousands as well as decimals',
+      'site;mass\nNorth;1.234\nNorth;345\nSouth;3.456\nSouth;999\n',
+      'decimal-undecidable',
+      ['line 2, column 2', '1.234', '1234', '--decimal'],
+    ],
+    [
+      'a decimal comma that comes late',
+      `site;mass\n${'North;3\nSouth;4\nNorth;5\nSouth;7\n'.repeat(100)}North;1,5\n`,
+      'text-in-measured',
+      ['line 402, column 2', '1,5', '--decimal comma'],
+    ],
+    ['a byte that no text has', good.replace('1.3', '1.3\0'), 'file-binary', ['line 4']],
     ['all values of all groups equal', good.replace(/\d\.\d/g, '5'), 'values-all-equal', ['5']],
   ];
   it.each(cases)('%s', async (_, text, code, words) => {
@@ -66,7 +79,7 @@ describe('a file that cannot be compared gets a problem that says where and what
   it('a column that does not exist: the columns there are', async () => {
     const { code, err } = await about(good, 'compare', 'data.csv', '--of', 'mas', '--by', 'site');
     expect(code).toBe(3);
-    expect(err).toMatch(/^column-unknown: .*mas.*site.*mass/);
+    expect(err).toMatch(/^column-unknown: .*mas.*data\.csv line 1.*site.*mass/);
   });
 
   it('a name that fits two columns: their places', async () => {

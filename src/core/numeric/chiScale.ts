@@ -19,15 +19,14 @@ export function chiScaleNodes(df: number, fineness: number, widest: number): Sca
   const key = `${df} ${fineness} ${widest}`;
   const known = kept.get(key);
   if (known !== undefined) return known;
-  const a = df / 2;
-  const logHeight = Math.LN2 + 0.5 * Math.log(a / (2 * Math.PI)) - stirlingError(a);
+  const density = logScaleDensity(df);
   const step = Math.min(1 / Math.sqrt(2 * df) / fineness, widest);
   const scales: number[] = [];
   const weights: number[] = [];
   const walk = (from: number, by: number): void => {
     for (let k = from; ; k += by) {
       const u = k * step;
-      const weight = Math.exp(logHeight - a * exponentBend(2 * u));
+      const weight = density(u);
       if (weight < NEGLIGIBLE && Math.abs(k) > 2) return;
       scales.push(Math.exp(u));
       weights.push(weight * step);
@@ -39,6 +38,13 @@ export function chiScaleNodes(df: number, fineness: number, widest: number): Sca
   if (kept.size >= KEPT) kept.clear();
   kept.set(key, nodes);
   return nodes;
+}
+
+/** The density of ln s at u, where s = χ_df/√df: highest at u = 0, and falling to both sides. */
+export function logScaleDensity(df: number): (u: number) => number {
+  const a = df / 2;
+  const logHeight = Math.LN2 + 0.5 * Math.log(a / (2 * Math.PI)) - stirlingError(a);
+  return u => Math.exp(logHeight - a * exponentBend(2 * u));
 }
 
 /** e^v − 1 − v without cancellation. */

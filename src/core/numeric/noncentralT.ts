@@ -33,7 +33,7 @@ export const noncentralityForLowerTail = (t: number, df: number, p: number): num
   -noncentralityForUpperTail(-t, df, p);
 
 /** Where an increasing function crosses 0 between low and high: false position (Illinois form, Dowell & Jarratt 1971). */
-export function crossing(increasing: (x: number) => number, low: number, high: number): number {
+function crossing(increasing: (x: number) => number, low: number, high: number): number {
   let below = increasing(low);
   let above = increasing(high);
   let [from, to] = [low, high];

@@ -1,15 +1,12 @@
-import { chiScaleNodes } from './chiScale';
-import { crossing } from './noncentralT';
 import { normalDensity, normalUpperTail } from './normal';
+import { OverScales } from './overScales';
+import { secantOfLogTail } from './secantOfLogTail';
 import { tUpperQuantile } from './studentT';
 
-const FINENESS = 2;
-const WIDEST = 1 / 20;
 const STEP = 1 / 8;
 const LOWEST = -8.5;
 const HIGHEST = 36;
-/** Above this many df the scale is 1 to the last digit. */
-const NO_SCALE = 1e8;
+const MOST_KEPT = 8;
 
 /** Fixed nodes of the inner integral over the largest of k normal values. */
 const largest = ((): {
@@ -21,43 +18,56 @@ const largest = ((): {
   return { z, below: z.map(at => normalUpperTail(-at)), weight: z.map(at => STEP * normalDensity(at)) };
 })();
 
+const upper = new Map<number, OverScales>();
+const lower = new Map<number, OverScales>();
+
 /** P(Q ≥ q): range of k ≥ 2 means over their own SD on df > 0 (Infinity: known SD). Source: Tukey 1953; Copenhaver & Holland 1988. */
-export function studentizedRangeUpperTail(q: number, k: number, df: number): number {
-  return q <= 0 ? 1 : overScales(q, df, w => rangeUpperTail(w, k));
-}
+export const studentizedRangeUpperTail = (q: number, k: number, df: number): number =>
+  q <= 0 ? 1 : kept(upper, k, () => new OverScales(w => rangeUpperTail(w, k), 'falling')).mean(q, df);
 
 /** P(Q ≤ q). */
-export function studentizedRangeLowerTail(q: number, k: number, df: number): number {
-  return q <= 0 ? 0 : overScales(q, df, w => rangeLowerTail(w, k));
-}
+export const studentizedRangeLowerTail = (q: number, k: number, df: number): number =>
+  q <= 0 ? 0 : kept(lower, k, () => new OverScales(w => rangeLowerTail(w, k), 'rising')).mean(q, df);
 
 /** q with P(Q ≥ q) = p, for p in (0, 1). */
 export function studentizedRangeUpperQuantile(p: number, k: number, df: number): number {
   if (!(p > 0 && p < 1)) return p === 0 ? Infinity : p === 1 ? 0 : NaN;
   if (p > 0.5) return studentizedRangeLowerQuantile(1 - p, k, df);
-  return quantile(p, k, df, q => -Math.log(studentizedRangeUpperTail(q, k, df) / p));
+  if (k === 2) return pairQuantile(p, df);
+  const [low, high] = bracket(p, k, df);
+  const nearby = bracket(p * NEARBY, k, df)[1];
+  const slope = Math.log(NEARBY) / Math.log(high / nearby);
+  return secantOfLogTail(q => studentizedRangeUpperTail(q, k, df), p, high, slope, [low, high]);
 }
 
 /** q with P(Q ≤ q) = p, for p in (0, 1). */
 export function studentizedRangeLowerQuantile(p: number, k: number, df: number): number {
   if (!(p > 0 && p < 1)) return p === 0 ? 0 : p === 1 ? Infinity : NaN;
   if (p > 0.5) return studentizedRangeUpperQuantile(1 - p, k, df);
-  return quantile(1 - p, k, df, q => Math.log(studentizedRangeLowerTail(q, k, df) / p));
+  const [, high] = bracket(0.5, k, df);
+  // The lower tail falls with 1/q, about as its power k − 1.
+  const start = high * p ** (1 / (k - 1));
+  const tail = (x: number): number => studentizedRangeLowerTail(1 / x, k, df);
+  return 1 / secantOfLogTail(tail, p, 1 / start, k - 1, [1 / high, Number.MAX_VALUE]);
 }
 
-/** Between the quantile of one pair, which is exact for k = 2, and that of all pairs taken one by one (Bonferroni). */
-function quantile(upper: number, k: number, df: number, shortfall: (q: number) => number): number {
-  const onePair = Math.SQRT2 * tUpperQuantile(upper / 2, df);
-  if (k === 2) return onePair;
+/** How far apart the two shares are taken from which the slope of a tail is guessed. */
+const NEARBY = 1.1;
+
+/** The range of two means is |t|·√2. */
+const pairQuantile = (p: number, df: number): number => Math.SQRT2 * tUpperQuantile(p / 2, df);
+
+/** Between the quantile of one pair and that of all pairs taken one by one (Bonferroni). */
+function bracket(p: number, k: number, df: number): readonly [low: number, high: number] {
   const pairs = (k * (k - 1)) / 2;
-  const allPairs = Math.SQRT2 * tUpperQuantile(upper / 2 / pairs, df);
-  return crossing(shortfall, onePair * (1 - 1e-9), allPairs * (1 + 1e-9));
+  return [pairQuantile(p, df) * (1 - 1e-9), pairQuantile(p / pairs, df) * (1 + 1e-9)];
 }
 
-function overScales(q: number, df: number, tail: (w: number) => number): number {
-  if (!(df < NO_SCALE)) return tail(q);
-  const { scales, weights } = chiScaleNodes(df, FINENESS, WIDEST);
-  return scales.reduce((sum, s, i) => sum + (weights[i] ?? 0) * tail(q * s), 0);
+function kept(all: Map<number, OverScales>, k: number, make: () => OverScales): OverScales {
+  const known = all.get(k) ?? make();
+  if (all.size >= MOST_KEPT) all.clear();
+  all.set(k, known);
+  return known;
 }
 
 /** k ∫ φ(z) [Φ(z)^(k−1) − (Φ(z) − Φ(z − w))^(k−1)] dz, the difference formed by log1p and expm1. */

@@ -1,6 +1,9 @@
 import type { SayProblem } from './told';
 
 /** Why a file could not be read. */
+/** A number with a comma for its decimal mark, met where points were expected. */
+const OTHER_MARK = /^[+\-\u2212]?\d+,\d+$/;
+
 export const readingProblems = {
   'file-empty': ({ t }) => ({
     message: t('The file is empty'),
@@ -64,14 +67,23 @@ export const readingProblems = {
     fix: t('Name the line that holds the column names.'),
     flag: '--header N',
   }),
-  'text-in-measured': ({ t, number, list }) => ({
+  'text-in-measured': ({ t, number, list, names }) => ({
     message: t(
       '{0} of the measured cells hold text that is not a number: {1}',
       number('count') ?? 1,
       list('texts') ?? '',
     ),
-    fix: t('Correct the cells in the file, or leave those rows out with a reason.'),
-    flag: '--leave-out "LINE:reason"',
+    ...(names('texts').some(text => OTHER_MARK.test(text.trim()))
+      ? {
+          fix: t(
+            'If the comma parts the decimals, name it as the decimal mark; else correct the cells in the file, or leave those rows out with a reason.',
+          ),
+          flag: '--decimal comma, or --leave-out "LINE:reason"',
+        }
+      : {
+          fix: t('Correct the cells in the file, or leave those rows out with a reason.'),
+          flag: '--leave-out "LINE:reason"',
+        }),
   }),
   'censored-unanswered': ({ t, number }) => ({
     message: t(

@@ -28,7 +28,12 @@ import {
   noncentralTUpperTail,
 } from '../../../src/core/numeric/noncentralT';
 import { rootOfLogTail } from '../../../src/core/numeric/rootOfLogTail';
-import { studentizedRangeUpperQuantile } from '../../../src/core/numeric/studentizedRange';
+import {
+  studentizedRangeLowerQuantile,
+  studentizedRangeLowerTail,
+  studentizedRangeUpperQuantile,
+  studentizedRangeUpperTail,
+} from '../../../src/core/numeric/studentizedRange';
 import { tLowerTail, tTwoSided, tUpperQuantile, tUpperTail } from '../../../src/core/numeric/studentT';
 
 const fixtures = path.join(import.meta.dirname, 'fixtures');
@@ -41,20 +46,13 @@ const probability = fc.double({ min: 1e-12, max: 1 - 1e-12, noNaN: true });
 const df = fc.double({ min: 1, max: 1e6, noNaN: true });
 const moderate = fc.double({ min: -30, max: 30, noNaN: true });
 
-/** The quantiles of the studentized range take a tenth of a second each, more on a busy machine. */
-const WHOLE_GRID_MS = 180_000;
-
 // Source of every grid: 50-digit arithmetic (mpmath) from the exact doubles of the arguments.
 describe('tails and quantiles', () => {
-  it.each(grids.map(grid => [grid.name, grid] as const))(
-    'of %s keep 13 digits on every point',
-    (_, grid) => {
-      const digits = digitsOf(grid);
-      expect(digits?.length).toBeGreaterThanOrEqual(grid.rows.length);
-      expect(summaryOf(digits ?? []).fewest).toBeGreaterThanOrEqual(13);
-    },
-    WHOLE_GRID_MS,
-  );
+  it.each(grids.map(grid => [grid.name, grid] as const))('of %s keep 13 digits on every point', (_, grid) => {
+    const digits = digitsOf(grid);
+    expect(digits?.length).toBeGreaterThanOrEqual(grid.rows.length);
+    expect(summaryOf(digits ?? []).fewest).toBeGreaterThanOrEqual(13);
+  });
 
   it('agree with an independent implementation at its own accuracy', () => {
     // jstat 1.9: tails by continued fraction to about 3e-7, quantiles to 7 to 10 digits.
@@ -189,6 +187,42 @@ describe('the distributions of sizes, counts and ranges', () => {
     expect(studentizedRangeUpperQuantile(0.05, 2, 9)).toBe(Math.SQRT2 * tUpperQuantile(0.025, 9));
     // Source: NIST/SEMATECH e-Handbook 7.4.7.1 prints q(0.05; 4, 16) = 4.05.
     expect(studentizedRangeUpperQuantile(0.05, 4, 16)).toBeCloseTo(4.05, 2);
+  });
+
+  it('the quantile of a range inverts its tails, for few df and for many', () => {
+    fc.assert(
+      fc.property(
+        fc.double({ min: 1e-6, max: 0.999, noNaN: true }),
+        fc.integer({ min: 2, max: 60 }),
+        fc.constantFrom(1, 1.7, 2.1, 5.3, 12, 400.5, 1e6, Infinity),
+        (p, k, n) => {
+          const upper = studentizedRangeUpperQuantile(p, k, n);
+          expect(relative(studentizedRangeUpperTail(upper, k, n), p)).toBeLessThan(1e-12);
+          expect(studentizedRangeLowerTail(upper, k, n) + p).toBeCloseTo(1, 13);
+          const lower = studentizedRangeLowerQuantile(p, k, n);
+          expect(relative(studentizedRangeLowerTail(lower, k, n), p)).toBeLessThan(1e-12);
+        },
+      ),
+      { numRuns: 60 },
+    );
+  });
+
+  it('the tails of a range end at 0 and infinity, and its quantiles at 0 and 1', () => {
+    expect([studentizedRangeUpperTail(0, 4, 9), studentizedRangeUpperTail(Infinity, 4, 9)]).toEqual([1, 0]);
+    expect(studentizedRangeLowerTail(0, 4, 9)).toBe(0);
+    expect(studentizedRangeLowerTail(Infinity, 4, 9)).toBeCloseTo(1, 15);
+    expect([studentizedRangeUpperQuantile(0, 4, 9), studentizedRangeUpperQuantile(1, 4, 9)]).toEqual([
+      Infinity,
+      0,
+    ]);
+    expect([studentizedRangeLowerQuantile(0, 4, 9), studentizedRangeLowerQuantile(1, 4, 9)]).toEqual([
+      0,
+      Infinity,
+    ]);
+    expect([studentizedRangeUpperTail(NaN, 4, 9), studentizedRangeUpperQuantile(NaN, 4, 9)]).toEqual([
+      NaN,
+      NaN,
+    ]);
   });
 });
 
