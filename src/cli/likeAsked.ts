@@ -43,6 +43,7 @@ export async function likeAsked(
   };
   if (!isSame) {
     refuseOtherOrder(recipe, said, files);
+    refuseOtherLines(recipe, said);
     return answer(sources, laidOver({ ...request, leaveOut: [] }, said), platform);
   }
   const { 'left-out': leftOut, ...others } = block;
@@ -78,6 +79,16 @@ async function sha256Of(source: ByteSource): Promise<string> {
   const hasher = platform.createHasher();
   for await (const chunk of source.chunks()) hasher.update(chunk);
   return hasher.hex();
+}
+
+/** Lines of one file say nothing of another. */
+function refuseOtherLines({ request }: Recipe, said: Said): void {
+  if (request.rows === undefined || said.rows !== undefined) return;
+  const lines = request.rows.map(([from, to]) => `${from}-${to}`).join(',');
+  throw new UsageError(
+    `The block takes lines ${lines} of ${request.files.join(', ')}, which are other rows of another file`,
+    'Say which lines are meant with --rows.',
+  );
 }
 
 /** Of files in another order it cannot be said that they are other files, nor which rows were left out of which. */

@@ -136,6 +136,14 @@ describe('a recipe on another file', () => {
     }
   });
 
+  it('is refused where the recipe takes lines of its own file, until lines are said anew', async () => {
+    await using temp = await recorded(csv(), '--rows', '2-8');
+    await temp.write('next.csv', csv());
+    const words = ['compare', 'next.csv', '--like', 'note.md'];
+    expect((await weighbeam(temp.folder, ...words)).err).toMatch(/lines 2-8 of data\.csv.*--rows/);
+    expect((await weighbeam(temp.folder, ...words, '--rows', '2-9')).code).toBe(0);
+  });
+
   it('does so also where thousands were marked, and where the file of that name was exported anew', async () => {
     const thousands = german.replaceAll(/-(\d),(\d)/g, '1.23$1,$2');
     await using temp = await recorded(thousands);

@@ -48,9 +48,11 @@ export function studentizedRangeLowerQuantile(p: number, k: number, df: number):
   // The lower tail falls with 1/q, about as its power k − 1.
   const start = high * p ** (1 / (k - 1));
   const tail = (x: number): number => studentizedRangeLowerTail(1 / x, k, df);
-  return 1 / secantOfLogTail(tail, p, 1 / start, k - 1, [1 / high, Number.MAX_VALUE]);
+  return 1 / secantOfLogTail(tail, p, 1 / start, k - 1, [1 / high, 1 / (LEAST * p)]);
 }
 
+/** √2/2φ(0): a single pair lies below q with no more than q/LEAST, whatever the df. */
+const LEAST = Math.SQRT2 / 2 / normalDensity(0);
 /** How far apart the two shares are taken from which the slope of a tail is guessed. */
 const NEARBY = 1.1;
 
