@@ -138,7 +138,7 @@ describe('a recipe on another file', () => {
 
   it('is refused where the recipe takes lines of its own file, until lines are said anew', async () => {
     await using temp = await recorded(csv(), '--rows', '2-8');
-    await temp.write('next.csv', csv());
+    await temp.write('next.csv', csv([...rows, 'old,11.9']));
     const words = ['compare', 'next.csv', '--like', 'note.md'];
     expect((await weighbeam(temp.folder, ...words)).err).toMatch(/lines 2-8 of data\.csv.*--rows/);
     expect((await weighbeam(temp.folder, ...words, '--rows', '2-9')).code).toBe(0);
