@@ -193,7 +193,7 @@ describe('the distributions of sizes, counts and ranges', () => {
     fc.assert(
       fc.property(
         fc.double({ min: 1e-6, max: 0.999, noNaN: true }),
-        fc.integer({ min: 2, max: 60 }),
+        fc.constantFrom(2, 3, 9, 60),
         fc.constantFrom(1, 1.7, 2.1, 5.3, 12, 400.5, 1e6, Infinity),
         (p, k, n) => {
           const upper = studentizedRangeUpperQuantile(p, k, n);
