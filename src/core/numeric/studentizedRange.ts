@@ -1,4 +1,5 @@
 import { normalDensity, normalUpperTail } from './normal';
+import { normalBetween } from './normalBetween';
 import { OverScales } from './overScales';
 import { secantOfLogTail } from './secantOfLogTail';
 import { tUpperQuantile } from './studentT';
@@ -94,12 +95,7 @@ function rangeLowerTail(w: number, k: number): number {
   const { z, weight } = largest;
   let sum = 0;
   for (let i = 0; i < z.length; i += 1) {
-    const at = z[i] ?? 0;
-    const between =
-      at > w / 2
-        ? normalUpperTail(at - w) - normalUpperTail(at)
-        : normalUpperTail(-at) - normalUpperTail(w - at);
-    sum += (weight[i] ?? 0) * Math.max(between, 0) ** (k - 1);
+    sum += (weight[i] ?? 0) * normalBetween(z[i] ?? 0, w) ** (k - 1);
   }
   return k * sum;
 }
