@@ -65,6 +65,7 @@ suite('the extension', () => {
     (await weighbeam()).endWorker();
     const after = await compare(uri, request);
     assert.deepEqual(after.numbers, before.numbers);
+    assert.equal(after.restarted, false, 'no calculation was lost');
   });
 
   test('takes up the panel that a comparison has already', async () => {

@@ -65,7 +65,8 @@ function isWithinHeader(span: TextSpan, text: SelectableText): boolean {
 
 function headerColumns(spans: readonly TextSpan[], text: SelectableText): readonly number[] {
   const line = text.headerLine - 1;
-  const cells = cellSpans(text.lines, line, text.lines.length, text.delimiter);
+  const next = (text.rowLines[0] ?? text.lines.length + 1) - 1;
+  const cells = cellSpans(text.lines, line, next, text.delimiter);
   return cells.flatMap((cell, index) => (spans.some(span => touches(span, cell)) ? [index] : []));
 }
 

@@ -1,6 +1,7 @@
 import { describe, expect, it } from 'vitest';
 import type { TextSpan } from '../../../src/protocol/files';
-import { textLines } from '../../../src/worker/selecting/cellSpans';
+import { splitRecord } from '../../../src/readers/splitRecord';
+import { cellSpans, textLines } from '../../../src/worker/selecting/cellSpans';
 import { sayTaken } from '../../../src/worker/selecting/sayTaken';
 import { selected, type SelectableText } from '../../../src/worker/selecting/selected';
 import { sayFrom } from '../../../src/worker/sayFrom';
@@ -113,5 +114,22 @@ describe('what was taken, in words', () => {
   it('names the columns where some were singled out', () => {
     expect(say(span(2, 5, 2, 22))).toBe('all 5 rows, columns schedule, hardness');
     expect(say(span(3, 3, 3, 5), span(7, 3, 7, 5))).toBe('lines 3, 7, column schedule');
+  });
+});
+
+describe('the cells of a row', () => {
+  it('are parted as the reader parts them, also where a quoted cell goes on behind its quote', () => {
+    const parts = (row: string) => {
+      const lines = textLines(row);
+      return cellSpans(lines, 0, lines.length, ',').map(cell => [cell.startCharacter, cell.endCharacter]);
+    };
+    for (const row of ['a,b,c', '"a,1",b', '"a"b,c",2', 'x,"say ""no"", twice",3', ',,']) {
+      const read = splitRecord(row, ',');
+      expect(parts(row).length, row).toBe(read.length);
+    }
+    expect(parts('"a,1",b')).toEqual([
+      [0, 5],
+      [6, 7],
+    ]);
   });
 });
