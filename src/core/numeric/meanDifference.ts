@@ -8,7 +8,10 @@ import { scaleOf } from './steps';
  * Mean of the test group − mean of the reference group, in units of the measured column. Samples in one frame: exact,
  * rounded once. Summaries and computed doubles: plain subtraction.
  */
-export function meanDifference(test: Group, reference: Group): number {
+export function meanDifference(
+  test: Pick<Group, 'mean' | 'sample'>,
+  reference: Pick<Group, 'mean' | 'sample'>,
+): number {
   if (test.sample === null || reference.sample === null) return test.mean - reference.mean;
   return differenceOfSamples(test.sample, reference.sample);
 }

@@ -43,6 +43,17 @@ const OWN_REASONS: Readonly<Record<string, readonly Reason[]>> = {
   ],
   newcombe: [{ code: 'no-outcomes', facts: { label: 'slow' } }],
   'miettinen-nurminen': [{ code: 'no-outcomes', facts: { label: 'slow' } }],
+  'one-way': [
+    { code: 'one-group', facts: {} },
+    { code: 'against-not-zero', facts: {} },
+    { code: 'no-spread-in-any', facts: {} },
+    { code: 'one-constant-group', facts: { label: 'slow' } },
+  ],
+  'welch-one-way': [
+    { code: 'one-group', facts: {} },
+    { code: 'against-not-zero', facts: {} },
+    { code: 'known-exactly', facts: { label: 'slow' } },
+  ],
   permutation: [
     { code: 'no-values', facts: {} },
     { code: 'too-many-ways', facts: { n: 12, m: 12 } },
