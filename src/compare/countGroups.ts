@@ -2,6 +2,7 @@ import type { Table } from '../core/model/cells';
 import type { Count, Unit } from '../core/model/groups';
 import { Refusal } from '../core/model/problem';
 import type { Settings } from '../core/model/settings';
+import { successOf } from './pairCounts';
 import { usedRows, type Selection } from './selection';
 
 /** The outcomes of one group. */
@@ -17,13 +18,9 @@ interface CountedGroup {
  * refused ('units-disagree').
  */
 export function countGroups(table: Table, selection: Selection, settings: Settings): readonly CountedGroup[] {
-  const success = settings.options['success'];
   return selection.groups.map((label, group) => {
-    const measured = selection.measured[group];
-    if (measured?.kind !== 'outcomes') throw new RangeError('outcomes are counted, not numbers');
-    const wanted = typeof success === 'string' ? measured.column.levels.indexOf(success) : -1;
     const rows = usedRows(selection, group);
-    const isSuccess = (row: number): boolean => measured.column.codes[row] === wanted;
+    const isSuccess = successOf(selection, group, settings);
     if (settings.relation.kind !== 'units') {
       return {
         count: { label, x: rows.filter(isSuccess).length, n: rows.length },
@@ -31,7 +28,8 @@ export function countGroups(table: Table, selection: Selection, settings: Settin
         units: null,
       };
     }
-    const units = [...agreedUnits(table, selection, { rows, field: measured.field }, isSuccess).values()];
+    const field = selection.measured[group]?.field ?? 0;
+    const units = [...agreedUnits(table, selection, { rows, field }, isSuccess).values()];
     const x = units.filter(unit => unit.success).length;
     return { count: { label, x, n: units.length }, readings: rows.length, units };
   });

@@ -4,6 +4,7 @@ import type { Count, Group, Summary } from '../core/model/groups';
 import { Refusal, type Ticker } from '../core/model/problem';
 import type { Settings } from '../core/model/settings';
 import { countGroups } from './countGroups';
+import { pairCounts } from './pairCounts';
 import { pairCorrelation } from './pairCorrelation';
 import { pairGroups } from './pairGroups';
 import type { DesignData } from './runRow';
@@ -15,7 +16,7 @@ import { valueGroups } from './valueGroups';
 /** The data of one comparison, ready for the methods. */
 export interface Prepared {
   readonly selection: Selection | null;
-  readonly design: 'two' | 'pairs' | 'several' | 'counts';
+  readonly design: keyof DesignData;
   readonly designs: DesignData;
   readonly groups: readonly Group[];
   /** For shares: the counts behind the groups. */
@@ -52,6 +53,7 @@ export function prepare(table: Table | null, settings: Settings, tick: Ticker): 
 }
 
 function fromOutcomes(table: Table, selection: Selection, settings: Settings): Prepared {
+  if (settings.relation.kind === 'pairs') return fromPairedOutcomes(table, selection, settings);
   const counted = countGroups(table, selection, settings);
   const rest = uncounted(selection, settings.layout);
   const groups = counted.map(({ count, readings, units }, group) => ({
@@ -66,6 +68,20 @@ function fromOutcomes(table: Table, selection: Selection, settings: Settings): P
     groups,
     selection,
   );
+}
+
+function fromPairedOutcomes(table: Table, selection: Selection, settings: Settings): Prepared {
+  const { table: pairedCounts, counts, unmatched } = pairCounts(table, selection, settings);
+  const rest = uncounted(selection, settings.layout);
+  const groups = counts.map((count, group) => ({ ...groupOfCount(count), ...(rest[group] ?? {}) }));
+  return {
+    selection,
+    design: 'pairedCounts',
+    designs: { pairedCounts },
+    groups,
+    counts,
+    pairs: { complete: counts[0].n, unmatched, correlation: null },
+  };
 }
 
 function fromSummaries(
