@@ -54,6 +54,14 @@ const OWN_REASONS: Readonly<Record<string, readonly Reason[]>> = {
     { code: 'against-not-zero', facts: {} },
     { code: 'known-exactly', facts: { label: 'slow' } },
   ],
+  'kruskal-wallis': [
+    { code: 'one-group', facts: {} },
+    { code: 'against-not-zero', facts: {} },
+    { code: 'no-values', facts: {} },
+    { code: 'all-equal', facts: {} },
+    { code: 'few-for-chi-square', facts: { label: 'slow', n: 3 } },
+    { code: 'cannot-reach', facts: { ways: 90, least: 0.067 } },
+  ],
   permutation: [
     { code: 'no-values', facts: {} },
     { code: 'too-many-ways', facts: { n: 12, m: 12 } },
